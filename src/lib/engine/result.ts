@@ -1,0 +1,18 @@
+/** An expected failure or a value; bugs throw, bad input does not. */
+export type Result<T, E> = { ok: true; value: T } | { ok: false; error: E };
+
+export const ok = <T>(value: T): Result<T, never> => ({ ok: true, value });
+export const fail = <E>(error: E): Result<never, E> => ({ ok: false, error });
+
+/** One thing wrong with an input; `path` is dotted from the section (`tw`, `plates.2.width`). */
+export interface Issue {
+	path: string;
+	message: string;
+}
+
+/** Why a figure is absent or must be read with care. */
+export interface Note {
+	code: string;
+	message: string;
+	clause?: string;
+}

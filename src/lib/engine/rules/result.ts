@@ -1,0 +1,84 @@
+/** The contract's demand: factored design effects, kN and kNm. */
+export interface Demand {
+	name?: string;
+	N?: number;
+	My?: number;
+	Mz?: number;
+	Vy?: number;
+	Vz?: number;
+	unbracedLength?: number;
+	C1?: number;
+	zg?: number;
+}
+
+export type Standard =
+	'EN1993-1-1:2005' | 'EN1993-1-1:2022' | 'AISC360-22' | 'CSA-S16:19' | 'AS4100' | 'IS800';
+
+/** The code and its choices, defaults filled in. */
+export interface CodeChoice {
+	standard: Standard;
+	gammaM0: number;
+	gammaM1: number;
+	gammaM2: number;
+	eta: number;
+	method: 'LRFD' | 'ASD';
+	classAlpha: 'actual-N' | 'proportional';
+	allowEffectiveClass2: boolean;
+}
+
+export type SectionClass = 1 | 2 | 3 | 4;
+
+export interface ClassifiedElement {
+	part: string;
+	type: 'internal' | 'outstand' | 'tubular' | 'angle';
+	stress: 'compression' | 'bending' | 'combined' | 'tension';
+	c: number;
+	t: number;
+	slenderness: number;
+	epsilon: number;
+	alpha?: number;
+	psi?: number;
+	/** Limits of classes 1, 2, 3 on the slenderness; empty for a part in tension. */
+	limits: number[];
+	class: SectionClass;
+	clause: string;
+}
+
+export interface Classification {
+	standard: Standard;
+	overall: SectionClass;
+	basis: '+My' | '−My' | 'N' | 'demand';
+	elements: ClassifiedElement[];
+	governing: string;
+	byCase: {
+		plusMy: SectionClass | null;
+		minusMy: SectionClass | null;
+		plusMz: SectionClass | null;
+		minusMz: SectionClass | null;
+		compression: SectionClass | null;
+	};
+}
+
+export interface ResistanceCheck {
+	demand: string;
+	name: string;
+	clause: string;
+	value: number;
+	limit: number;
+	utilisation: number;
+}
+
+export interface Resistance {
+	standard: Standard;
+	basis: 'plastic' | 'effective-class-2' | 'interpolated' | 'elastic' | 'effective';
+	MyRd: number | null;
+	MyRdNegative: number | null;
+	MzRd: number | null;
+	NRd: number | null;
+	NtRd: number | null;
+	VyRd: number | null;
+	VzRd: number | null;
+	checks: ResistanceCheck[];
+	/** Null when a check that applies is missing. */
+	utilisation: { governing: string; value: number } | null;
+}

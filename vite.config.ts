@@ -1,0 +1,43 @@
+import { sveltekit } from '@sveltejs/kit/vite';
+import { svelteTesting } from '@testing-library/svelte/vite';
+import { defineConfig } from 'vitest/config';
+
+export default defineConfig({
+	plugins: [sveltekit()],
+	build: { chunkSizeWarningLimit: 900 },
+	test: {
+		projects: [
+			{
+				extends: true,
+				test: {
+					name: 'unit',
+					environment: 'node',
+					include: ['src/**/*.test.ts', 'tests/published/**/*.test.ts', 'tests/house/**/*.test.ts'],
+					exclude: ['src/**/*.svelte.test.ts']
+				}
+			},
+			{
+				extends: true,
+				plugins: [svelteTesting()],
+				test: {
+					name: 'component',
+					environment: 'jsdom',
+					include: ['src/**/*.svelte.test.ts'],
+					setupFiles: ['tests/setup/component.ts']
+				}
+			},
+			{
+				extends: true,
+				test: {
+					name: 'e2e',
+					environment: 'node',
+					include: ['tests/api/**/*.test.ts', 'tests/e2e/**/*.test.ts', 'tests/load/**/*.test.ts'],
+					globalSetup: ['tests/setup/server.ts'],
+					testTimeout: 60_000,
+					hookTimeout: 120_000,
+					fileParallelism: false
+				}
+			}
+		]
+	}
+});
