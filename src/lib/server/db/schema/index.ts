@@ -1,0 +1,12 @@
+export { accounts } from './accounts';
+export { auditLog } from './audit-log';
+export { catalogues } from './catalogues';
+export { firms } from './firms';
+export { localMail } from './local-mail';
+export { memberships } from './memberships';
+export { passwordResets } from './password-resets';
+export { sectionVersions } from './section-versions';
+export { sections } from './sections';
+export { shapes } from './shapes';
+export { users } from './users';
+export { verificationTokens } from './verification-tokens';
