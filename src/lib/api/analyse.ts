@@ -1,0 +1,139 @@
+import { codeSchema, standardSchema } from './code';
+import { demandSchema } from './demand';
+import { must } from './describe';
+import { envelopeFields } from './envelope';
+import { listOf, oneOf, quantity } from './fields';
+import { grossSchema } from './gross';
+import { limits } from './limits';
+import { namesOneTarget, targetFields, targetMissing } from './target';
+import { z } from './zod';
+
+const stiffeners = z.object(
+	{
+		spacing: quantity('Spacing of stiffeners', 'mm'),
+		endPost: oneOf('endPost', ['rigid', 'non-rigid'])
+	},
+	{ error: must('stiffeners', 'an object with spacing and endPost') }
+);
+
+export const analyseRequestSchema = z
+	.object(
+		{
+			...targetFields,
+			code: codeSchema.optional(),
+			demand: demandSchema.optional(),
+			demands: listOf('demands', demandSchema, limits.demands).optional(),
+			stiffeners: stiffeners.optional()
+		},
+		{ error: must('The request', 'an object with section or shapeId') }
+	)
+	.refine(namesOneTarget, targetMissing)
+	.meta({ id: 'AnalyseRequest' });
+
+export type AnalyseRequest = z.infer<typeof analyseRequestSchema>;
+
+const figure = (unit: string) => z.number().nullable().meta({ 'x-unit': unit });
+const sectionClass = z.union([
+	z.literal([1, 2, 3, 4]),
+	z.enum(['compact', 'noncompact', 'slender'])
+]);
+
+const momentSchema = z.looseObject({
+	firstYieldY: figure('kNm'),
+	firstYieldZ: figure('kNm'),
+	plasticY: figure('kNm'),
+	plasticZ: figure('kNm'),
+	plasticNeutralAxisZ: figure('mm'),
+	plasticNeutralAxisY: figure('mm'),
+	shapeFactorY: figure(''),
+	shapeFactorZ: figure('')
+});
+
+const elementSchema = z.looseObject({
+	part: z.string(),
+	type: z.enum(['internal', 'outstand', 'tubular', 'angle']),
+	stress: z.enum(['compression', 'bending', 'combined', 'tension']),
+	c: z.number().meta({ 'x-unit': 'mm' }),
+	t: z.number().meta({ 'x-unit': 'mm' }),
+	slenderness: z.number(),
+	epsilon: z.number(),
+	alpha: z.number().optional(),
+	psi: z.number().optional(),
+	limits: z.array(z.number()),
+	class: sectionClass,
+	clause: z.string()
+});
+
+const classificationSchema = z.looseObject({
+	standard: standardSchema,
+	overall: sectionClass,
+	basis: z.enum(['+My', '−My', 'N', 'demand']),
+	elements: z.array(elementSchema),
+	governing: z.string(),
+	byCase: z.looseObject({
+		plusMy: sectionClass.nullable(),
+		minusMy: sectionClass.nullable(),
+		plusMz: sectionClass.nullable(),
+		minusMz: sectionClass.nullable(),
+		compression: sectionClass.nullable()
+	})
+});
+
+const effectiveFields = {
+	area: z.number(),
+	secondMomentY: z.number(),
+	elasticModulusYTop: z.number(),
+	elasticModulusYBottom: z.number(),
+	centroidShiftZ: z.number(),
+	removed: z.array(z.looseObject({ part: z.string(), from: z.number(), to: z.number() }))
+};
+const effectiveSchema = z.looseObject({
+	basis: z.enum(['+My', '−My', 'Mz', 'N']),
+	...effectiveFields,
+	converged: z.looseObject(effectiveFields)
+});
+
+const checkSchema = z.looseObject({
+	demand: z.string(),
+	name: z.string(),
+	clause: z.string(),
+	value: z.number(),
+	limit: z.number(),
+	utilisation: z.number().meta({ description: 'value / limit' })
+});
+
+const resistanceSchema = z.looseObject({
+	standard: standardSchema,
+	basis: z.enum(['plastic', 'effective-class-2', 'interpolated', 'elastic', 'effective']),
+	MyRd: figure('kNm'),
+	MyRdNegative: figure('kNm'),
+	MzRd: figure('kNm'),
+	NRd: figure('kN'),
+	NtRd: figure('kN'),
+	VyRd: figure('kN'),
+	VzRd: figure('kN'),
+	VbRd: figure('kN').optional(),
+	MbRd: figure('kNm').optional(),
+	MyVRd: figure('kNm').optional(),
+	MyNRd: figure('kNm').optional(),
+	MzNRd: figure('kNm').optional(),
+	checks: z.array(checkSchema),
+	utilisation: z
+		.looseObject({ governing: z.string(), value: z.number() })
+		.nullable()
+		.meta({ description: 'Null when a check that applies is missing.' })
+});
+
+export const analyseAnswerSchema = z
+	.looseObject({
+		...envelopeFields,
+		gross: grossSchema,
+		moment: momentSchema,
+		squashLoad: figure('kN'),
+		classification: classificationSchema.nullable(),
+		effective: effectiveSchema.nullable(),
+		resistance: resistanceSchema.nullable()
+	})
+	.meta({ id: 'AnalyseAnswer' });
+
+export type AnalyseAnswer = z.infer<typeof analyseAnswerSchema>;

@@ -1,0 +1,99 @@
+import { strengthBasisSchema } from './code';
+import { must } from './describe';
+import { envelopeFields } from './envelope';
+import { listOf, oneOf, quantity, strict } from './fields';
+import { lawSchema } from './grade';
+import { limits } from './limits';
+import { namesOneTarget, targetFields, targetMissing } from './target';
+import { z } from './zod';
+
+const strainPlane = strict('A strain plane', {
+	e0: quantity('Strain at the centroid e0', ''),
+	ky: quantity('Curvature ky', '1/m'),
+	kz: quantity('Curvature kz', '1/m')
+});
+
+const atFields = (most: number) => ({
+	curvature: listOf('curvature', quantity('A curvature', '1/m'), most).optional(),
+	moment: listOf('moment', quantity('A moment', 'kNm'), most).optional(),
+	curvatureRatio: listOf('curvatureRatio', quantity('A curvature ratio', ''), most).optional(),
+	strainPlanes: listOf('strainPlanes', strainPlane, most).optional()
+});
+
+const atSchema = (title: string, most: number) =>
+	strict(title, atFields(most)).refine((at) => Object.keys(at).length === 1, {
+		error: `${title} takes exactly one of curvature, moment, curvatureRatio, strainPlanes.`
+	});
+
+export const responseRequestSchema = z
+	.object(
+		{
+			...targetFields,
+			strengthBasis: strengthBasisSchema.optional(),
+			axisAngle: quantity('axisAngle', 'degrees').optional(),
+			transverse: oneOf('transverse', ['curvature-zero', 'moment-zero']).optional(),
+			N: quantity('Axial force N', 'kN').optional(),
+			at: atSchema('at', limits.states).meta({
+				id: 'At',
+				description:
+					'Exactly one of the four; curvatureRatio is curvature over that at first yield.'
+			}),
+			law: lawSchema.optional().meta({ description: 'Takes the place of every part’s own law.' }),
+			residual: oneOf('residual', ['none', 'rolled', 'welded']).optional(),
+			unloadFrom: atSchema('unloadFrom', 1).optional()
+		},
+		{ error: must('The request', 'an object with section or shapeId, and at') }
+	)
+	.refine(namesOneTarget, targetMissing)
+	.meta({ id: 'ResponseRequest' });
+
+export type ResponseRequest = z.infer<typeof responseRequestSchema>;
+
+const figure = (unit: string) => z.number().nullable().meta({ 'x-unit': unit });
+const resultant = z.looseObject({
+	force: z.number().meta({ 'x-unit': 'kN' }),
+	y: z.number().meta({ 'x-unit': 'mm' }),
+	z: z.number().meta({ 'x-unit': 'mm' })
+});
+
+export const stateSchema = z
+	.looseObject({
+		curvature: figure('1/m'),
+		curvatureRatio: figure(''),
+		moment: figure('kNm'),
+		N: figure('kN'),
+		My: figure('kNm'),
+		Mz: figure('kNm'),
+		e0: figure(''),
+		ky: figure('1/m'),
+		kz: figure('1/m'),
+		neutralAxis: z.looseObject({ distance: z.number(), angle: z.number() }).nullable(),
+		yieldedShare: figure(''),
+		extremes: z
+			.looseObject({
+				strainMin: z.number(),
+				strainMax: z.number(),
+				stressMin: z.number(),
+				stressMax: z.number()
+			})
+			.nullable(),
+		compression: resultant.nullable(),
+		tension: resultant.nullable(),
+		leverArm: figure('mm'),
+		converged: z.boolean()
+	})
+	.meta({
+		id: 'State',
+		description: 'A state that cannot exist has converged false and null figures.'
+	});
+
+export const responseAnswerSchema = z
+	.looseObject({
+		...envelopeFields,
+		states: z.array(stateSchema),
+		firstYield: z.looseObject({ curvature: figure('1/m'), moment: figure('kNm') }),
+		plasticMoment: figure('kNm')
+	})
+	.meta({ id: 'ResponseAnswer' });
+
+export type ResponseAnswer = z.infer<typeof responseAnswerSchema>;
