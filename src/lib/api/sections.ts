@@ -1,56 +1,34 @@
-import { z } from 'zod';
-import type { SectionDefinition, SectionKind } from '../engine/section/definition';
+import { codeSchema, strengthBasisSchema } from './code';
+import { demandSchema } from './demand';
+import { limits } from './limits';
+import { sectionKinds, sectionSchema } from './section';
+import { sectionStates } from './section-states';
+import { z } from './zod';
 
-/** A section's standing on the Rack; only approved ones are offered to others. */
-export const sectionStates = ['draft', 'approved', 'withdrawn'] as const;
-export type SectionState = (typeof sectionStates)[number];
+export { sectionStates, type SectionState } from './section-states';
 
-const sectionKinds = [
-	'i',
-	'channel',
-	'tee',
-	'angle',
-	'rectangular-hollow',
-	'circular-hollow',
-	'box',
-	'flat',
-	'round',
-	'plates',
-	'outline'
-] as const satisfies readonly SectionKind[];
+/** Longest stored settings, as JSON text. */
+const longestSettings = 100_000;
 
-/** Longest stored definition or settings, as JSON text. */
-const maxDocument = 200_000;
-
-const fits = (value: unknown) => JSON.stringify(value).length <= maxDocument;
-
-/** Shape only; the engine judges the dimensions and names the field that is wrong. */
-const definition = z.custom<SectionDefinition>(
-	(value) => z.looseObject({ kind: z.enum(sectionKinds) }).safeParse(value).success && fits(value),
-	{ message: 'A section needs a kind and its dimensions.' }
-);
-
-const figure = z.number().finite();
-
-/** One case of factored design effects: kN, kNm, mm. */
-const demand = z.looseObject({
-	name: z.string().max(120).optional(),
-	N: figure.optional(),
-	My: figure.optional(),
-	Mz: figure.optional(),
-	Vy: figure.optional(),
-	Vz: figure.optional()
+const stiffeners = z.object({
+	spacing: z.number().positive(),
+	endPost: z.enum(['rigid', 'non-rigid'])
 });
 
-/** What goes with a section on the Bench: code choices, strength basis, demands, and the like. */
+/** What goes with a section on the Bench: code choices, demands, and whatever else it keeps there. */
 export const sectionSettings = z
 	.looseObject({
-		code: z.looseObject({ standard: z.string().max(40).optional() }).optional(),
-		strengthBasis: z.enum(['code-table', 'product-standard']).optional(),
-		demands: z.array(demand).max(200).optional()
+		code: codeSchema.optional(),
+		strengthBasis: strengthBasisSchema.optional(),
+		demands: z.array(demandSchema).max(limits.demands).optional(),
+		stiffeners: stiffeners.optional()
 	})
-	.refine(fits, 'These settings are too long to keep.');
+	.refine((value) => JSON.stringify(value).length <= longestSettings, {
+		error: 'These settings are too long to keep.'
+	});
 export type SectionSettings = z.infer<typeof sectionSettings>;
+
+const kind = z.enum(sectionKinds);
 
 const name = z
 	.string()
@@ -66,7 +44,7 @@ export const createSectionRequest = z.object({
 	standard: line(120).default(''),
 	project: line(160).default(''),
 	remark: line(500).default(''),
-	definition,
+	definition: sectionSchema,
 	settings: sectionSettings.default({})
 });
 export type CreateSectionRequest = z.input<typeof createSectionRequest>;
@@ -79,7 +57,7 @@ export const updateSectionRequest = z.object({
 	standard: line(120).optional(),
 	project: line(160).optional(),
 	remark: line(500).optional(),
-	definition: definition.optional(),
+	definition: sectionSchema.optional(),
 	settings: sectionSettings.optional(),
 	status: z.enum(sectionStates).optional()
 });
@@ -90,7 +68,7 @@ export const sectionSorts = ['name', 'kind', 'h', 'b', 'mass', 'updated'] as con
 /** GET /api/v1/sections; a sort with a leading minus runs from the greatest. */
 export const sectionListQuery = z.object({
 	q: z.string().trim().max(120).default(''),
-	kind: z.enum(sectionKinds).optional(),
+	kind: kind.optional(),
 	status: z.enum(sectionStates).optional(),
 	sort: z.templateLiteral([z.enum(['', '-']), z.enum(sectionSorts)]).default('-updated'),
 	page: z.coerce.number().int().min(1).max(100_000).default(1),
@@ -107,7 +85,7 @@ export const sectionSummary = z.object({
 	standard: z.string(),
 	project: z.string(),
 	remark: z.string(),
-	kind: z.enum(sectionKinds),
+	kind,
 	h: z.number(),
 	b: z.number(),
 	area: z.number(),
@@ -124,7 +102,7 @@ export type SectionSummary = z.infer<typeof sectionSummary>;
 
 /** A saved section in full. */
 export const sectionRecord = sectionSummary.extend({
-	definition,
+	definition: sectionSchema,
 	schemaVersion: z.number().int(),
 	settings: sectionSettings
 });

@@ -1,5 +1,6 @@
 import { int, json, mysqlEnum, mysqlTable, uniqueIndex, varchar } from 'drizzle-orm/mysql-core';
-import { sectionStates, type SectionSettings } from '../../../api/sections';
+import { sectionStates } from '../../../api/section-states';
+import type { SectionSettings } from '../../../api/sections';
 import type { SectionDefinition } from '../../../engine/section/definition';
 import { createdAt, id, idOf, sha256 } from './columns';
 import { sections } from './sections';

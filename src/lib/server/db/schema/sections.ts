@@ -7,7 +7,8 @@ import {
 	uniqueIndex,
 	varchar
 } from 'drizzle-orm/mysql-core';
-import { sectionStates, type SectionSettings } from '../../../api/sections';
+import { sectionStates } from '../../../api/section-states';
+import type { SectionSettings } from '../../../api/sections';
 import type { SectionDefinition } from '../../../engine/section/definition';
 import { createdAt, figure, id, idOf, instant, sha256 } from './columns';
 import { firms } from './firms';

@@ -40,7 +40,9 @@ export const shapes = mysqlTable(
 		elasticModulusY: figure('elastic_modulus_y').notNull(),
 		/** mm³ */
 		plasticModulusY: figure('plastic_modulus_y').notNull(),
-		contentHash: sha256('content_hash').notNull()
+		contentHash: sha256('content_hash').notNull(),
+		/** Raised when a later seeding brings other dims or figures. */
+		version: int('version').notNull().default(1)
 	},
 	(table) => [
 		uniqueIndex('shapes_identity').on(table.standard, table.designation),
