@@ -73,8 +73,11 @@ export function readFraction(whole: string | undefined, above: string, below: st
 	return read(Number((whole ?? '').replaceAll(' ', '') || 0) + Number(above) / Number(below));
 }
 
+const KEPT_DIGITS = 15;
+
+/** A reading times a factor, kept to fifteen figures so that 12 in is 304.8 mm without dust. */
 export const scaled = (reading: Reading, by: number): Reading =>
-	reading.ok ? read(reading.value * by) : reading;
+	reading.ok ? read(Number((reading.value * by).toPrecision(KEPT_DIGITS))) : reading;
 
 const superscripts = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const plainCharacters: readonly [RegExp, string][] = [

@@ -102,6 +102,11 @@ describe('typed units', () => {
 		expect(Math.abs(value(text, quantity) / expected - 1)).toBeLessThan(5e-7);
 	});
 
+	it('leaves no binary dust behind a conversion', () => {
+		expect(value('12 in', 'length')).toBe(304.8);
+		expect(value('0.1', 'length', us)).toBe(2.54);
+	});
+
 	it('means the shown unit when none is typed', () => {
 		expect(value('36', 'length', us)).toBeCloseTo(914.4, 12);
 		expect(value('10', 'modulus')).toBe(10000);
