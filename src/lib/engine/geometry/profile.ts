@@ -1,0 +1,170 @@
+import type { Loop } from './boundary';
+import type { Frame } from './frame';
+import { flanksOf, type ArcFlank, type Flank, type LineFlank } from './flank';
+import {
+	addArcAntiderivative,
+	addLineMoments,
+	gaussPoint,
+	momentCount,
+	type Moments
+} from './flank-moments';
+
+/**
+ * A body of steel seen along one direction: between two neighbouring levels its slices are bounded
+ * by the same flanks, so the moments of all steel below any level come in closed form.
+ */
+export interface Profile {
+	/** Ascending levels (`across`) at which a flank begins or ends. */
+	readonly levels: Float64Array;
+	/** Moments of all steel below each level, six numbers a level. */
+	readonly below: Float64Array;
+	/** Straight flanks of each slab added up: width (2), ∑±along²/2 (3), ∑±along³/3 (4), from its lower level. */
+	readonly lines: Float64Array;
+	readonly arcs: readonly (readonly SlabArc[])[];
+	readonly low: number;
+	readonly high: number;
+	readonly total: Moments;
+}
+
+interface SlabArc {
+	readonly arc: ArcFlank;
+	/** Antiderivatives at the slab's lower level. */
+	readonly atLow: Moments;
+}
+
+const coefficients = 9;
+
+/** Prepares loops (outer anticlockwise, holes clockwise) for cuts along the frame's axis. */
+export function profileOf(loops: readonly Loop[], frame: Frame): Profile {
+	const flanks = loops.flatMap((loop) => flanksOf(loop, frame));
+	const levels = distinctLevels(flanks);
+	const slabs = Math.max(0, levels.length - 1);
+	const below = new Float64Array(levels.length * momentCount);
+	const lines = new Float64Array(slabs * coefficients);
+	const arcs: SlabArc[][] = Array.from({ length: slabs }, () => []);
+	const within = new Float64Array(slabs * momentCount);
+	for (const flank of flanks) spreadFlank(flank, levels, lines, arcs, within);
+	for (let i = 0; i < slabs * momentCount; i++) below[i + momentCount] = below[i]! + within[i]!;
+	return {
+		levels,
+		below,
+		lines,
+		arcs,
+		low: levels[0] ?? 0,
+		high: levels[slabs] ?? 0,
+		total: below.slice(slabs * momentCount)
+	};
+}
+
+function distinctLevels(flanks: readonly Flank[]): Float64Array {
+	const ends = Float64Array.from(flanks.flatMap(({ low, high }) => [low, high])).sort();
+	return ends.filter((level, i) => i === 0 || level !== ends[i - 1]);
+}
+
+function spreadFlank(
+	flank: Flank,
+	levels: Float64Array,
+	lines: Float64Array,
+	arcs: SlabArc[][],
+	within: Float64Array
+): void {
+	for (let slab = slabAt(levels, flank.low); slab < arcs.length; slab++) {
+		const [low, high] = [levels[slab]!, levels[slab + 1]!];
+		if (low >= flank.high) return;
+		const out = within.subarray(slab * momentCount, (slab + 1) * momentCount);
+		if (flank.kind === 'line') {
+			addLineMoments(out, flank, low, high, flank.sign);
+			addLineCoefficients(lines, slab * coefficients, flank, low);
+		} else {
+			const atLow = new Float64Array(momentCount);
+			addArcAntiderivative(atLow, flank, low, 1);
+			addArcAntiderivative(out, flank, high, flank.sign);
+			for (let i = 0; i < momentCount; i++) out[i]! -= flank.sign * atLow[i]!;
+			arcs[slab]!.push({ arc: flank, atLow });
+		}
+	}
+}
+
+function addLineCoefficients(
+	lines: Float64Array,
+	at: number,
+	{ start, slope: b, low, sign }: LineFlank,
+	from: number
+): void {
+	const a = start + b * (from - low);
+	lines[at]! += sign * a;
+	lines[at + 1]! += sign * b;
+	lines[at + 2]! += (sign * a * a) / 2;
+	lines[at + 3]! += sign * a * b;
+	lines[at + 4]! += (sign * b * b) / 2;
+	lines[at + 5]! += (sign * a * a * a) / 3;
+	lines[at + 6]! += sign * a * a * b;
+	lines[at + 7]! += sign * a * b * b;
+	lines[at + 8]! += (sign * b * b * b) / 3;
+}
+
+/** Index of the slab that holds a level (the last one that begins at or below it). */
+export function slabAt(levels: Float64Array, level: number): number {
+	let low = 0;
+	let high = levels.length - 1;
+	while (low < high) {
+		const middle = (low + high + 1) >> 1;
+		if (levels[middle]! <= level) low = middle;
+		else high = middle - 1;
+	}
+	return low;
+}
+
+/** Writes the moments of all steel below a level into `out` (see `Moments` for the order). */
+export function momentsBelow(profile: Profile, level: number, out: Moments): void {
+	const { levels, below, lines, arcs } = profile;
+	const slab = level < profile.low ? -1 : slabAt(levels, level);
+	if (slab < 0) {
+		out.fill(0);
+		return;
+	}
+	for (let i = 0; i < momentCount; i++) out[i] = below[slab * momentCount + i]!;
+	if (slab >= arcs.length) return;
+	addSlabLines(out, lines, slab * coefficients, levels[slab]!, level - levels[slab]!);
+	for (const { arc, atLow } of arcs[slab]!) {
+		addArcAntiderivative(out, arc, level, arc.sign);
+		for (let i = 0; i < momentCount; i++) out[i]! -= arc.sign * atLow[i]!;
+	}
+}
+
+function addSlabLines(
+	out: Moments,
+	lines: Float64Array,
+	at: number,
+	from: number,
+	rise: number
+): void {
+	const half = rise / 2;
+	for (let i = -1; i <= 1; i += 2) {
+		const x = half + i * half * gaussPoint;
+		const across = from + x;
+		const width = lines[at]! + lines[at + 1]! * x;
+		const square = lines[at + 2]! + x * (lines[at + 3]! + x * lines[at + 4]!);
+		const cube = lines[at + 5]! + x * (lines[at + 6]! + x * (lines[at + 7]! + x * lines[at + 8]!));
+		out[0]! += half * width;
+		out[1]! += half * width * across;
+		out[2]! += half * square;
+		out[3]! += half * width * across * across;
+		out[4]! += half * square * across;
+		out[5]! += half * cube;
+	}
+}
+
+/** Width of the slice at a level, mm; at a step the width above it. */
+export function widthAt({ levels, lines, arcs }: Profile, level: number): number {
+	const slab = slabAt(levels, level);
+	if (slab >= arcs.length || level < levels[0]!) return 0;
+	const at = slab * coefficients;
+	let width = lines[at]! + lines[at + 1]! * (level - levels[slab]!);
+	for (const { arc } of arcs[slab]!) {
+		const u = level - arc.across;
+		width +=
+			arc.sign * (arc.along + arc.side * Math.sqrt(Math.max(0, arc.radius * arc.radius - u * u)));
+	}
+	return width;
+}

@@ -1,0 +1,86 @@
+import type { Loop } from '../geometry/boundary';
+import { extentAcross } from '../geometry/bounds';
+import { frameAt } from '../geometry/frame';
+import { groupProfiles, type Mechanics } from './law-groups';
+import type { Transverse } from './state';
+
+/** Elastic strain planes about an axis at constant N: e0 and turn are straight lines in the curvature. */
+export interface ElasticPath {
+	e0: (curvature: number) => number;
+	turn: (curvature: number) => number;
+	moment: (curvature: number) => number;
+}
+
+interface Stiffness {
+	NN: number;
+	NM: number;
+	NT: number;
+	MM: number;
+	MT: number;
+	TT: number;
+}
+
+/** Elastic stiffness about the gross centroid in the frame of the axis, each body with its own E. */
+function elasticStiffness(mechanics: Mechanics, angle: number): Stiffness {
+	const sum: Stiffness = { NN: 0, NM: 0, NT: 0, MM: 0, MT: 0, TT: 0 };
+	groupProfiles(mechanics, angle).forEach(({ total }, i) => {
+		const E = mechanics.groups[i]!.modulus;
+		sum.NN += E * total[0]!;
+		sum.NM -= E * total[1]!;
+		sum.NT += E * total[2]!;
+		sum.MM += E * total[3]!;
+		sum.MT -= E * total[4]!;
+		sum.TT += E * total[5]!;
+	});
+	return withoutRounding(sum);
+}
+
+/** Couplings that symmetry makes zero are set to zero, so that a symmetric section bends straight. */
+function withoutRounding({ NN, NM, NT, MM, MT, TT }: Stiffness): Stiffness {
+	const clean = (value: number, a: number, b: number) =>
+		Math.abs(value) < 1e-13 * Math.sqrt(a * b) ? 0 : value;
+	return {
+		NN,
+		MM,
+		TT,
+		NM: clean(NM, NN, MM),
+		NT: clean(NT, NN, TT),
+		MT: clean(MT, MM, TT)
+	};
+}
+
+export function elasticPath(
+	mechanics: Mechanics,
+	angle: number,
+	transverse: Transverse,
+	N: number
+): ElasticPath {
+	const k = elasticStiffness(mechanics, angle);
+	if (transverse === 'curvature-zero') {
+		const e0 = (curvature: number) => (N - k.NM * curvature) / k.NN;
+		return { e0, turn: () => 0, moment: (c) => k.NM * e0(c) + k.MM * c };
+	}
+	const determinant = k.NN * k.TT - k.NT * k.NT;
+	const e0 = (c: number) => ((N - k.NM * c) * k.TT + k.MT * c * k.NT) / determinant;
+	const turn = (c: number) => (-k.MT * c * k.NN - (N - k.NM * c) * k.NT) / determinant + 0;
+	return { e0, turn, moment: (c) => k.NM * e0(c) + k.MM * c + k.MT * turn(c) };
+}
+
+/** Largest strain of a plane over what each body bears elastically; 1 at first yield. */
+export function elasticUse(
+	{ groups, centroid }: Mechanics,
+	angle: number,
+	e0: number,
+	curvature: number,
+	turn: number
+): number {
+	const size = Math.hypot(curvature, turn);
+	const frame = frameAt(centroid, angle + (size === 0 ? 0 : Math.atan2(turn, curvature)));
+	const use = (loops: readonly Loop[], tension: number, compression: number) => {
+		const { low, high } = extentAcross(loops, frame);
+		return Math.max((e0 - size * low) / tension, (size * high - e0) / compression);
+	};
+	return Math.max(
+		...groups.map(({ loops, law }) => use(loops, law.yieldTension, law.yieldCompression))
+	);
+}

@@ -1,0 +1,67 @@
+import type { PreparedSection } from '../section/prepared';
+import { elasticPath, elasticUse, type ElasticPath } from './elastic-path';
+import { mechanicsOf, type Mechanics } from './law-groups';
+import type { BendingPath, FirstYield } from './state';
+
+const radians = Math.PI / 180;
+
+/**
+ * Curvature (1/m) and moment (kNm, about the asked axis) at which a fibre first reaches its own
+ * yield strength while N (kN) is held and the curvature grows from zero in the positive sense.
+ * Null figures when N alone already yields the section.
+ */
+export function firstYield(section: PreparedSection, path: BendingPath): FirstYield {
+	return firstYieldOf(mechanicsOf(section), path);
+}
+
+export function firstYieldOf(mechanics: Mechanics, path: BendingPath): FirstYield {
+	const angle = path.axisAngle * radians;
+	const elastic = elasticPath(mechanics, angle, path.transverse, path.N * 1e3);
+	const curvature = yieldCurvature(mechanics, angle, elastic);
+	if (curvature === null) return { curvature: null, moment: null };
+	return { curvature: curvature * 1e3, moment: elastic.moment(curvature) * 1e-6 };
+}
+
+/** 1/mm. The use of the section is convex in the curvature, so that secants from beyond close in. */
+function yieldCurvature(
+	mechanics: Mechanics,
+	angle: number,
+	{ e0, turn }: ElasticPath
+): number | null {
+	const excess = (curvature: number) =>
+		elasticUse(mechanics, angle, e0(curvature), curvature, turn(curvature)) - 1;
+	let low = 0;
+	let atLow = excess(0);
+	if (atLow >= 0) return null;
+	let high = 1e-3 / mechanics.reach;
+	let atHigh = excess(high);
+	while (atHigh < 0) {
+		[low, atLow, high] = [high, atHigh, high * 2];
+		atHigh = excess(high);
+	}
+	for (let i = 0; i < 200 && atHigh > 0; i++) {
+		const secant = low - (atLow * (high - low)) / (atHigh - atLow);
+		const atSecant = excess(secant);
+		if (atSecant >= 0 || secant <= low || secant >= high) return Math.min(secant, high);
+		if (Math.abs(atSecant) < 4e-16) return secant;
+		[low, atLow] = [secant, atSecant];
+		const middle = (low + high) / 2;
+		const atMiddle = excess(middle);
+		if (atMiddle >= 0) [high, atHigh] = [middle, atMiddle];
+		else [low, atLow] = [middle, atMiddle];
+	}
+	return high;
+}
+
+/**
+ * Least |M| (kNm) at which a fibre reaches its own fy, N = 0, the section held to bend about the
+ * axis at `axisAngle` degrees; the smaller of both senses.
+ */
+export function firstYieldMoment(section: PreparedSection, axisAngle: number): number {
+	const mechanics = mechanicsOf(section);
+	const senses = [axisAngle, axisAngle + 180].map(
+		(angle) =>
+			firstYieldOf(mechanics, { axisAngle: angle, transverse: 'curvature-zero', N: 0 }).moment ?? 0
+	);
+	return Math.min(...senses);
+}

@@ -1,0 +1,104 @@
+import type { Loop, Point } from '../geometry/boundary';
+import { frameAt } from '../geometry/frame';
+import { profileOf, type Profile } from '../geometry/profile';
+import { initialModulus } from '../material/laws';
+import type { StressStrainLaw } from '../material/law';
+import type { Material } from '../material/material';
+import type { PreparedSection } from '../section/prepared';
+
+/** All steel of a section that follows one law, to be cut together. */
+export interface LawGroup {
+	readonly loops: readonly Loop[];
+	readonly law: StressStrainLaw;
+	/** Slope of the law at zero strain, N/mm². */
+	readonly modulus: number;
+	readonly fy: number;
+	readonly fyc: number;
+	/** Strains at which to cut when tension and compression are told apart. */
+	readonly cuts: readonly number[];
+	readonly cutOffsets: readonly number[];
+	readonly cutSlopes: readonly number[];
+}
+
+/** The section as its response needs it: steel by law, about the gross centroid. */
+export interface Mechanics {
+	readonly groups: readonly LawGroup[];
+	readonly centroid: Point;
+	readonly area: number;
+	/** N: least of the plastic forces in tension and compression; the scale of convergence. */
+	readonly squash: number;
+	/** mm: largest distance of the bounding box's corners from the centroid. */
+	readonly reach: number;
+}
+
+/** One law for every part instead of the parts' own, when asked. */
+export function mechanicsOf(section: PreparedSection): Mechanics {
+	const groups = lawGroups(section);
+	const { centroid, area } = section.gross;
+	const { left, right, bottom, top } = section.bounds;
+	return {
+		groups,
+		centroid,
+		area,
+		squash: groups.reduce((sum, g) => sum + groupArea(g, centroid) * Math.min(g.fy, g.fyc), 0),
+		reach: Math.hypot(
+			Math.max(right - centroid.y, centroid.y - left),
+			Math.max(top - centroid.z, centroid.z - bottom)
+		)
+	};
+}
+
+const groupArea = ({ loops }: LawGroup, centroid: Point): number =>
+	profileOf(loops, frameAt(centroid, 0)).total[0]!;
+
+function lawGroups({ parts }: PreparedSection): LawGroup[] {
+	const found: { material: Material; loops: Loop[] }[] = [];
+	for (const { material, region } of parts) {
+		const same = found.find((group) => sameStrength(group.material, material));
+		if (same) same.loops.push(...region.loops);
+		else found.push({ material, loops: [...region.loops] });
+	}
+	return found.map(({ material, loops }) => ({
+		loops,
+		law: material.law,
+		modulus: initialModulus(material.law),
+		fy: material.fy,
+		fyc: material.fyc,
+		...cutsOf(material.law)
+	}));
+}
+
+function sameStrength(a: Material, b: Material): boolean {
+	if (a === b || a.law === b.law) return a.fy === b.fy && a.fyc === b.fyc;
+	if (a.fy !== b.fy || a.fyc !== b.fyc) return false;
+	return (
+		sameNumbers(a.law.kinks, b.law.kinks) &&
+		sameNumbers(a.law.offsets, b.law.offsets) &&
+		sameNumbers(a.law.slopes, b.law.slopes)
+	);
+}
+
+const sameNumbers = (a: readonly number[], b: readonly number[]): boolean =>
+	a.length === b.length && a.every((value, i) => value === b[i]);
+
+/** The law's kinks with zero strain among them. */
+function cutsOf({ kinks, offsets, slopes }: StressStrainLaw) {
+	const at = kinks.findIndex((kink) => kink >= 0);
+	if (kinks[at] === 0) return { cuts: kinks, cutOffsets: offsets, cutSlopes: slopes };
+	const place = at < 0 ? kinks.length : at;
+	const twice = (values: readonly number[]) => [
+		...values.slice(0, place + 1),
+		...values.slice(place)
+	];
+	return {
+		cuts: [...kinks.slice(0, place), 0, ...kinks.slice(place)],
+		cutOffsets: twice(offsets),
+		cutSlopes: twice(slopes)
+	};
+}
+
+/** The groups seen along the normal of an axis turned `angle` radians from y. */
+export function groupProfiles({ groups, centroid }: Mechanics, angle: number): Profile[] {
+	const frame = frameAt(centroid, angle);
+	return groups.map(({ loops }) => profileOf(loops, frame));
+}

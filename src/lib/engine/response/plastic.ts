@@ -1,0 +1,141 @@
+import { momentCount } from '../geometry/flank-moments';
+import { momentsBelow, type Profile } from '../geometry/profile';
+import { weightedLevel } from '../geometry/weighted-level';
+import type { PreparedSection } from '../section/prepared';
+import { groupProfiles, mechanicsOf, type Mechanics } from './law-groups';
+import type { BendingPath, NeutralAxis } from './state';
+
+const radians = Math.PI / 180;
+
+/** A fully plastic state. kNm; `moment` is the component about the asked axis. */
+export interface PlasticState {
+	moment: number | null;
+	My: number | null;
+	Mz: number | null;
+	neutralAxis: NeutralAxis | null;
+}
+
+/** N·mm in the frame of the neutral axis, and its level from the centroid, mm. */
+interface PlasticForces {
+	M: number;
+	T: number;
+	level: number;
+}
+
+/**
+ * Full plastic moment under N (kN): every fibre at its own strength, tension below the neutral
+ * axis for positive bending. `curvature-zero`: the neutral axis is parallel to the asked axis;
+ * `moment-zero`: it turns until no moment is left across it. Null when N exceeds the plastic force.
+ */
+export function plasticMoment(section: PreparedSection, path: BendingPath): PlasticState {
+	return plasticMomentOf(mechanicsOf(section), path);
+}
+
+export function plasticMomentOf(mechanics: Mechanics, path: BendingPath): PlasticState {
+	const angle = path.axisAngle * radians;
+	const N = path.N * 1e3;
+	const turned = path.transverse === 'moment-zero' ? plasticTurn(mechanics, angle, N) : 0;
+	const at = turned === null ? null : plasticForces(mechanics, angle + turned, N);
+	if (turned === null || at === null) return noState;
+	const [c, s] = [Math.cos(turned), Math.sin(turned)];
+	const own = { M: at.M * c - at.T * s, T: at.M * s + at.T * c };
+	const [ca, sa] = [Math.cos(angle), Math.sin(angle)];
+	return {
+		moment: own.M * 1e-6,
+		My: (own.M * ca - own.T * sa) * 1e-6,
+		Mz: (own.M * sa + own.T * ca) * 1e-6,
+		neutralAxis: neutralAxisAt(path.axisAngle + turned / radians, at.level)
+	};
+}
+
+const noState: PlasticState = { moment: null, My: null, Mz: null, neutralAxis: null };
+
+/** The same line with its angle in (−90, 90]. */
+export function neutralAxisAt(degrees: number, level: number): NeutralAxis {
+	const half = Math.ceil((degrees - 90) / 180);
+	return { distance: half % 2 === 0 ? level : -level, angle: degrees - 180 * half };
+}
+
+function plasticForces(mechanics: Mechanics, angle: number, N: number): PlasticForces | null {
+	const { groups } = mechanics;
+	const profiles = groupProfiles(mechanics, angle);
+	const crushed = profiles.reduce((sum, p, i) => sum + groups[i]!.fyc * p.total[0]!, 0);
+	const stretched = profiles.reduce((sum, p, i) => sum + groups[i]!.fy * p.total[0]!, 0);
+	const slack = 1e-12 * (crushed + stretched);
+	if (N < -crushed - slack || N > stretched + slack) return null;
+	const weights = groups.map(({ fy, fyc }) => fy + fyc);
+	const target = Math.min(Math.max(N + crushed, 0), crushed + stretched);
+	const level = weightedLevel(profiles, weights, target);
+	let [M, T] = [0, 0];
+	profiles.forEach((profile, i) => {
+		const forces = blockForces(profile, groups[i]!.fy, groups[i]!.fyc, level);
+		M += forces.M;
+		T += forces.T;
+	});
+	return { M, T, level };
+}
+
+/** Tension fy below the level, compression fyc above it. */
+function blockForces(profile: Profile, fy: number, fyc: number, level: number) {
+	const below = new Float64Array(momentCount);
+	momentsBelow(profile, level, below);
+	const [, across, along] = below as unknown as [number, number, number];
+	return {
+		M: fyc * (profile.total[1]! - across) - fy * across,
+		T: fy * along - fyc * (profile.total[2]! - along)
+	};
+}
+
+/** How far the neutral axis turns from the asked axis until the transverse moment is zero; radians. */
+function plasticTurn(mechanics: Mechanics, angle: number, N: number): number | null {
+	const across = (turned: number) => {
+		const at = plasticForces(mechanics, angle + turned, N);
+		return at === null ? NaN : at.M * Math.sin(turned) + at.T * Math.cos(turned);
+	};
+	const scale = mechanics.squash * mechanics.reach;
+	const straight = across(0);
+	if (Number.isNaN(straight)) return null;
+	if (Math.abs(straight) <= 1e-13 * scale) return 0;
+	let [low, high] = straight < 0 ? [0, Math.PI / 2] : [-Math.PI / 2, 0];
+	let [atLow, atHigh] = [across(low), across(high)];
+	if (atLow > 0 || atHigh < 0) return null;
+	let side = 0;
+	for (let i = 0; i < 200 && high - low > 1e-15; i++) {
+		const secant = (low * atHigh - high * atLow) / (atHigh - atLow);
+		const middle = i % 4 === 3 || !(secant > low && secant < high) ? (low + high) / 2 : secant;
+		const value = across(middle);
+		if (Math.abs(value) <= 1e-15 * scale) return middle;
+		if (value < 0) {
+			[low, atLow] = [middle, value];
+			if (side === -1) atHigh /= 2;
+			side = -1;
+		} else {
+			[high, atHigh] = [middle, value];
+			if (side === 1) atLow /= 2;
+			side = 1;
+		}
+	}
+	return (low + high) / 2;
+}
+
+/** Full plastic moments about y and z (kNm, N = 0, other curvature 0) and their neutral axes from the definition's origin. */
+export function fullPlastic(section: PreparedSection) {
+	const mechanics = mechanicsOf(section);
+	const aboutY = plasticForces(mechanics, 0, 0)!;
+	const aboutZ = plasticForces(mechanics, Math.PI / 2, 0)!;
+	return {
+		plasticY: aboutY.M * 1e-6,
+		plasticZ: aboutZ.M * 1e-6,
+		plasticNeutralAxisZ: section.gross.centroid.z + aboutY.level,
+		plasticNeutralAxisY: section.gross.centroid.y - aboutZ.level
+	};
+}
+
+/** Squash load, kN: every part at its own compressive strength. */
+export function squashLoad(section: PreparedSection): number {
+	const mechanics = mechanicsOf(section);
+	return groupProfiles(mechanics, 0).reduce(
+		(sum, { total }, i) => sum + mechanics.groups[i]!.fyc * total[0]! * 1e-3,
+		0
+	);
+}

@@ -1,0 +1,141 @@
+import type { PreparedSection } from '../section/prepared';
+import { equilibrium } from '../tolerances';
+import { bendingStiffness, bentAtCurvature, bender, type Bender, type Bent } from './bender';
+import { elasticPath, type ElasticPath } from './elastic-path';
+import { firstYieldOf } from './first-yield';
+import { mechanicsOf } from './law-groups';
+import { plasticMomentOf } from './plastic';
+import { risingRoot } from './rising-root';
+import { noState, stateReport } from './state-report';
+import type { BendingPath, FirstYield, ResponseState, StrainPlane } from './state';
+
+const radians = Math.PI / 180;
+
+/** What is imposed: curvatures (1/m), their ratio to first yield, moments (kNm) or whole strain planes. */
+export type Imposed =
+	| { curvature: readonly number[] }
+	| { curvatureRatio: readonly number[] }
+	| { moment: readonly number[] }
+	| { strainPlanes: readonly StrainPlane[] };
+
+export interface Response {
+	states: ResponseState[];
+	firstYield: FirstYield;
+	/** kNm about the asked axis under the same N; null when N alone exceeds the section. */
+	plasticMoment: number | null;
+}
+
+/** A section ready to be bent about one axis at constant N: prepared once, asked many times. */
+export interface Bending {
+	readonly path: BendingPath;
+	readonly firstYield: FirstYield;
+	readonly plasticMoment: number | null;
+	/** State at a curvature, 1/m. */
+	atCurvature(curvature: number): ResponseState;
+	/** State at a moment about the asked axis, kNm. */
+	atMoment(moment: number): ResponseState;
+	/** State of a whole strain plane, whatever N it carries. */
+	atPlane(plane: StrainPlane): ResponseState;
+	/** Moment (kNm) at a curvature (1/m), without the rest of the state; null when not balanced. */
+	momentAt(curvature: number): number | null;
+}
+
+/** Prepares bending of a section along a path (axis, N in kN, free or held across the axis). */
+export function bending(section: PreparedSection, path: BendingPath): Bending {
+	const mechanics = mechanicsOf(section);
+	const angle = path.axisAngle * radians;
+	const b = bender(mechanics, angle);
+	const elastic = elasticPath(mechanics, angle, path.transverse, path.N * 1e3);
+	const firstYield = firstYieldOf(mechanics, path);
+	const plasticMoment = plasticMomentOf(mechanics, path).moment;
+	const bent = balancer(b, path, elastic);
+	const report = (state: Bent) => stateReport(b, state, firstYield.curvature);
+	return {
+		path,
+		firstYield,
+		plasticMoment,
+		atCurvature: (curvature) => report(bent(curvature * 1e-3)),
+		atMoment: (moment) => {
+			const state = bentAtMoment(b, path, elastic, bent, moment * 1e6);
+			return state ? report(state) : noState;
+		},
+		atPlane: (plane) => report(bentByPlane(b, plane)),
+		momentAt: (curvature) => {
+			const state = bent(curvature * 1e-3);
+			return state.converged ? state.forces.M * 1e-6 : null;
+		}
+	};
+}
+
+/** Balanced planes by curvature (1/mm); each search begins from the plane before, scaled. */
+function balancer(b: Bender, path: BendingPath, elastic: ElasticPath) {
+	let last: Bent | undefined;
+	return (curvature: number): Bent => {
+		const near =
+			last !== undefined && last.converged && last.curvature * curvature > 0
+				? curvature / last.curvature
+				: null;
+		const guess =
+			near === null
+				? { e0: elastic.e0(curvature), turn: elastic.turn(curvature) }
+				: { e0: last!.e0 * near, turn: last!.turn * near };
+		const bent = bentAtCurvature(b, path.transverse, path.N * 1e3, curvature, guess);
+		last = bent;
+		return bent;
+	};
+}
+
+/** The balanced plane whose moment about the axis is M (N·mm); undefined when there is none. */
+function bentAtMoment(
+	b: Bender,
+	path: BendingPath,
+	elastic: ElasticPath,
+	bent: (curvature: number) => Bent,
+	M: number
+): Bent | undefined {
+	const { squash, reach } = b.mechanics;
+	const atZero = elastic.moment(0);
+	const stiffness = (elastic.moment(1 / reach) - atZero) * reach;
+	let found: Bent | undefined;
+	const root = risingRoot(
+		(curvature) => {
+			const state = bent(curvature);
+			const value = state.forces.M - M;
+			if (!found || Math.abs(value) < Math.abs(found.forces.M - M)) found = state;
+			return { value, slope: bendingStiffness(state.forces, path.transverse) };
+		},
+		(M - atZero) / stiffness,
+		Math.abs(M) / stiffness + (squash * reach) / stiffness,
+		2e-15 * squash * reach
+	);
+	const balanced = Math.abs(root.value) <= equilibrium * squash * reach;
+	const reached = Math.abs(root.x) < (1e5 * squash * reach) / stiffness;
+	return balanced && reached && found?.converged ? found : undefined;
+}
+
+function bentByPlane(b: Bender, { e0, ky, kz }: StrainPlane): Bent {
+	const [c, s] = [Math.cos(b.angle), Math.sin(b.angle)];
+	const curvature = (ky * c + kz * s) * 1e-3;
+	const turn = (kz * c - ky * s) * 1e-3;
+	return { e0, curvature, turn, forces: b.evaluate(e0, curvature, turn), converged: true };
+}
+
+/** States along a path as the contract's POST /response gives them. */
+export function respond(section: PreparedSection, path: BendingPath, at: Imposed): Response {
+	const bent = bending(section, path);
+	return {
+		states: imposedStates(bent, at),
+		firstYield: bent.firstYield,
+		plasticMoment: bent.plasticMoment
+	};
+}
+
+function imposedStates(bent: Bending, at: Imposed): ResponseState[] {
+	if ('curvature' in at) return at.curvature.map((value) => bent.atCurvature(value));
+	if ('moment' in at) return at.moment.map((value) => bent.atMoment(value));
+	if ('strainPlanes' in at) return at.strainPlanes.map((plane) => bent.atPlane(plane));
+	const unit = bent.firstYield.curvature;
+	return at.curvatureRatio.map((ratio) =>
+		unit === null ? noState : bent.atCurvature(ratio * unit)
+	);
+}
