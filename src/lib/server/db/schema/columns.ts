@@ -1,10 +1,14 @@
 import { customType, datetime, double, varchar } from 'drizzle-orm/mysql-core';
+import { newId } from '../ids';
 
-/** Length of a time-sortable id made by the app. */
+/** Length of an id made by `newId()`. */
 const idLength = 36;
 
-/** Primary key column `id`; the value comes from `newId()`, never from the database. */
-export const id = () => varchar('id', { length: idLength }).primaryKey();
+/** Primary key column `id`, made by the app and sortable by time of making. */
+export const id = () =>
+	varchar('id', { length: idLength })
+		.primaryKey()
+		.$defaultFn(() => newId());
 
 /** Column holding the id of another row. */
 export const idOf = (name: string) => varchar(name, { length: idLength });

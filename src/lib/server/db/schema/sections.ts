@@ -10,7 +10,7 @@ import {
 import { sectionStates } from '../../../api/section-states';
 import type { SectionSettings } from '../../../api/sections';
 import type { SectionDefinition } from '../../../engine/section/definition';
-import { createdAt, figure, id, idOf, instant, sha256 } from './columns';
+import { createdAt, exactText, figure, id, idOf, instant, sha256 } from './columns';
 import { firms } from './firms';
 import { users } from './users';
 
@@ -28,7 +28,7 @@ export const sections = mysqlTable(
 		project: varchar('project', { length: 160 }).notNull().default(''),
 		remark: varchar('remark', { length: 500 }).notNull().default(''),
 		/** Folded name and standard while the section stands; null once deleted, so the name is free again. */
-		identity: varchar('identity', { length: 250 }),
+		identity: exactText('identity', { length: 250 }),
 		kind: varchar('kind', { length: 32 }).notNull(),
 		definition: json('definition').$type<SectionDefinition>().notNull(),
 		schemaVersion: int('schema_version').notNull(),
