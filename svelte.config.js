@@ -5,7 +5,7 @@ import { vitePreprocess } from '@sveltejs/vite-plugin-svelte';
 const config = {
 	preprocess: vitePreprocess(),
 	kit: {
-		adapter: adapter(),
+		adapter: adapter({ out: process.env.BUILD_OUT || 'build' }),
 		csp: {
 			mode: 'nonce',
 			directives: {

@@ -1,0 +1,52 @@
+import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import path from 'node:path';
+import { databaseUrl, startServer } from './mariadb.js';
+import { inLocal } from './paths.js';
+import { birthOf, isAlive, stopProcess } from './processes.js';
+
+const place = inLocal('passing');
+
+/** @param {string} home */
+const ownerOf = (home) => {
+	try {
+		return JSON.parse(readFileSync(path.join(home, 'owner.json'), 'utf8'));
+	} catch {
+		return null;
+	}
+};
+
+/** Clears what test runs left that were killed before they could clear it themselves. */
+const sweep = async () => {
+	for (const name of readdirSync(place)) {
+		const home = path.join(place, name);
+		const owner = ownerOf(home);
+		if (!owner || isAlive(owner)) continue;
+		if (owner.server) await stopProcess(owner.server, 0);
+		rmSync(home, { recursive: true, force: true });
+	}
+};
+
+/**
+ * A database server that lives as long as a test run and is then wiped.
+ * @returns {Promise<{ url: string, port: number, pid: number, release: () => Promise<void> }>}
+ */
+export const openPassingDatabase = async () => {
+	mkdirSync(place, { recursive: true });
+	await sweep();
+	const home = mkdtempSync(path.join(place, 'run-'));
+	const owner = { pid: process.pid, birth: birthOf(process.pid) };
+	const remember = (server = {}) =>
+		writeFileSync(path.join(home, 'owner.json'), JSON.stringify({ ...owner, server }));
+	remember();
+	const { onExit: _, ...server } = await startServer({ home, purpose: 'test' });
+	remember(server);
+	return {
+		url: databaseUrl(home, server.port),
+		port: server.port,
+		pid: server.pid,
+		release: async () => {
+			await stopProcess(server, 1000);
+			rmSync(home, { recursive: true, force: true });
+		}
+	};
+};
