@@ -13,6 +13,13 @@ CREATE TABLE `accounts` (
 	CONSTRAINT `accounts_provider_provider_account_id_pk` PRIMARY KEY(`provider`,`provider_account_id`)
 ) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_unicode_ci;
 --> statement-breakpoint
+CREATE TABLE `attempts` (
+	`attempt_key` varchar(64) NOT NULL,
+	`tries` int NOT NULL,
+	`started_at` datetime(3) NOT NULL,
+	CONSTRAINT `attempts_attempt_key` PRIMARY KEY(`attempt_key`)
+) ENGINE=InnoDB DEFAULT CHARSET=utf8mb4 COLLATE=utf8mb4_unicode_ci;
+--> statement-breakpoint
 CREATE TABLE `audit_log` (
 	`id` varchar(36) NOT NULL,
 	`firm_id` varchar(36),
@@ -83,6 +90,8 @@ CREATE TABLE `section_versions` (
 	`version` int NOT NULL,
 	`name` varchar(120) NOT NULL,
 	`standard` varchar(120) NOT NULL DEFAULT '',
+	`project` varchar(160) NOT NULL DEFAULT '',
+	`remark` varchar(500) NOT NULL DEFAULT '',
 	`definition` json NOT NULL,
 	`schema_version` int NOT NULL,
 	`settings` json NOT NULL,
@@ -187,6 +196,7 @@ ALTER TABLE `sections` ADD CONSTRAINT `sections_created_by_users_id_fk` FOREIGN 
 ALTER TABLE `sections` ADD CONSTRAINT `sections_updated_by_users_id_fk` FOREIGN KEY (`updated_by`) REFERENCES `users`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE `shapes` ADD CONSTRAINT `shapes_catalogue_id_catalogues_id_fk` FOREIGN KEY (`catalogue_id`) REFERENCES `catalogues`(`id`) ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
 CREATE INDEX `accounts_user` ON `accounts` (`user_id`);--> statement-breakpoint
+CREATE INDEX `attempts_started` ON `attempts` (`started_at`);--> statement-breakpoint
 CREATE INDEX `audit_log_firm` ON `audit_log` (`firm_id`,`id`);--> statement-breakpoint
 CREATE INDEX `audit_log_subject` ON `audit_log` (`subject_kind`,`subject_id`);--> statement-breakpoint
 CREATE INDEX `local_mail_recipient` ON `local_mail` (`recipient`);--> statement-breakpoint

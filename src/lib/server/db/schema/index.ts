@@ -1,4 +1,5 @@
 export { accounts } from './accounts';
+export { attempts } from './attempts';
 export { auditLog } from './audit-log';
 export { catalogues } from './catalogues';
 export { firms } from './firms';

@@ -17,6 +17,8 @@ export const sectionVersions = mysqlTable(
 		version: int('version').notNull(),
 		name: varchar('name', { length: 120 }).notNull(),
 		standard: varchar('standard', { length: 120 }).notNull().default(''),
+		project: varchar('project', { length: 160 }).notNull().default(''),
+		remark: varchar('remark', { length: 500 }).notNull().default(''),
 		definition: json('definition').$type<SectionDefinition>().notNull(),
 		schemaVersion: int('schema_version').notNull(),
 		settings: json('settings').$type<SectionSettings>().notNull(),
