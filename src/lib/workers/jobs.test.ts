@@ -109,4 +109,15 @@ describe('jobs in a worker', () => {
 		});
 		expect(await jobs.start('double', 2).result).toEqual({ ok: true, value: 4 });
 	});
+
+	it('ends every job when the worker itself breaks', async () => {
+		const { jobs } = started();
+		const job = jobs.start('count', { to: 1e9 });
+		jobs.abandon('The worker stopped.');
+		expect(await job.result).toEqual({
+			ok: false,
+			error: { reason: 'failed', message: 'The worker stopped.' }
+		});
+		job.cancel();
+	});
 });

@@ -20,6 +20,8 @@ export interface Jobs<T extends JobTable> {
 		payload: T[K]['payload'],
 		options?: JobOptions
 	): Job<T[K]['value']>;
+	/** Ends every job as failed: the worker itself has broken. */
+	abandon(message: string): void;
 }
 
 interface Pending {
@@ -79,8 +81,17 @@ export function jobsOver<T extends JobTable>(port: Port<ToWorker<T>, FromWorker>
 		next(lane);
 	});
 
+	const abandon = (message: string) => {
+		for (const lane of lanes.values()) {
+			lane.inHand?.settle(fail({ reason: 'failed', message }));
+			lane.waiting?.settle(fail({ reason: 'failed', message }));
+			lane.inHand = lane.waiting = null;
+		}
+	};
+
 	let lastId = 0;
 	return {
+		abandon,
 		start(kind, payload, { onProgress } = {}) {
 			const id = ++lastId;
 			const lane = laneOf(kind);
