@@ -49,9 +49,10 @@ export function addArcAntiderivative(
 	const u = Math.min(R, Math.max(-R, level - c));
 	const R2 = R * R;
 	const u2 = u * u;
-	const h2 = R2 - u2;
+	const h2 = (R - u) * (R + u);
 	const h = Math.sqrt(h2);
-	const angle = Math.asin(u / R);
+	// the angle is taken from h itself, so that rounding of h near a pole cancels
+	const angle = Math.atan2(u, h);
 	const H0 = side * 0.5 * (u * h + R2 * angle);
 	const H1 = (-side * h2 * h) / 3;
 	const H2 = (side * (R2 * R2 * angle - u * h * (R2 - 2 * u2))) / 8;

@@ -164,7 +164,8 @@ export function widthAt({ levels, lines, arcs }: Profile, level: number): number
 	for (const { arc } of arcs[slab]!) {
 		const u = level - arc.across;
 		width +=
-			arc.sign * (arc.along + arc.side * Math.sqrt(Math.max(0, arc.radius * arc.radius - u * u)));
+			arc.sign *
+			(arc.along + arc.side * Math.sqrt(Math.max(0, (arc.radius - u) * (arc.radius + u))));
 	}
 	return width;
 }
