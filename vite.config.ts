@@ -6,11 +6,13 @@ export default defineConfig({
 	plugins: [sveltekit()],
 	build: { chunkSizeWarningLimit: 900 },
 	test: {
+		reporters: ['default', './tests/setup/tally.ts'],
 		projects: [
 			{
 				extends: true,
 				test: {
 					name: 'unit',
+					sequence: { groupOrder: 0 },
 					environment: 'node',
 					include: ['src/**/*.test.ts', 'tests/published/**/*.test.ts', 'tests/house/**/*.test.ts'],
 					exclude: ['src/**/*.svelte.test.ts']
@@ -21,6 +23,7 @@ export default defineConfig({
 				plugins: [svelteTesting()],
 				test: {
 					name: 'component',
+					sequence: { groupOrder: 1 },
 					environment: 'jsdom',
 					include: ['src/**/*.svelte.test.ts'],
 					setupFiles: ['tests/setup/component.ts']
@@ -30,6 +33,7 @@ export default defineConfig({
 				extends: true,
 				test: {
 					name: 'e2e',
+					sequence: { groupOrder: 2 },
 					environment: 'node',
 					include: ['tests/api/**/*.test.ts', 'tests/e2e/**/*.test.ts', 'tests/load/**/*.test.ts'],
 					globalSetup: ['tests/setup/server.ts'],
