@@ -38,7 +38,7 @@ const sectionClass = z.union([
 	z.enum(['compact', 'noncompact', 'slender'])
 ]);
 
-const momentSchema = z.looseObject({
+const momentSchema = z.object({
 	firstYieldY: figure('kNm'),
 	firstYieldZ: figure('kNm'),
 	plasticY: figure('kNm'),
@@ -49,7 +49,7 @@ const momentSchema = z.looseObject({
 	shapeFactorZ: figure('')
 });
 
-const elementSchema = z.looseObject({
+const elementSchema = z.object({
 	part: z.string(),
 	type: z.enum(['internal', 'outstand', 'tubular', 'angle']),
 	stress: z.enum(['compression', 'bending', 'combined', 'tension']),
@@ -64,13 +64,13 @@ const elementSchema = z.looseObject({
 	clause: z.string()
 });
 
-const classificationSchema = z.looseObject({
+const classificationSchema = z.object({
 	standard: standardSchema,
 	overall: sectionClass,
 	basis: z.enum(['+My', '−My', 'N', 'demand']),
 	elements: z.array(elementSchema),
 	governing: z.string(),
-	byCase: z.looseObject({
+	byCase: z.object({
 		plusMy: sectionClass.nullable(),
 		minusMy: sectionClass.nullable(),
 		plusMz: sectionClass.nullable(),
@@ -85,15 +85,15 @@ const effectiveFields = {
 	elasticModulusYTop: z.number(),
 	elasticModulusYBottom: z.number(),
 	centroidShiftZ: z.number(),
-	removed: z.array(z.looseObject({ part: z.string(), from: z.number(), to: z.number() }))
+	removed: z.array(z.object({ part: z.string(), from: z.number(), to: z.number() }))
 };
-const effectiveSchema = z.looseObject({
+const effectiveSchema = z.object({
 	basis: z.enum(['+My', '−My', 'Mz', 'N']),
 	...effectiveFields,
-	converged: z.looseObject(effectiveFields)
+	converged: z.object(effectiveFields)
 });
 
-const checkSchema = z.looseObject({
+const checkSchema = z.object({
 	demand: z.string(),
 	name: z.string(),
 	clause: z.string(),
@@ -102,7 +102,7 @@ const checkSchema = z.looseObject({
 	utilisation: z.number().meta({ description: 'value / limit' })
 });
 
-const resistanceSchema = z.looseObject({
+const resistanceSchema = z.object({
 	standard: standardSchema,
 	basis: z.enum(['plastic', 'effective-class-2', 'interpolated', 'elastic', 'effective']),
 	MyRd: figure('kNm'),
@@ -119,13 +119,13 @@ const resistanceSchema = z.looseObject({
 	MzNRd: figure('kNm').optional(),
 	checks: z.array(checkSchema),
 	utilisation: z
-		.looseObject({ governing: z.string(), value: z.number() })
+		.object({ governing: z.string(), value: z.number() })
 		.nullable()
 		.meta({ description: 'Null when a check that applies is missing.' })
 });
 
 export const analyseAnswerSchema = z
-	.looseObject({
+	.object({
 		...envelopeFields,
 		gross: grossSchema,
 		moment: momentSchema,

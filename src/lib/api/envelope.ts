@@ -2,7 +2,7 @@ import { strengthBasisSchema } from './code';
 import { z } from './zod';
 
 export const noteSchema = z
-	.looseObject({ code: z.string(), message: z.string(), clause: z.string().optional() })
+	.object({ code: z.string(), message: z.string(), clause: z.string().optional() })
 	.meta({ id: 'Note', description: 'Why a figure is absent or must be read with care.' });
 
 /** What every computed answer carries. */

@@ -1,13 +1,13 @@
 import { z } from './zod';
 
 export const issueSchema = z
-	.looseObject({ path: z.string(), message: z.string() })
+	.object({ path: z.string(), message: z.string() })
 	.meta({ id: 'Issue', description: 'One thing wrong: a dotted path and a sentence.' });
 
 /** Every refusal has this shape, whatever its status. */
 export const errorSchema = z
-	.looseObject({
-		error: z.looseObject({
+	.object({
+		error: z.object({
 			code: z.string(),
 			message: z.string(),
 			issues: z.array(issueSchema).optional(),

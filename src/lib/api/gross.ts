@@ -2,11 +2,11 @@ import { z } from './zod';
 
 const number = (unit: string, description?: string) =>
 	z.number().meta({ 'x-unit': unit, ...(description ? { description } : {}) });
-const place = z.looseObject({ y: z.number(), z: z.number() });
+const place = z.object({ y: z.number(), z: z.number() });
 
 /** Properties of the gross section, from the definition's dimensions. */
 export const grossSchema = z
-	.looseObject({
+	.object({
 		area: number('mm²'),
 		mass: number('kg/m'),
 		centroid: place,

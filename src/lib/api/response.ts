@@ -50,14 +50,14 @@ export const responseRequestSchema = z
 export type ResponseRequest = z.infer<typeof responseRequestSchema>;
 
 const figure = (unit: string) => z.number().nullable().meta({ 'x-unit': unit });
-const resultant = z.looseObject({
+const resultant = z.object({
 	force: z.number().meta({ 'x-unit': 'kN' }),
 	y: z.number().meta({ 'x-unit': 'mm' }),
 	z: z.number().meta({ 'x-unit': 'mm' })
 });
 
 export const stateSchema = z
-	.looseObject({
+	.object({
 		curvature: figure('1/m'),
 		curvatureRatio: figure(''),
 		moment: figure('kNm'),
@@ -67,10 +67,10 @@ export const stateSchema = z
 		e0: figure(''),
 		ky: figure('1/m'),
 		kz: figure('1/m'),
-		neutralAxis: z.looseObject({ distance: z.number(), angle: z.number() }).nullable(),
+		neutralAxis: z.object({ distance: z.number(), angle: z.number() }).nullable(),
 		yieldedShare: figure(''),
 		extremes: z
-			.looseObject({
+			.object({
 				strainMin: z.number(),
 				strainMax: z.number(),
 				stressMin: z.number(),
@@ -88,10 +88,10 @@ export const stateSchema = z
 	});
 
 export const responseAnswerSchema = z
-	.looseObject({
+	.object({
 		...envelopeFields,
 		states: z.array(stateSchema),
-		firstYield: z.looseObject({ curvature: figure('1/m'), moment: figure('kNm') }),
+		firstYield: z.object({ curvature: figure('1/m'), moment: figure('kNm') }),
 		plasticMoment: figure('kNm')
 	})
 	.meta({ id: 'ResponseAnswer' });

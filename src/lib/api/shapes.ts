@@ -4,7 +4,7 @@ import { sectionSchema } from './section';
 import { z } from './zod';
 
 export const shapeSummarySchema = z
-	.looseObject({
+	.object({
 		id: z.string(),
 		designation: z.string(),
 		family: z.string(),
@@ -20,7 +20,7 @@ export const shapeSummarySchema = z
 	.meta({ id: 'ShapeSummary' });
 
 export const shapeSchema = z
-	.looseObject({
+	.object({
 		...shapeSummarySchema.shape,
 		definition: sectionSchema,
 		properties: grossSchema
@@ -28,7 +28,7 @@ export const shapeSchema = z
 	.meta({ id: 'Shape' });
 
 export const catalogueSchema = z
-	.looseObject({
+	.object({
 		id: z.string(),
 		standard: z.string(),
 		title: z.string(),
@@ -38,7 +38,7 @@ export const catalogueSchema = z
 	.meta({ id: 'Catalogue' });
 
 const listOf = <T extends z.ZodType>(item: T) =>
-	z.looseObject({
+	z.object({
 		items: z.array(item),
 		total: z.int(),
 		page: z.int(),
