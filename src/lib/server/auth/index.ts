@@ -1,0 +1,1 @@
+export { handleAuth } from './handle-auth';
