@@ -124,6 +124,13 @@ const resistanceSchema = z.object({
 		.meta({ description: 'Null when a check that applies is missing.' })
 });
 
+const verdictSchema = z.object({
+	sentence: z.string(),
+	detail: z.string(),
+	status: z.enum(['passes', 'fails', 'incomplete', 'no-figure']),
+	notChecked: z.array(z.string())
+});
+
 export const analyseAnswerSchema = z
 	.object({
 		...envelopeFields,
@@ -132,7 +139,8 @@ export const analyseAnswerSchema = z
 		squashLoad: figure('kN'),
 		classification: classificationSchema.nullable(),
 		effective: effectiveSchema.nullable(),
-		resistance: resistanceSchema.nullable()
+		resistance: resistanceSchema.nullable(),
+		verdict: verdictSchema.nullable().meta({ description: 'The same in plain words.' })
 	})
 	.meta({ id: 'AnalyseAnswer' });
 

@@ -32,6 +32,7 @@ export const catalogueSchema = z
 		id: z.string(),
 		standard: z.string(),
 		title: z.string(),
+		source: z.string(),
 		count: z.int().meta({ description: 'Number of shapes.' }),
 		families: z.array(z.string())
 	})

@@ -1,4 +1,5 @@
 import { isHttpError, isRedirect, type RequestEvent } from '@sveltejs/kit';
+import { isDatabaseAway } from '../db/failure';
 import { log } from '../log';
 import { refused, type Refusal } from './refusal';
 
@@ -6,6 +7,13 @@ const broken = (error: unknown, id: string) => {
 	log.error({ err: error }, 'An API call failed');
 	const message = `Something went wrong on our side. It is kept in the log under ${id}.`;
 	return Response.json({ error: { code: 'internal', message, id } }, { status: 500 });
+};
+
+const databaseAway = (error: unknown, id: string) => {
+	log.error({ err: error }, 'The database is away');
+	const message =
+		'The shapes cannot be reached at the moment. Try again soon; calculations with a section of your own still work.';
+	return Response.json({ error: { code: 'database_away', message, id } }, { status: 503 });
 };
 
 /**
@@ -25,6 +33,7 @@ export const handled = async (
 				{ error: { code: `http_${error.status}`, message: error.body.message } },
 				{ status: error.status }
 			);
+		if (isDatabaseAway(error)) return databaseAway(error, event.locals.requestId);
 		return broken(error, event.locals.requestId);
 	}
 };

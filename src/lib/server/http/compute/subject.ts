@@ -25,7 +25,8 @@ export interface Subject {
 /** Catalogue shapes are nominal dims of one edition: each stands in version 1. */
 const latestVersion = 1;
 
-const noShape = (id: string): Refusal => ({
+/** 404 for an id that no catalogue has. */
+export const noShape = (id: string): Refusal => ({
 	status: 404,
 	code: 'unknown_shape',
 	message: `There is no shape "${id}". Find its id with GET /api/v1/shapes?q=…`
