@@ -1,44 +1,6 @@
 import type { Config } from 'tailwindcss';
 import plugin from 'tailwindcss/plugin';
-
-/** Colours of the marking-out table. Each token means one thing; see DEVELOPERS.md. */
-const light = {
-	layout: '#18265c',
-	'layout-2': '#2c3f8f',
-	vellum: '#f6f7f3',
-	sheet: '#ffffff',
-	grid: '#eaeee7',
-	rule: '#d3d8d0',
-	ink: '#1c2230',
-	mute: '#5f6675',
-	tension: '#0b7f86',
-	compression: '#a8346d',
-	hot: '#e58a00',
-	'hot-text': '#8a5200',
-	spark: '#ffb02e',
-	good: '#2f7d4f',
-	bad: '#a02a2a',
-	'on-layout': '#ffffff'
-} as const;
-
-const dark: Record<keyof typeof light, string> = {
-	layout: '#0d1535',
-	'layout-2': '#9db0ff',
-	vellum: '#12161f',
-	sheet: '#1a202c',
-	grid: '#1e2531',
-	rule: '#333c4b',
-	ink: '#e9ecf2',
-	mute: '#a3abba',
-	tension: '#3fc0c8',
-	compression: '#ec7fb2',
-	hot: '#ffab33',
-	'hot-text': '#ffc168',
-	spark: '#ffb02e',
-	good: '#69c48d',
-	bad: '#f08a8a',
-	'on-layout': '#ffffff'
-};
+import { dark, light } from './src/lib/components/ui/tokens';
 
 const variables = (tokens: Record<string, string>) =>
 	Object.fromEntries(Object.entries(tokens).map(([name, value]) => [`--${name}`, value]));
@@ -52,7 +14,9 @@ export default {
 			fontFamily: {
 				sans: ['Archivo Variable', 'system-ui', 'sans-serif'],
 				mono: ['Spline Sans Mono Variable', 'ui-monospace', 'monospace']
-			}
+			},
+			// Widths at which the bar and the Bench change their arrangement.
+			screens: { bar: '56.25rem', wide: '75rem' }
 		}
 	},
 	plugins: [
