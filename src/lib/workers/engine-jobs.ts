@@ -1,0 +1,42 @@
+import type { Issue, Result } from '$lib/engine/result';
+import type { BendingPath } from '$lib/engine/response/state';
+import type { Imposed, Response } from '$lib/engine/response/respond';
+import type { AnalyseRequest } from '$lib/engine/rules/analyse';
+import type { Analysis } from '$lib/engine/rules/analysis';
+import type { StrengthBasis } from '$lib/engine/material/material';
+import type { SectionDefinition } from '$lib/engine/section/definition';
+import { jobsOver, type Jobs } from './jobs';
+
+interface About {
+	definition: SectionDefinition;
+	strengthBasis?: StrengthBasis;
+}
+
+/** The engine's jobs: what each takes and gives. Issues are those of the definition. */
+export type EngineJobs = {
+	analyse: {
+		payload: About & { request?: AnalyseRequest };
+		value: Result<Analysis, Issue[]>;
+	};
+	/** States along one path; reports progress, may be cancelled between states. */
+	respond: {
+		payload: About & { path: BendingPath; at: Imposed };
+		value: Result<Response, Issue[]>;
+	};
+};
+
+let shared: Jobs<EngineJobs> | undefined;
+
+/** The page's one engine worker, started at first use. Call in the browser only. */
+export function engineJobs(): Jobs<EngineJobs> {
+	if (shared) return shared;
+	const worker = new Worker(new URL('./engine.worker.ts', import.meta.url), { type: 'module' });
+	const jobs = jobsOver<EngineJobs>(worker);
+	worker.addEventListener('error', () => {
+		shared = undefined;
+		worker.terminate();
+		jobs.abandon('The calculation stopped unexpectedly. Try again.');
+	});
+	shared = jobs;
+	return jobs;
+}
