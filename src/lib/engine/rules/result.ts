@@ -82,3 +82,25 @@ export interface Resistance {
 	/** Null when a check that applies is missing. */
 	utilisation: { governing: string; value: number } | null;
 }
+
+/** One demand with its class and its place on the ruler of its own moment, N held; kNm. */
+export interface DemandState {
+	demand: string;
+	class: SectionClass;
+	governing: string;
+	basis: Classification['basis'];
+	elements: ClassifiedElement[];
+	/** kN, as demanded. */
+	N: number;
+	/** Direction of the moment, degrees from y; 0 is +My, 90 is +Mz. */
+	axisAngle: number;
+	/** Size of the demand's moment. */
+	moment: number;
+	countable: number | null;
+	countableBasis: Resistance['basis'] | null;
+	/** Under the demand's N, without γM0. */
+	firstYield: number | null;
+	fullPlastic: number | null;
+	/** Greatest use of the checks made; null when one that applies is missing. */
+	utilisation: number | null;
+}

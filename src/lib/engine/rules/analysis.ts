@@ -1,0 +1,25 @@
+import type { StrengthBasis } from '../material/material';
+import type { Note } from '../result';
+import type { GrossProperties } from '../section/prepared';
+import type { Classification, DemandState, Resistance } from './result';
+import type { MomentFigures } from './section-moments';
+import type { Verdict } from './verdict';
+
+/** The contract's answer of `analyse` without its envelope. */
+export interface AnalysisFigures {
+	strengthBasis: StrengthBasis;
+	gross: GrossProperties;
+	moment: MomentFigures;
+	/** kN */
+	squashLoad: number;
+	classification: Classification | null;
+	effective: null;
+	resistance: Resistance | null;
+	/** One for each demand, in their order; empty where no rule covers the section. */
+	demands: DemandState[];
+	notes: Note[];
+}
+
+export interface Analysis extends AnalysisFigures {
+	verdict: Verdict;
+}

@@ -1,0 +1,50 @@
+import { firstYieldOf } from '../../response/first-yield';
+import { plasticMomentOf } from '../../response/plastic';
+import type { DemandState } from '../result';
+import type { DemandChecks } from './demand-checks';
+import { pathOf, type Effects } from './stress-case';
+import type { EnModel } from './model';
+
+type Ruler = Pick<DemandState, 'axisAngle' | 'moment' | 'countable' | 'firstYield' | 'fullPlastic'>;
+
+/**
+ * Where a demand stands on the ruler of its own moment, N held: what may be counted by the linear
+ * sum, first yield and the full block under that N (both without γM0). kNm along the axis at
+ * `axisAngle`; a demand without moment is measured along +My.
+ */
+export function demandRuler(
+	model: EnModel,
+	effects: Effects,
+	used: DemandChecks,
+	countableAlone: number | null
+): Ruler {
+	const size = Math.hypot(effects.My, effects.Mz);
+	const along = size === 0 ? { ...effects, My: 1 } : effects;
+	const limits = limitsAlong(model, along);
+	const { axialShare, bendingShare, missing } = used;
+	const blocked = missing.some(({ code }) => code === 'm-v-not-built');
+	const rest = axialShare === null || blocked ? null : Math.max(0, 1 - axialShare);
+	const whole = size === 0 ? countableAlone : bendingShare === null ? null : size / bendingShare;
+	return {
+		...limits,
+		moment: size,
+		countable: rest === null || whole === null ? null : rest * whole
+	};
+}
+
+function limitsAlong(model: EnModel, effects: Effects) {
+	const path = pathOf(effects, 1);
+	const { axisAngle } = path;
+	if (effects.N === 0 && (effects.My === 0 || effects.Mz === 0)) {
+		const { plusMy, minusMy, plusMz, minusMz } = model.moments;
+		const y = effects.My < 0 ? minusMy : plusMy;
+		const z = effects.Mz < 0 ? minusMz : plusMz;
+		const pure = effects.Mz === 0 ? y : z;
+		return { axisAngle, firstYield: pure.firstYield, fullPlastic: pure.plastic.moment };
+	}
+	return {
+		axisAngle,
+		firstYield: firstYieldOf(model.mechanics, path).moment,
+		fullPlastic: plasticMomentOf(model.mechanics, path).moment
+	};
+}

@@ -1,0 +1,58 @@
+import type { Mechanics } from '../../response/law-groups';
+import type { PreparedSection } from '../../section/prepared';
+import type { CodeChoice, SectionClass } from '../result';
+import type { AxisSense, SectionMoments } from '../section-moments';
+import { classifySection, type ClassifiedCase } from './classify';
+import type { SectionElements } from './plate-elements';
+import type { Strengths } from './strengths';
+import { elasticStress, compressedSide, uniformCompression, type Effects } from './stress-case';
+
+/** A section with all that the rules of EN 1993-1-1 take from it, found once. */
+export interface EnModel {
+	readonly section: PreparedSection;
+	readonly mechanics: Mechanics;
+	readonly moments: SectionMoments;
+	readonly strengths: Strengths;
+	readonly elements: SectionElements;
+	readonly code: CodeChoice;
+}
+
+export type PureCases = Readonly<Record<AxisSense | 'compression', ClassifiedCase>>;
+
+const unit: Readonly<Record<AxisSense, Effects>> = {
+	plusMy: { N: 0, My: 1, Mz: 0 },
+	minusMy: { N: 0, My: -1, Mz: 0 },
+	plusMz: { N: 0, My: 0, Mz: 1 },
+	minusMz: { N: 0, My: 0, Mz: -1 }
+};
+
+/** Pure bending in four senses and pure compression. */
+export function pureCases(model: EnModel): PureCases {
+	const bent = (sense: AxisSense) => pureBending(model, sense);
+	const squashed = { N: -1, My: 0, Mz: 0 };
+	return {
+		plusMy: bent('plusMy'),
+		minusMy: bent('minusMy'),
+		plusMz: bent('plusMz'),
+		minusMz: bent('minusMz'),
+		compression: classifySection(model.elements, uniformCompression, squashed)
+	};
+}
+
+function pureBending({ elements, section, moments }: EnModel, sense: AxisSense): ClassifiedCase {
+	const { axisAngle, plastic } = moments[sense];
+	const effects = unit[sense];
+	const elastic = elasticStress(section.gross, 0, effects, 1);
+	const block = compressedSide(section.gross, axisAngle, plastic) ?? elastic;
+	return classifySection(elements, { plastic: block, elastic }, effects);
+}
+
+export type PureClasses = Readonly<Record<AxisSense | 'compression', SectionClass>>;
+
+export const pureClasses = (cases: PureCases): PureClasses => ({
+	plusMy: cases.plusMy.overall,
+	minusMy: cases.minusMy.overall,
+	plusMz: cases.plusMz.overall,
+	minusMz: cases.minusMz.overall,
+	compression: cases.compression.overall
+});

@@ -1,0 +1,123 @@
+import type { Point } from '../../geometry/boundary';
+import { firstYieldOf } from '../../response/first-yield';
+import type { Mechanics } from '../../response/law-groups';
+import { plasticMomentOf, type PlasticState } from '../../response/plastic';
+import type { BendingPath } from '../../response/state';
+import type { GrossProperties } from '../../section/prepared';
+import { proportionalBlock } from './proportional-block';
+
+/** Design effects, kN and kNm, signs of the contract. */
+export interface Effects {
+	readonly N: number;
+	readonly My: number;
+	readonly Mz: number;
+}
+
+/** How a section is stressed at both limits; compression positive. */
+export interface StressCase {
+	/** Distance into the compressed side of the plastic block, mm; its sign is what counts. */
+	readonly plastic: (at: Point) => number;
+	/** Elastic stress at first yield, N/mm² (any scale where only its ratios are asked). */
+	readonly elastic: (at: Point) => number;
+}
+
+/** What a stress case is taken from. */
+export interface StressSource {
+	readonly mechanics: Mechanics;
+	readonly gross: GrossProperties;
+	/** Multiplies N, so that block and first yield are at design strength. */
+	readonly gammaM0: number;
+	readonly classAlpha: 'actual-N' | 'proportional';
+}
+
+const uniform = (sign: number): StressCase => ({ plastic: () => sign, elastic: () => sign });
+
+export const uniformCompression: StressCase = uniform(1);
+export const uniformTension: StressCase = uniform(-1);
+
+/** Block and elastic stress under N with bending: the actual N with M filling the rest, or both in proportion. */
+export function stressCase(source: StressSource, effects: Effects): StressCase {
+	const size = Math.hypot(effects.My, effects.Mz);
+	if (size === 0) return effects.N < 0 ? uniformCompression : uniformTension;
+	const path = pathOf(effects, source.gammaM0);
+	return source.classAlpha === 'proportional' && effects.N !== 0
+		? proportionalCase(source, effects, path, size)
+		: actualCase(source, effects, path, size);
+}
+
+/** The axis that the moment turns about; a section symmetric about z bends straight about y. */
+export function pathOf({ N, My, Mz }: Effects, gammaM0: number): BendingPath {
+	const axisAngle = Mz === 0 ? (My < 0 ? 180 : 0) : (Math.atan2(Mz, My) * 180) / Math.PI;
+	const transverse = Mz === 0 || (My === 0 && N === 0) ? 'curvature-zero' : 'moment-zero';
+	return { axisAngle, transverse, N: N * gammaM0 };
+}
+
+function actualCase(
+	source: StressSource,
+	effects: Effects,
+	path: BendingPath,
+	size: number
+): StressCase {
+	const state = plasticMomentOf(source.mechanics, path);
+	const yielding = effects.N === 0 ? size : firstYieldOf(source.mechanics, path).moment;
+	return caseFrom(source.gross, effects, {
+		plastic: compressedSide(source.gross, path.axisAngle, state),
+		axial: path.N,
+		grown: yielding === null ? null : yielding / size
+	});
+}
+
+function proportionalCase(
+	source: StressSource,
+	effects: Effects,
+	path: BendingPath,
+	size: number
+): StressCase {
+	const state = proportionalBlock(source.mechanics, path, effects.N, size);
+	return caseFrom(source.gross, effects, {
+		plastic: compressedSide(source.gross, path.axisAngle, state),
+		axial: effects.N,
+		grown: 1
+	});
+}
+
+/** Where N alone is too much for a limit, its stress is taken as uniform: the harder case. */
+function caseFrom(
+	gross: GrossProperties,
+	effects: Effects,
+	at: { plastic: StressCase['plastic'] | null; axial: number; grown: number | null }
+): StressCase {
+	const alone = effects.N < 0 ? uniformCompression : uniformTension;
+	return {
+		plastic: at.plastic ?? alone.plastic,
+		elastic: at.grown === null ? alone.elastic : elasticStress(gross, at.axial, effects, at.grown)
+	};
+}
+
+/** −N/A + My z/Iy − Mz y/Iz of a section with principal axes y and z. */
+export function elasticStress(
+	{ area, centroid, secondMomentY, secondMomentZ }: GrossProperties,
+	N: number,
+	{ My, Mz }: Effects,
+	grown: number
+): StressCase['elastic'] {
+	const direct = (-N * 1e3) / area;
+	const perZ = (grown * My * 1e6) / secondMomentY;
+	const perY = (-grown * Mz * 1e6) / secondMomentZ;
+	return ({ y, z }) => direct + perZ * (z - centroid.z) + perY * (y - centroid.y);
+}
+
+/** Signed distance from the neutral axis towards the side that positive bending compresses. */
+export function compressedSide(
+	{ centroid }: GrossProperties,
+	axisAngle: number,
+	{ neutralAxis }: PlasticState
+): StressCase['plastic'] | null {
+	if (neutralAxis === null) return null;
+	const turn = (neutralAxis.angle * Math.PI) / 180;
+	const asked = (axisAngle * Math.PI) / 180;
+	const sense = Math.cos(turn - asked) < 0 ? -1 : 1;
+	const [ny, nz] = [-Math.sin(turn), Math.cos(turn)];
+	return ({ y, z }) =>
+		sense * (ny * (y - centroid.y) + nz * (z - centroid.z) - neutralAxis.distance);
+}

@@ -1,0 +1,82 @@
+import type { ClassifiedElement } from './result';
+import { force, moment, ratioPair, words, type VerdictToken } from './verdict-tokens';
+import type { VerdictView } from './verdict';
+
+export const noClassSentence = (): VerdictToken[] => [
+	words('No class. Nothing may be counted yet.')
+];
+
+/** "Class 3. Count 3110 kNm, up to first yield." */
+export function countSentence(view: VerdictView): VerdictToken[] {
+	const { countable } = view.ruler;
+	if (countable === null) return [words(`Class ${view.class}. Nothing may be counted yet.`)];
+	const head =
+		view.basis === 'effective-class-2' ? 'Class 3, web as Class 2' : `Class ${view.class}`;
+	return [words(`${head}. Count `), moment(countable), ...countedAs(view)];
+}
+
+function countedAs({ N, biaxial, basis }: VerdictView): VerdictToken[] {
+	if (N !== 0) return [words(' beside '), force(N), words(', by the linear sum.')];
+	if (biaxial) return [words(' about this axis, by the linear sum.')];
+	switch (basis) {
+		case 'plastic':
+			return [words(', the full plastic block.')];
+		case 'effective-class-2':
+			return [words(', the plastic block of the effective section.')];
+		default:
+			return [words(', up to first yield.')];
+	}
+}
+
+/** Which part decides and what lies beyond. */
+export function detailSentence(view: VerdictView): VerdictToken[] {
+	return [...decidingPart(view), ...beyond(view)];
+}
+
+function decidingPart({ class: overall, element }: VerdictView): VerdictToken[] {
+	if (!element || element.limits.length === 0) return [words('No part is in compression.')];
+	const { slenderness, limits, type } = element;
+	const name = partWords(element);
+	const symbol = type === 'tubular' ? 'd/t' : 'c/t';
+	const passed = Math.max(overall - 1, 1);
+	const [own, limit] = ratioPair(slenderness, limits[passed - 1] ?? slenderness);
+	if (overall === 1)
+		return [
+			words(`The ${name} comes closest: ${symbol} `),
+			own,
+			words(' is within the Class 1 limit '),
+			limit,
+			words('.')
+		];
+	return [
+		words(`The ${name} decides it: ${symbol} `),
+		own,
+		words(` is over the Class ${passed} limit `),
+		limit,
+		words('.')
+	];
+}
+
+function beyond({ N, biaxial, basis, ruler }: VerdictView): VerdictToken[] {
+	const { firstYield, fullPlastic, countable } = ruler;
+	if (firstYield === null || fullPlastic === null) return [];
+	if (countable === null)
+		return [
+			words(' Neither the '),
+			moment(firstYield),
+			words(' at first yield nor anything beyond is to be counted.')
+		];
+	const reserve = fullPlastic - firstYield;
+	if (N !== 0 || biaxial || basis === 'effective-class-2') {
+		const left = fullPlastic - countable;
+		return left > 0
+			? [words(' The last '), moment(left), words(' of the full block are not to be counted.')]
+			: [];
+	}
+	const may = basis === 'plastic' ? 'may be counted' : 'are not to be counted';
+	return [words(' The '), moment(reserve), words(` beyond first yield ${may}.`)];
+}
+
+function partWords({ part }: ClassifiedElement): string {
+	return part.replace(/([A-Z])/g, (capital) => ` ${capital.toLowerCase()}`);
+}

@@ -1,0 +1,151 @@
+import type { PreparedSection } from '../section/prepared';
+import type { AnalysisFigures } from './analysis';
+import type { ClassifiedElement, DemandState, Resistance, SectionClass } from './result';
+import { countSentence, detailSentence, noClassSentence } from './verdict-sentences';
+import { plainSentence, words, type VerdictToken } from './verdict-tokens';
+
+export type VerdictStatus = 'passes' | 'fails' | 'incomplete' | 'no-figure';
+
+/** Moments on one line from zero, kNm; first yield and full plastic under the demand's N. */
+export interface VerdictRuler {
+	/** Direction of the moment, degrees from y. */
+	axisAngle: number;
+	demand: number | null;
+	countable: number | null;
+	firstYield: number | null;
+	fullPlastic: number | null;
+}
+
+/** What may be counted, in words and on the ruler. */
+export interface Verdict {
+	sentence: string;
+	detail: string;
+	/** The same two sentences with their numbers apart, for other units. */
+	sentenceTokens: VerdictToken[];
+	detailTokens: VerdictToken[];
+	countable: { moment: number | null; basis: Resistance['basis'] | null };
+	/** Part that decides the class. */
+	governing: string | null;
+	notChecked: string[];
+	/** `no-figure`: nothing is demanded, or nothing may be counted for want of a rule. */
+	status: VerdictStatus;
+	/** The demand that the verdict speaks of. */
+	demand: string | null;
+	ruler: VerdictRuler;
+}
+
+/** What the sentences are made of: a demand's own state, or bending +My without demands. */
+export interface VerdictView {
+	class: SectionClass;
+	element: ClassifiedElement | undefined;
+	N: number;
+	/** Bending about both axes. */
+	biaxial: boolean;
+	basis: Resistance['basis'] | null;
+	ruler: VerdictRuler;
+}
+
+/**
+ * The verdict on one demand: the one named, else the one that fails, is incomplete or uses most.
+ * Without demands it speaks of bending with the bottom in tension.
+ */
+export function verdict(
+	_section: PreparedSection,
+	figures: AnalysisFigures,
+	demandName?: string
+): Verdict {
+	const named = figures.demands.find(({ demand }) => demand === demandName);
+	const state = named ?? pressing(figures.demands);
+	const view = state ? demandView(state) : plainView(figures);
+	const sentenceTokens = view ? countSentence(view) : noClassSentence();
+	const detailTokens = view ? detailSentence(view) : [words(figures.notes.at(-1)?.message ?? '')];
+	return {
+		sentence: plainSentence(sentenceTokens),
+		detail: plainSentence(detailTokens),
+		sentenceTokens,
+		detailTokens,
+		countable: { moment: view?.ruler.countable ?? null, basis: view?.basis ?? null },
+		governing: view?.element?.part ?? null,
+		notChecked: notChecked(figures),
+		status: statusOf(figures, named),
+		demand: state?.demand ?? null,
+		ruler: view?.ruler ?? bareRuler(figures)
+	};
+}
+
+/** Without a figure first, then the one that uses most. */
+function pressing(demands: readonly DemandState[]): DemandState | undefined {
+	const press = ({ utilisation }: DemandState) => utilisation ?? Number.POSITIVE_INFINITY;
+	return demands.reduce<DemandState | undefined>(
+		(most, state) => (most === undefined || press(state) > press(most) ? state : most),
+		undefined
+	);
+}
+
+function demandView(state: DemandState): VerdictView {
+	const { axisAngle, moment: demand, countable, firstYield, fullPlastic } = state;
+	return {
+		class: state.class,
+		element: governingElement(state.elements, state.governing, state.class),
+		N: state.N,
+		biaxial: axisAngle % 90 !== 0,
+		basis: state.countableBasis,
+		ruler: { axisAngle, demand, countable, firstYield, fullPlastic }
+	};
+}
+
+function plainView(figures: AnalysisFigures): VerdictView | null {
+	const { classification, resistance } = figures;
+	if (classification === null || resistance === null) return null;
+	const { elements, governing, overall } = classification;
+	return {
+		class: overall,
+		element: governingElement(elements, governing, overall),
+		N: 0,
+		biaxial: false,
+		basis: resistance.MyRd === null ? null : resistance.basis,
+		ruler: { ...bareRuler(figures), countable: resistance.MyRd }
+	};
+}
+
+const governingElement = (
+	elements: readonly ClassifiedElement[],
+	governing: string,
+	overall: SectionClass
+) => elements.find((element) => element.part === governing && element.class === overall);
+
+const bareRuler = ({ moment }: AnalysisFigures): VerdictRuler => ({
+	axisAngle: 0,
+	demand: null,
+	countable: null,
+	firstYield: moment.firstYieldY,
+	fullPlastic: moment.plasticY
+});
+
+function statusOf(figures: AnalysisFigures, named: DemandState | undefined): VerdictStatus {
+	const { resistance, demands } = figures;
+	if (resistance === null || demands.length === 0) return 'no-figure';
+	const over = resistance.checks.some(
+		({ demand, utilisation }) => utilisation > 1 && (!named || demand === named.demand)
+	);
+	if (over) return 'fails';
+	const used = named ? named.utilisation : (resistance.utilisation?.value ?? null);
+	return used === null ? 'incomplete' : 'passes';
+}
+
+const uncheckedWords: Readonly<Record<string, string>> = {
+	'ltb-not-checked': 'lateral–torsional buckling',
+	'member-buckling-not-checked': 'member buckling',
+	'shear-buckling-not-built': 'shear buckling',
+	'm-v-not-built': 'bending with high shear',
+	'net-section-not-checked': 'net section at bolt holes',
+	'tension-flange-holes-not-built': 'bolt holes in bending',
+	'class-4-not-built': 'effective widths',
+	'class-not-built': 'class and resistance',
+	'code-not-built': 'class and resistance'
+};
+
+function notChecked({ notes }: AnalysisFigures): string[] {
+	const found = notes.flatMap(({ code }) => uncheckedWords[code] ?? []);
+	return [...new Set(found)];
+}
