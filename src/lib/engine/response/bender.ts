@@ -107,7 +107,7 @@ function bentAt(b: Bender, N: number, curvature: number, turn: number, guess: nu
 }
 
 /** As fine as sums of a section's forces can be told apart. */
-const finest = 2e-15;
+const finest = 1e-14;
 
 const largestYieldStrain = ({ groups }: Mechanics): number =>
 	Math.max(...groups.map(({ law }) => Math.max(law.yieldTension, law.yieldCompression)));
