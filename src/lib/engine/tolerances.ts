@@ -14,3 +14,12 @@ export const equilibrium = 1e-11;
 
 /** Newton stops when a step changes the unknown by less than this share. */
 export const step = 1e-14;
+
+/**
+ * Edges of plates or regions touch when they are no further apart (or deeper in each other) than the
+ * lesser of these shares of the section's size and of the smallest thickness.
+ */
+export const contact = { ofSize: 1e-6, ofThickness: 1e-3 } as const;
+
+/** Rounding of a coordinate, as a share of its distance from the origin. */
+export const coordinateRounding = 8 * Number.EPSILON;

@@ -6,6 +6,8 @@ import { boxShape } from './kinds/box';
 import { channelShape } from './kinds/channel';
 import { circularHollowShape } from './kinds/circular-hollow';
 import { iShape } from './kinds/i';
+import { outlineShape } from './kinds/outline';
+import { platesShape } from './kinds/plates';
 import { rectangularHollowShape } from './kinds/rectangular-hollow';
 import { teeShape } from './kinds/tee';
 import type { ShapeResult } from './shape';
@@ -32,8 +34,9 @@ export function shapeOf(definition: SectionDefinition): ShapeResult {
 		case 'round':
 			return roundShape(definition);
 		case 'plates':
+			return platesShape(definition);
 		case 'outline':
-			return fail([{ path: 'kind', message: `Kind ${definition.kind} is not built yet.` }]);
+			return outlineShape(definition);
 		default:
 			return unknownKind(definition);
 	}
