@@ -21,10 +21,10 @@ import { findProgram } from './system-packages.js';
 
 const account = 'flangewright';
 
-/** @param {string} name */
-const program = (...name) => {
-	const found = findProgram(...name);
-	if (!found) throw new Refusal(`${name[0]} is not installed.`);
+/** @param {...string} names */
+const program = (...names) => {
+	const found = findProgram(...names);
+	if (!found) throw new Refusal(`${names[0]} is not installed.`);
 	return found;
 };
 

@@ -118,13 +118,20 @@ const configOf = (env: z.infer<typeof shape>): Config => ({
 	logLevel: env.LOG_LEVEL
 });
 
+/** One sentence for each wrong setting: the first thing wrong with it. */
+const complaintsOf = (error: z.ZodError): string[] => {
+	const byName = new Map<string, string>();
+	for (const { path, message } of error.issues) {
+		const name = path.join('.');
+		if (!byName.has(name)) byName.set(name, `${name} ${message}.`);
+	}
+	return [...byName.values()];
+};
+
 /** Reads the settings, or says of each wrong one what it must be; values are never repeated. */
 export const readConfig = (env: Environment): ConfigResult => {
 	const parsed = shape.safeParse(env);
-	const complaints = parsed.success
-		? []
-		: parsed.error.issues.map((issue) => `${issue.path.join('.')} ${issue.message}.`);
-	const all = [...complaints, ...oidcComplaints(env)];
+	const all = [...(parsed.success ? [] : complaintsOf(parsed.error)), ...oidcComplaints(env)];
 	if (!parsed.success || all.length > 0) return { ok: false, error: all };
 	return { ok: true, value: configOf(parsed.data) };
 };

@@ -1,4 +1,4 @@
-import { randomBytes } from 'node:crypto';
+import { randomInt, randomUUID } from 'node:crypto';
 
 let lastTime = 0;
 let counter = 0;
@@ -7,7 +7,7 @@ let counter = 0;
 const tick = (now: number): void => {
 	if (now > lastTime) {
 		lastTime = now;
-		counter = randomBytes(2).readUInt16BE() & 0x7ff;
+		counter = randomInt(0x800);
 		return;
 	}
 	counter += 1;
@@ -23,12 +23,10 @@ const tick = (now: number): void => {
  */
 export const newId = (now: number = Date.now()): string => {
 	tick(now);
-	const random = randomBytes(8);
-	random.writeUInt8((random.readUInt8(0) & 0x3f) | 0x80, 0);
 	const time = lastTime.toString(16).padStart(12, '0');
-	const tail = random.toString('hex');
 	const count = (0x7000 | counter).toString(16);
-	return `${time.slice(0, 8)}-${time.slice(8)}-${count}-${tail.slice(0, 4)}-${tail.slice(4)}`;
+	const variantAndRandom = randomUUID().slice(19);
+	return `${time.slice(0, 8)}-${time.slice(8)}-${count}-${variantAndRandom}`;
 };
 
 const pattern = /^[0-9a-f]{8}-[0-9a-f]{4}-7[0-9a-f]{3}-[89ab][0-9a-f]{3}-[0-9a-f]{12}$/;
