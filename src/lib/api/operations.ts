@@ -1,0 +1,101 @@
+import { analyseAnswerSchema, analyseRequestSchema } from './analyse';
+import { responseAnswerSchema, responseRequestSchema } from './response';
+import { catalogueListSchema, shapeListSchema, shapeQuerySchema, shapeSchema } from './shapes';
+import type { z } from './zod';
+
+/** One route of the API, told once for the description and the readable page. */
+export interface Operation {
+	readonly id: string;
+	readonly method: 'get' | 'post';
+	readonly path: string;
+	readonly title: string;
+	readonly description: string;
+	readonly query?: z.ZodObject;
+	readonly body?: z.ZodType;
+	readonly answer: z.ZodType | null;
+	/** What it may refuse with, besides 500. */
+	readonly refusals: readonly number[];
+}
+
+const compute = [400, 404, 413, 415, 422, 429] as const;
+
+/** Every route described so far. */
+export const operations: readonly Operation[] = [
+	{
+		id: 'analyse',
+		method: 'post',
+		path: '/api/v1/analyse',
+		title: 'Analyse a section',
+		description:
+			'Gross properties, first yield and full plastic, class of every plate, and the resistance that may be counted under the demands. Needs no account. A figure whose rule does not reach, or is not built, is null and a note says why.',
+		body: analyseRequestSchema,
+		answer: analyseAnswerSchema,
+		refusals: compute
+	},
+	{
+		id: 'response',
+		method: 'post',
+		path: '/api/v1/response',
+		title: 'Bend a section',
+		description:
+			'States of the section at imposed curvatures, curvature ratios, moments or strain planes, at constant N, about any axis. A state that cannot exist has converged false and null figures. Needs no account.',
+		body: responseRequestSchema,
+		answer: responseAnswerSchema,
+		refusals: compute
+	},
+	{
+		id: 'catalogues',
+		method: 'get',
+		path: '/api/v1/catalogues',
+		title: 'List the catalogues',
+		description: 'The catalogues of published shapes, with their families.',
+		answer: catalogueListSchema,
+		refusals: []
+	},
+	{
+		id: 'shapes',
+		method: 'get',
+		path: '/api/v1/shapes',
+		title: 'Find shapes',
+		description:
+			'One page of shapes. With q and no sort the best answers come first: "ipe 3", "w14x", "457x191x67".',
+		query: shapeQuerySchema,
+		answer: shapeListSchema,
+		refusals: [400]
+	},
+	{
+		id: 'shape',
+		method: 'get',
+		path: '/api/v1/shapes/{id}',
+		title: 'Read a shape',
+		description: 'Definition and computed properties of one shape.',
+		answer: shapeSchema,
+		refusals: [404]
+	},
+	{
+		id: 'shapeIndex',
+		method: 'get',
+		path: '/api/v1/shapes/index.json',
+		title: 'All shapes in brief',
+		description:
+			'Rows [id, designation, family, standard, mass in kg/m, h in mm, b in mm] for searching on the spot. Carries an ETag.',
+		answer: null,
+		refusals: []
+	}
+];
+
+/** What each status means, in a sentence. */
+export const refusalMeanings: Readonly<Record<number, string>> = {
+	400: 'The request is not JSON, or a field is wrong: issues name each one by its path.',
+	401: 'Sign in, or send a bearer token.',
+	403: 'Your role may not do this.',
+	404: 'There is nothing under this address or id.',
+	405: 'The address answers another method; the Allow header says which.',
+	409: 'Somebody saved in between: read again and repeat.',
+	413: 'The request is larger than the limit named in the message.',
+	415: 'Send content-type application/json.',
+	422: 'Well formed, but what it asks for does not exist, such as a version of a shape.',
+	429: 'Too many calculations in a minute; Retry-After says how long to wait.',
+	500: 'A fault on our side; id ties it to the log.',
+	503: 'The database cannot be reached at the moment.'
+};
