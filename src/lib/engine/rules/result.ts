@@ -1,3 +1,5 @@
+import type { Note } from '../result';
+
 /** The contract's demand: factored design effects, kN and kNm. */
 export interface Demand {
 	name?: string;
@@ -101,6 +103,8 @@ export interface DemandState {
 	/** Under the demand's N, without γM0. */
 	firstYield: number | null;
 	fullPlastic: number | null;
-	/** Greatest use of the checks made; null when one that applies is missing. */
+	/** Greatest use of the checks made; null when one that applies is missing or nothing acts. */
 	utilisation: number | null;
+	/** Checks that apply to this demand and are missing. */
+	missing: Note[];
 }

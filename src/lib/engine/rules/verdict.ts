@@ -66,7 +66,7 @@ export function verdict(
 		detailTokens,
 		countable: { moment: view?.ruler.countable ?? null, basis: view?.basis ?? null },
 		governing: view?.element?.part ?? null,
-		notChecked: notChecked(figures),
+		notChecked: notChecked(figures, view?.class ?? null),
 		status: statusOf(figures, named),
 		demand: state?.demand ?? null,
 		ruler: view?.ruler ?? bareRuler(figures)
@@ -130,7 +130,9 @@ function statusOf(figures: AnalysisFigures, named: DemandState | undefined): Ver
 	);
 	if (over) return 'fails';
 	const used = named ? named.utilisation : (resistance.utilisation?.value ?? null);
-	return used === null ? 'incomplete' : 'passes';
+	if (used !== null) return 'passes';
+	const asked = named ? [named] : demands;
+	return asked.some(({ missing }) => missing.length > 0) ? 'incomplete' : 'no-figure';
 }
 
 const uncheckedWords: Readonly<Record<string, string>> = {
@@ -145,7 +147,10 @@ const uncheckedWords: Readonly<Record<string, string>> = {
 	'code-not-built': 'class and resistance'
 };
 
-function notChecked({ notes }: AnalysisFigures): string[] {
-	const found = notes.flatMap(({ code }) => uncheckedWords[code] ?? []);
+/** Effective widths are missed only where the section stands in class 4. */
+function notChecked({ notes }: AnalysisFigures, standing: SectionClass | null): string[] {
+	const found = notes
+		.filter(({ code }) => code !== 'class-4-not-built' || standing === 4)
+		.flatMap(({ code }) => uncheckedWords[code] ?? []);
 	return [...new Set(found)];
 }

@@ -16,7 +16,7 @@ export function axialStrength(model: EnModel, plastic: boolean): number {
 /** The plastic forces of a hybrid balance about its gross centroid. */
 function isCentred({ mechanics }: EnModel): boolean {
 	const { groups, squash, reach } = mechanics;
-	const profiles = groupProfiles(mechanics, 0);
+	const profiles = mechanics.profiles(0);
 	const strength = groups.map(({ fy, fyc }) => Math.min(fy, fyc));
 	const about = (place: number) =>
 		profiles.reduce((sum, { total }, i) => sum + strength[i]! * total[place]!, 0);

@@ -21,9 +21,11 @@ export function classifyDemand(model: EnModel, cases: PureCases, effects: Effect
 	if (My === 0 && Mz === 0) return axialClass(model, cases, N);
 	if (N === 0 && My === 0)
 		return { classified: Mz > 0 ? cases.plusMz : cases.minusMz, basis: 'demand' };
-	const { mechanics, section, code } = model;
+	const { mechanics, section, strengths, code } = model;
 	const { gammaM0, classAlpha } = code;
-	const stress = stressCase({ mechanics, gross: section.gross, gammaM0, classAlpha }, effects);
+	const { hybrid } = strengths;
+	const source = { mechanics, gross: section.gross, gammaM0, classAlpha, hybrid };
+	const stress = stressCase(source, effects);
 	return { classified: classifySection(model.elements, stress, effects), basis: 'demand' };
 }
 

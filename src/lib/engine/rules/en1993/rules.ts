@@ -25,7 +25,6 @@ interface Judged {
 	readonly state: DemandState;
 	readonly classed: DemandClass;
 	readonly checks: ResistanceCheck[];
-	readonly missing: Note[];
 }
 
 /** All that the code says of a section and its demands. */
@@ -46,7 +45,7 @@ export function en1993Outcome(model: EnModel, demands: readonly Demand[]): EnOut
 			...shear.notes,
 			...holeNotes(model.section),
 			...interactionNotes(demands),
-			...judged.flatMap(({ missing }) => missing),
+			...judged.flatMap(({ state }) => state.missing),
 			...stabilityNotes(model.section, demands)
 		]
 	};
@@ -82,9 +81,10 @@ function judgeDemand(
 		N: effects.N,
 		...ruler,
 		countableBasis: ruler.countable === null ? null : alone.basis,
-		utilisation: greatest(used.checks, used.missing)?.value ?? null
+		utilisation: greatest(used.checks, used.missing)?.value ?? null,
+		missing: used.missing
 	};
-	return { state, classed, checks: used.checks, missing: used.missing };
+	return { state, classed, checks: used.checks };
 }
 
 function greatest(checks: readonly ResistanceCheck[], missing: readonly Note[]) {
@@ -138,7 +138,7 @@ function resistanceOf(
 		checks: judged.flatMap(({ checks }) => checks),
 		utilisation: greatest(
 			judged.flatMap(({ checks }) => checks),
-			judged.flatMap(({ missing }) => missing)
+			judged.flatMap(({ state }) => state.missing)
 		)
 	};
 }

@@ -28,6 +28,7 @@ export interface StressSource {
 	/** Multiplies N, so that block and first yield are at design strength. */
 	readonly gammaM0: number;
 	readonly classAlpha: 'actual-N' | 'proportional';
+	readonly hybrid: boolean;
 }
 
 const uniform = (sign: number): StressCase => ({ plastic: () => sign, elastic: () => sign });
@@ -52,6 +53,10 @@ export function pathOf({ N, My, Mz }: Effects, gammaM0: number): BendingPath {
 	return { axisAngle, transverse, N: N * gammaM0 };
 }
 
+/**
+ * A pull relieves the elastic stress of a plate; in a hybrid, whose weaker part yields early, that
+ * relief is not relied on.
+ */
 function actualCase(
 	source: StressSource,
 	effects: Effects,
@@ -62,7 +67,7 @@ function actualCase(
 	const yielding = effects.N === 0 ? size : firstYieldOf(source.mechanics, path).moment;
 	return caseFrom(source.gross, effects, {
 		plastic: compressedSide(source.gross, path.axisAngle, state),
-		axial: path.N,
+		axial: source.hybrid && path.N > 0 ? 0 : path.N,
 		grown: yielding === null ? null : yielding / size
 	});
 }
