@@ -1,12 +1,14 @@
 import { sequence } from '@sveltejs/kit/hooks';
 import type { Handle, HandleServerError, ServerInit } from '@sveltejs/kit';
+import { handleAuth } from '$lib/server/auth';
 import { startUp } from '$lib/server/start-up';
 import { handleRequestId } from '$lib/server/handle-request-id';
+import { handleLoopback } from '$lib/server/loopback';
 import { log } from '$lib/server/log';
 
 export const init: ServerInit = startUp;
 
-export const handle: Handle = sequence(handleRequestId);
+export const handle: Handle = sequence(handleRequestId, handleLoopback, handleAuth);
 
 export const handleError: HandleServerError = ({ error, event, status, message }) => {
 	const id = event.locals.requestId;

@@ -27,8 +27,8 @@ const sweep = async () => {
 };
 
 /**
- * A database server that lives as long as a test run and is then wiped.
- * @returns {Promise<{ url: string, port: number, pid: number, release: () => Promise<void> }>}
+ * A database server that lives as long as a test run and is then wiped. `kill` and `revive` are for
+ * tests of what happens meanwhile; it comes back at the same port with what was committed.
  */
 export const openPassingDatabase = async () => {
 	mkdirSync(place, { recursive: true });
@@ -37,13 +37,19 @@ export const openPassingDatabase = async () => {
 	const owner = { pid: process.pid, birth: birthOf(process.pid) };
 	const remember = (server = {}) =>
 		writeFileSync(path.join(home, 'owner.json'), JSON.stringify({ ...owner, server }));
+	const start = async (/** @type {number | undefined} */ port) => {
+		const { onExit: _, ...server } = await startServer({ home, purpose: 'test', port });
+		remember(server);
+		return server;
+	};
 	remember();
-	const { onExit: _, ...server } = await startServer({ home, purpose: 'test' });
-	remember(server);
+	let server = await start(undefined);
 	return {
 		url: databaseUrl(home, server.port),
-		port: server.port,
-		pid: server.pid,
+		kill: () => stopProcess(server, 0),
+		revive: async () => {
+			server = await start(server.port);
+		},
 		release: async () => {
 			await stopProcess(server, 1000);
 			rmSync(home, { recursive: true, force: true });

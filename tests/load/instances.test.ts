@@ -1,26 +1,21 @@
 import { createConnection, type RowDataPacket } from 'mysql2/promise';
-import { afterEach, beforeEach, expect, inject, test } from 'vitest';
+import { afterAll, beforeAll, expect, inject, test } from 'vitest';
 import { startInstance, type Instance } from '../setup/instance';
 import { openFreshDatabase } from '../setup/test-database';
 
 let database: Awaited<ReturnType<typeof openFreshDatabase>>;
-let instances: Instance[];
+let instances: Instance[] = [];
 
-beforeEach(async () => {
-	instances = [];
+beforeAll(async () => {
 	database = await openFreshDatabase(inject('databaseUrl'));
+	const env = { DATABASE_URL: database.url };
+	instances = await Promise.all([startInstance(env), startInstance(env)]);
 });
 
-afterEach(async () => {
+afterAll(async () => {
 	await Promise.all(instances.map((instance) => instance.stop()));
 	await database.release();
 });
-
-const startTwo = async () => {
-	const env = { DATABASE_URL: database.url };
-	instances = await Promise.all([startInstance(env), startInstance(env)]);
-	return instances;
-};
 
 const rows = async (sql: string) => {
 	const connection = await createConnection(database.url);
@@ -34,7 +29,7 @@ const rows = async (sql: string) => {
 
 test('two instances started at once on an empty database are both healthy', async () => {
 	const answers = await Promise.all(
-		(await startTwo()).map(({ url }) => fetch(`${url}/api/v1/health`))
+		instances.map(({ url }) => fetch(`${url}/api/v1/health`))
 	);
 	expect(answers.map(({ status }) => status)).toEqual([200, 200]);
 	const bodies = await Promise.all(answers.map((answer) => answer.json()));
@@ -42,7 +37,6 @@ test('two instances started at once on an empty database are both healthy', asyn
 });
 
 test('every table is InnoDB and has a primary key', async () => {
-	await startTwo();
 	const tables = await rows(
 		`SELECT t.table_name AS name, t.engine AS engine, count(k.column_name) AS keyed
 		FROM information_schema.tables t
@@ -55,7 +49,7 @@ test('every table is InnoDB and has a primary key', async () => {
 });
 
 test('an instance ends within three seconds of SIGTERM, with its pool and a connection open', async () => {
-	const [instance] = await startTwo();
+	const [instance] = instances;
 	if (!instance) throw new Error('no instance');
 	await fetch(`${instance.url}/api/v1/health`);
 	const asked = performance.now();

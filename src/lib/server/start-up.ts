@@ -6,6 +6,7 @@ import { databaseFailure, isDatabaseAway } from './db/failure';
 import { migrate } from './db/migrate';
 import { migrationsFolder, readMigrations } from './db/migrations';
 import { log } from './log';
+import { seed } from './seed';
 
 /** Ends the process with sentences that a person can act on. */
 const refuse = (sentences: readonly string[]): never => {
@@ -49,7 +50,7 @@ const explain = (error: unknown): string => {
 	return `The database could not be brought up to date: ${reason}`;
 };
 
-/** Once per process, before the first request: settings, database level, orderly end. */
+/** Once per process, before the first request: settings, database level and contents, orderly end. */
 export const startUp = async (): Promise<void> => {
 	if (building) return;
 	const { databaseUrl } = checkedConfig();
@@ -57,6 +58,7 @@ export const startUp = async (): Promise<void> => {
 	try {
 		const applied = await migrateWithPatience(databaseUrl);
 		if (applied.length > 0) log.info({ applied }, 'database brought up to date');
+		await seed();
 	} catch (error) {
 		log.fatal({ err: error }, 'start-up failed');
 		refuse([explain(error)]);
