@@ -14,6 +14,7 @@ export const foldedName = (text: string) =>
 		);
 
 const wideFlange = /^HE (\d+) ([A-Z]+)$/;
+const lightBeam = /^IPE A (\d+)$/;
 const lettersFirst = /^([A-Z]+(?: [A-Z]+)*) ([\d.x×/-]+)$/;
 
 /**
@@ -23,6 +24,8 @@ const lettersFirst = /^([A-Z]+(?: [A-Z]+)*) ([\d.x×/-]+)$/;
 export const shapeAliases = (designation: string): string[] => {
 	const wide = wideFlange.exec(designation);
 	if (wide) return [`HE${wide[2]} ${wide[1]}`];
+	const light = lightBeam.exec(designation);
+	if (light) return [`IPEA ${light[1]}`, `IPE ${light[1]} A`];
 	const first = lettersFirst.exec(designation);
 	return first ? [`${first[2]} ${first[1]}`] : [];
 };
