@@ -53,3 +53,12 @@ const broken: ErrorWords = {
 
 export const errorWords = (status: number): ErrorWords =>
 	known[status] ?? (status < 500 ? refused : broken);
+
+/** What the framework says when a route said nothing of its own. */
+const unsaid = ['Not Found', 'Internal Error', 'Unauthorized', 'Forbidden'];
+
+/** The route's own sentence, if it wrote one; nothing of a fault inside the server. */
+export function errorDetail(status: number, message: string | undefined): string | undefined {
+	if (status >= 500 || !message || unsaid.includes(message)) return undefined;
+	return message;
+}

@@ -1,3 +1,5 @@
+import { createClocks } from './toast-clock';
+
 /** One thing just done, told in passing; `undo` takes it back. */
 export interface Toast {
 	id: number;
@@ -12,21 +14,16 @@ const SHOWN_LONG_MS = 20_000;
 
 let nextId = 1;
 let shown = $state.raw<readonly Toast[]>([]);
-const timers = new Map<number, ReturnType<typeof setTimeout>>();
+const clocks = createClocks();
 
 function dismiss(id: number) {
-	clearTimeout(timers.get(id));
-	timers.delete(id);
+	clocks.stop(id);
 	shown = shown.filter((toast) => toast.id !== id);
 }
 
 function startClock(toast: Toast) {
 	const time = toast.undo || toast.kind === 'error' ? SHOWN_LONG_MS : SHOWN_MS;
-	clearTimeout(timers.get(toast.id));
-	timers.set(
-		toast.id,
-		setTimeout(() => dismiss(toast.id), time)
-	);
+	clocks.start(toast.id, time, () => dismiss(toast.id));
 }
 
 /** Messages at the foot of the screen. Call `show` from events only: the list is the browser's. */
@@ -43,7 +40,7 @@ export const toasts = {
 	dismiss,
 	/** Stops the clocks while someone reads or reaches for a button. */
 	hold() {
-		for (const timer of timers.values()) clearTimeout(timer);
+		for (const toast of shown) clocks.stop(toast.id);
 	},
 	release() {
 		for (const toast of shown) startClock(toast);

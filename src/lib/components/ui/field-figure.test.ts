@@ -1,0 +1,16 @@
+import { expect, it } from 'vitest';
+import { fieldFigure } from './field-figure';
+
+const si = { system: 'si', decimal: 'point' } as const;
+const us = { system: 'us', decimal: 'point' } as const;
+
+it('shows what was typed to its last place', () => {
+	expect(fieldFigure(1234.5678, 'length', si, { digits: 5 })).toBe('1234.5678');
+	expect(fieldFigure(400, 'length', si, { digits: 5 })).toBe('400');
+	expect(fieldFigure(9.525, 'length', us, { digits: 5 })).toBe('0.375');
+});
+
+it('rounds what a conversion or a calculation left long', () => {
+	expect(fieldFigure(400, 'length', us, { digits: 5 })).toBe('15.748');
+	expect(fieldFigure(1000 / 3, 'length', si, { digits: 6 })).toBe('333.333');
+});
