@@ -6,7 +6,7 @@
 import { frameAt } from '../../src/lib/engine/geometry/frame';
 import { profileOf, widthAt } from '../../src/lib/engine/geometry/profile';
 import { bending } from '../../src/lib/engine/response/respond';
-import { groupProfiles, mechanicsOf } from '../../src/lib/engine/response/law-groups';
+import { mechanicsOf } from '../../src/lib/engine/response/law-groups';
 import { planeForces } from '../../src/lib/engine/response/plane-forces';
 import { prepareSection } from '../../src/lib/engine/section/prepare';
 import { ms, printTable, timed } from './table';
@@ -24,7 +24,7 @@ const prepared = prepareSection({
 if (!prepared.ok) throw new Error(JSON.stringify(prepared.error));
 const section = prepared.value;
 const mechanics = mechanicsOf(section);
-const profiles = groupProfiles(mechanics, 0);
+const profiles = mechanics.profiles(0);
 const bent = bending(section, { axisAngle: 0, transverse: 'moment-zero', N: 0 });
 const unit = bent.firstYield.curvature!;
 const { fy, E } = section.parts[0]!.material;

@@ -1,4 +1,4 @@
-import type { ArcEdge, Edge, LineEdge, Loop } from './boundary';
+import type { ArcEdge, LineEdge, Loop } from './boundary';
 import { acrossOf, alongOf, type Frame } from './frame';
 
 /**
@@ -29,56 +29,70 @@ export interface ArcFlank {
 	readonly side: 1 | -1;
 }
 
-/** The flanks of a loop in a frame; stretches along the axis bound no area change and drop out. */
-export function flanksOf(loop: Loop, frame: Frame): Flank[] {
-	return loop.flatMap((edge) => edgeFlanks(edge, frame));
+/** The flanks of loops in a frame; stretches along the axis bound no area change and drop out. */
+export function flanksOf(loops: readonly Loop[], frame: Frame): Flank[] {
+	const out: Flank[] = [];
+	const turn = Math.atan2(frame.sin, frame.cos);
+	for (const loop of loops) {
+		for (const edge of loop) {
+			if (edge.kind === 'line') addLineFlank(out, edge, frame);
+			else addArcFlanks(out, edge, frame, turn);
+		}
+	}
+	return out;
 }
 
-function edgeFlanks(edge: Edge, frame: Frame): Flank[] {
-	return edge.kind === 'line' ? lineFlank(edge, frame) : arcFlanks(edge, frame);
-}
-
-function lineFlank({ from, to }: LineEdge, frame: Frame): LineFlank[] {
-	const [a, b] = [acrossOf(frame, from), acrossOf(frame, to)];
-	if (a === b) return [];
-	const [along, alongEnd] = [alongOf(frame, from), alongOf(frame, to)];
-	const slope = (alongEnd - along) / (b - a);
-	if (Math.abs(slope) > steepest) return [];
-	return a < b
-		? [{ kind: 'line', sign: 1, low: a, high: b, start: along, slope }]
-		: [{ kind: 'line', sign: -1, low: b, high: a, start: alongEnd, slope }];
+function addLineFlank(out: Flank[], { from, to }: LineEdge, frame: Frame): void {
+	const a = acrossOf(frame, from);
+	const b = acrossOf(frame, to);
+	if (a === b) return;
+	const start = alongOf(frame, from);
+	const end = alongOf(frame, to);
+	const slope = (end - start) / (b - a);
+	if (Math.abs(slope) > steepest) return;
+	if (a < b) out.push({ kind: 'line', sign: 1, low: a, high: b, start, slope });
+	else out.push({ kind: 'line', sign: -1, low: b, high: a, start: end, slope });
 }
 
 /** A line flatter than this against the axis is taken as lying along it. */
 const steepest = 1e13;
 
-function arcFlanks({ centre, radius, start, sweep }: ArcEdge, frame: Frame): ArcFlank[] {
-	if (radius === 0 || sweep === 0) return [];
-	const turned = start - Math.atan2(frame.sin, frame.cos);
-	const [along, across] = [alongOf(frame, centre), acrossOf(frame, centre)];
-	const turns = turningAngles(turned, turned + sweep);
-	return turns.slice(1).flatMap((to, i): ArcFlank[] => {
-		const from = turns[i]!;
-		const [a, b] = [across + radius * sine(from), across + radius * sine(to)];
-		if (a === b) return [];
+function addArcFlanks(out: Flank[], arc: ArcEdge, frame: Frame, turn: number): void {
+	const { radius, sweep } = arc;
+	if (radius === 0 || sweep === 0) return;
+	const along = alongOf(frame, arc.centre);
+	const across = acrossOf(frame, arc.centre);
+	const last = arc.start - turn + sweep;
+	let from = arc.start - turn;
+	while (from !== last) {
+		const to = nextTurn(from, last);
+		const a = across + radius * sine(from);
+		const b = across + radius * sine(to);
 		const side = Math.cos((from + to) / 2) > 0 ? 1 : -1;
-		const common = { kind: 'arc', along, across, radius, side } as const;
-		return a < b
-			? [{ ...common, sign: 1, low: a, high: b }]
-			: [{ ...common, sign: -1, low: b, high: a }];
-	});
+		if (a < b) out.push({ kind: 'arc', along, across, radius, side, sign: 1, low: a, high: b });
+		else if (a > b)
+			out.push({ kind: 'arc', along, across, radius, side, sign: -1, low: b, high: a });
+		from = to;
+	}
 }
 
-/** Start, end and every angle between where the arc turns back (±90°). */
-function turningAngles(from: number, to: number): number[] {
-	const [low, high] = from < to ? [from, to] : [to, from];
+/** Where an arc next turns back (at ±90°) on its way from one angle to another, or its end. */
+function nextTurn(from: number, to: number): number {
 	const half = Math.PI / 2;
-	const between: number[] = [];
-	for (let k = Math.ceil((low - half) / Math.PI); half + k * Math.PI < high; k++) {
-		const turn = half + k * Math.PI;
-		if (turn - low > 1e-14 && high - turn > 1e-14) between.push(turn);
+	const least = 1e-14;
+	if (to > from) {
+		const turn = half + Math.ceil((from + least - half) / Math.PI) * Math.PI;
+		return turn - from > least && to - turn > least ? turn : afterTurn(turn, from, to);
 	}
-	return from < to ? [low, ...between, high] : [high, ...between.reverse(), low];
+	const turn = half + Math.floor((from - least - half) / Math.PI) * Math.PI;
+	return from - turn > least && turn - to > least ? turn : afterTurn(turn, from, to);
+}
+
+/** A turn at the very start of the arc is passed over. */
+function afterTurn(turn: number, from: number, to: number): number {
+	if (Math.abs(turn - from) > 1e-14) return to;
+	const next = turn + Math.sign(to - from) * Math.PI;
+	return (to - next) * Math.sign(to - from) > 1e-14 ? next : to;
 }
 
 /** Sine, exact at quarter turns, so that a root fillet ends where its flange begins. */
@@ -86,5 +100,7 @@ function sine(angle: number): number {
 	const quarter = angle / (Math.PI / 2);
 	const whole = Math.round(quarter);
 	if (Math.abs(quarter - whole) > 1e-14) return Math.sin(angle);
-	return [0, 1, 0, -1][((whole % 4) + 4) % 4]!;
+	return quarterSines[((whole % 4) + 4) % 4]!;
 }
+
+const quarterSines = [0, 1, 0, -1] as const;

@@ -22,13 +22,11 @@ export interface AreaMoments {
 export function regionMoments(region: Region, origin: Point = { y: 0, z: 0 }): AreaMoments {
 	const frame = frameAt(origin, 0);
 	const out = new Float64Array(momentCount);
-	for (const loop of region.loops) {
-		for (const flank of flanksOf(loop, frame)) {
-			if (flank.kind === 'line') addLineMoments(out, flank, flank.low, flank.high, flank.sign);
-			else {
-				addArcAntiderivative(out, flank, flank.high, flank.sign);
-				addArcAntiderivative(out, flank, flank.low, -flank.sign);
-			}
+	for (const flank of flanksOf(region.loops, frame)) {
+		if (flank.kind === 'line') addLineMoments(out, flank, flank.low, flank.high, flank.sign);
+		else {
+			addArcAntiderivative(out, flank, flank.high, flank.sign);
+			addArcAntiderivative(out, flank, flank.low, -flank.sign);
 		}
 	}
 	const [area, firstY, firstZ, secondY, product, secondZ] = out as unknown as SixNumbers;

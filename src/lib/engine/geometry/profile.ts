@@ -1,13 +1,7 @@
 import type { Loop } from './boundary';
 import type { Frame } from './frame';
 import { flanksOf, type ArcFlank, type Flank, type LineFlank } from './flank';
-import {
-	addArcAntiderivative,
-	addLineMoments,
-	gaussPoint,
-	momentCount,
-	type Moments
-} from './flank-moments';
+import { addArcAntiderivative, gaussPoint, momentCount, type Moments } from './flank-moments';
 
 /**
  * A body of steel seen along one direction: between two neighbouring levels its slices are bounded
@@ -36,15 +30,14 @@ const coefficients = 9;
 
 /** Prepares loops (outer anticlockwise, holes clockwise) for cuts along the frame's axis. */
 export function profileOf(loops: readonly Loop[], frame: Frame): Profile {
-	const flanks = loops.flatMap((loop) => flanksOf(loop, frame));
+	const flanks = flanksOf(loops, frame);
 	const levels = distinctLevels(flanks);
 	const slabs = Math.max(0, levels.length - 1);
-	const below = new Float64Array(levels.length * momentCount);
 	const lines = new Float64Array(slabs * coefficients);
-	const arcs: SlabArc[][] = Array.from({ length: slabs }, () => []);
-	const within = new Float64Array(slabs * momentCount);
-	for (const flank of flanks) spreadFlank(flank, levels, lines, arcs, within);
-	for (let i = 0; i < slabs * momentCount; i++) below[i + momentCount] = below[i]! + within[i]!;
+	const arcs: SlabArc[][] = [];
+	for (let slab = 0; slab < slabs; slab++) arcs.push([]);
+	for (const flank of flanks) spreadFlank(flank, levels, lines, arcs);
+	const below = sumsBelow(levels, lines, arcs);
 	return {
 		levels,
 		below,
@@ -57,31 +50,65 @@ export function profileOf(loops: readonly Loop[], frame: Frame): Profile {
 }
 
 function distinctLevels(flanks: readonly Flank[]): Float64Array {
-	const ends = Float64Array.from(flanks.flatMap(({ low, high }) => [low, high])).sort();
-	return ends.filter((level, i) => i === 0 || level !== ends[i - 1]);
+	const ends = new Float64Array(2 * flanks.length);
+	for (let i = 0; i < flanks.length; i++) {
+		ends[2 * i] = flanks[i]!.low;
+		ends[2 * i + 1] = flanks[i]!.high;
+	}
+	ends.sort();
+	let count = 0;
+	for (let i = 0; i < ends.length; i++) {
+		if (i === 0 || ends[i] !== ends[count - 1]) ends[count++] = ends[i]!;
+	}
+	return ends.slice(0, count);
 }
 
 function spreadFlank(
 	flank: Flank,
 	levels: Float64Array,
 	lines: Float64Array,
-	arcs: SlabArc[][],
-	within: Float64Array
+	arcs: SlabArc[][]
 ): void {
 	for (let slab = slabAt(levels, flank.low); slab < arcs.length; slab++) {
-		const [low, high] = [levels[slab]!, levels[slab + 1]!];
+		const low = levels[slab]!;
 		if (low >= flank.high) return;
-		const out = within.subarray(slab * momentCount, (slab + 1) * momentCount);
-		if (flank.kind === 'line') {
-			addLineMoments(out, flank, low, high, flank.sign);
-			addLineCoefficients(lines, slab * coefficients, flank, low);
-		} else {
+		if (flank.kind === 'line') addLineCoefficients(lines, slab * coefficients, flank, low);
+		else {
 			const atLow = new Float64Array(momentCount);
 			addArcAntiderivative(atLow, flank, low, 1);
-			addArcAntiderivative(out, flank, high, flank.sign);
-			for (let i = 0; i < momentCount; i++) out[i]! -= flank.sign * atLow[i]!;
 			arcs[slab]!.push({ arc: flank, atLow });
 		}
+	}
+}
+
+/** Moments of all steel below each level. */
+function sumsBelow(
+	levels: Float64Array,
+	lines: Float64Array,
+	arcs: readonly (readonly SlabArc[])[]
+): Float64Array {
+	const below = new Float64Array(levels.length * momentCount);
+	const out = new Float64Array(momentCount);
+	for (let slab = 0; slab < arcs.length; slab++) {
+		addSlab(out, levels, lines, arcs, slab, levels[slab + 1]!);
+		below.set(out, (slab + 1) * momentCount);
+	}
+	return below;
+}
+
+/** Adds what lies in a slab up to a level. */
+function addSlab(
+	out: Moments,
+	levels: Float64Array,
+	lines: Float64Array,
+	arcs: readonly (readonly SlabArc[])[],
+	slab: number,
+	level: number
+): void {
+	addSlabLines(out, lines, slab * coefficients, levels[slab]!, level - levels[slab]!);
+	for (const { arc, atLow } of arcs[slab]!) {
+		addArcAntiderivative(out, arc, level, arc.sign);
+		for (let i = 0; i < momentCount; i++) out[i]! -= arc.sign * atLow[i]!;
 	}
 }
 
@@ -124,12 +151,7 @@ export function momentsBelow(profile: Profile, level: number, out: Moments): voi
 		return;
 	}
 	for (let i = 0; i < momentCount; i++) out[i] = below[slab * momentCount + i]!;
-	if (slab >= arcs.length) return;
-	addSlabLines(out, lines, slab * coefficients, levels[slab]!, level - levels[slab]!);
-	for (const { arc, atLow } of arcs[slab]!) {
-		addArcAntiderivative(out, arc, level, arc.sign);
-		for (let i = 0; i < momentCount; i++) out[i]! -= arc.sign * atLow[i]!;
-	}
+	if (slab < arcs.length) addSlab(out, levels, lines, arcs, slab, level);
 }
 
 function addSlabLines(

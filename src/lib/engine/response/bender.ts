@@ -1,6 +1,6 @@
 import { equilibrium } from '../tolerances';
 import type { Profile } from '../geometry/profile';
-import { groupProfiles, type Mechanics } from './law-groups';
+import type { Mechanics } from './law-groups';
 import { planeForces, type PlaneForces } from './plane-forces';
 import { risingRoot } from './rising-root';
 import type { Transverse } from './state';
@@ -24,24 +24,18 @@ export interface Bender {
 	/** Radians from y. */
 	readonly angle: number;
 	evaluate(e0: number, curvature: number, turn: number): PlaneForces;
-	profiles(curvature: number, turn: number): { profiles: Profile[]; turned: number; size: number };
+	profiles(
+		curvature: number,
+		turn: number
+	): { profiles: readonly Profile[]; turned: number; size: number };
 }
 
 /** Strain planes about an axis at `angle` radians, any transverse curvature. */
 export function bender(mechanics: Mechanics, angle: number): Bender {
-	let turnedBy = 0;
-	let current = groupProfiles(mechanics, angle);
 	const profiles = (curvature: number, turn: number) => {
 		const turned = turn === 0 ? 0 : Math.atan2(turn, curvature);
-		if (turned !== turnedBy) {
-			current = groupProfiles(mechanics, angle + turned);
-			turnedBy = turned;
-		}
-		return {
-			profiles: current,
-			turned,
-			size: turn === 0 ? curvature : Math.hypot(curvature, turn)
-		};
+		const size = turn === 0 ? curvature : Math.hypot(curvature, turn);
+		return { profiles: mechanics.profiles(angle + turned), turned, size };
 	};
 	const evaluate = (e0: number, curvature: number, turn: number) => {
 		const seen = profiles(curvature, turn);

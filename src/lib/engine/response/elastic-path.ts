@@ -1,7 +1,6 @@
-import type { Loop } from '../geometry/boundary';
 import { extentAcross } from '../geometry/bounds';
 import { frameAt } from '../geometry/frame';
-import { groupProfiles, type Mechanics } from './law-groups';
+import type { Mechanics } from './law-groups';
 import type { Transverse } from './state';
 
 /** Elastic strain planes about an axis at constant N: e0 and turn are straight lines in the curvature. */
@@ -23,7 +22,7 @@ interface Stiffness {
 /** Elastic stiffness about the gross centroid in the frame of the axis, each body with its own E. */
 function elasticStiffness(mechanics: Mechanics, angle: number): Stiffness {
 	const sum: Stiffness = { NN: 0, NM: 0, NT: 0, MM: 0, MT: 0, TT: 0 };
-	groupProfiles(mechanics, angle).forEach(({ total }, i) => {
+	mechanics.profiles(angle).forEach(({ total }, i) => {
 		const E = mechanics.groups[i]!.modulus;
 		sum.NN += E * total[0]!;
 		sum.NM -= E * total[1]!;
@@ -68,19 +67,25 @@ export function elasticPath(
 
 /** Largest strain of a plane over what each body bears elastically; 1 at first yield. */
 export function elasticUse(
-	{ groups, centroid }: Mechanics,
+	mechanics: Mechanics,
 	angle: number,
 	e0: number,
 	curvature: number,
 	turn: number
 ): number {
-	const size = Math.hypot(curvature, turn);
-	const frame = frameAt(centroid, angle + (size === 0 ? 0 : Math.atan2(turn, curvature)));
-	const use = (loops: readonly Loop[], tension: number, compression: number) => {
-		const { low, high } = extentAcross(loops, frame);
-		return Math.max((e0 - size * low) / tension, (size * high - e0) / compression);
-	};
-	return Math.max(
-		...groups.map(({ loops, law }) => use(loops, law.yieldTension, law.yieldCompression))
-	);
+	const size = turn === 0 ? curvature : Math.hypot(curvature, turn);
+	const extents = bodyExtents(mechanics, angle, turn === 0 ? 0 : Math.atan2(turn, curvature));
+	let use = -Infinity;
+	mechanics.groups.forEach(({ law }, i) => {
+		const { low, high } = extents[i]!;
+		const tension = (e0 - size * low) / law.yieldTension;
+		use = Math.max(use, tension, (size * high - e0) / law.yieldCompression);
+	});
+	return use;
+}
+
+function bodyExtents(mechanics: Mechanics, angle: number, turned: number) {
+	if (turned === 0) return mechanics.profiles(angle);
+	const frame = frameAt(mechanics.centroid, angle + turned);
+	return mechanics.groups.map(({ loops }) => extentAcross(loops, frame));
 }

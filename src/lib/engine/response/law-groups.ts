@@ -29,27 +29,31 @@ export interface Mechanics {
 	readonly squash: number;
 	/** mm: largest distance of the bounding box's corners from the centroid. */
 	readonly reach: number;
+	/** The groups seen along the normal of an axis turned by an angle (radians from y). */
+	readonly profiles: (angle: number) => readonly Profile[];
 }
 
-/** One law for every part instead of the parts' own, when asked. */
 export function mechanicsOf(section: PreparedSection): Mechanics {
 	const groups = lawGroups(section);
 	const { centroid, area } = section.gross;
 	const { left, right, bottom, top } = section.bounds;
+	const profiles = turnedProfiles(groups, centroid);
+	const upright = profiles(0);
 	return {
 		groups,
 		centroid,
 		area,
-		squash: groups.reduce((sum, g) => sum + groupArea(g, centroid) * Math.min(g.fy, g.fyc), 0),
+		profiles,
+		squash: groups.reduce(
+			(sum, { fy, fyc }, i) => sum + upright[i]!.total[0]! * Math.min(fy, fyc),
+			0
+		),
 		reach: Math.hypot(
 			Math.max(right - centroid.y, centroid.y - left),
 			Math.max(top - centroid.z, centroid.z - bottom)
 		)
 	};
 }
-
-const groupArea = ({ loops }: LawGroup, centroid: Point): number =>
-	profileOf(loops, frameAt(centroid, 0)).total[0]!;
 
 function lawGroups({ parts }: PreparedSection): LawGroup[] {
 	const found: { material: Material; loops: Loop[] }[] = [];
@@ -97,8 +101,16 @@ function cutsOf({ kinks, offsets, slopes }: StressStrainLaw) {
 	};
 }
 
-/** The groups seen along the normal of an axis turned `angle` radians from y. */
-export function groupProfiles({ groups, centroid }: Mechanics, angle: number): Profile[] {
-	const frame = frameAt(centroid, angle);
-	return groups.map(({ loops }) => profileOf(loops, frame));
+/** Profiles by angle; the few last asked for are kept, since one analysis asks for the same again. */
+function turnedProfiles(groups: readonly LawGroup[], centroid: Point) {
+	const kept = new Map<number, readonly Profile[]>();
+	return (angle: number): readonly Profile[] => {
+		const known = kept.get(angle);
+		if (known) return known;
+		const frame = frameAt(centroid, angle);
+		const made = groups.map(({ loops }) => profileOf(loops, frame));
+		if (kept.size >= 8) kept.clear();
+		kept.set(angle, made);
+		return made;
+	};
 }

@@ -2,7 +2,7 @@ import { momentCount } from '../geometry/flank-moments';
 import { momentsBelow, type Profile } from '../geometry/profile';
 import { weightedLevel } from '../geometry/weighted-level';
 import type { PreparedSection } from '../section/prepared';
-import { groupProfiles, mechanicsOf, type Mechanics } from './law-groups';
+import { mechanicsOf, type Mechanics } from './law-groups';
 import type { BendingPath, NeutralAxis } from './state';
 
 const radians = Math.PI / 180;
@@ -58,7 +58,7 @@ export function neutralAxisAt(degrees: number, level: number): NeutralAxis {
 
 function plasticForces(mechanics: Mechanics, angle: number, N: number): PlasticForces | null {
 	const { groups } = mechanics;
-	const profiles = groupProfiles(mechanics, angle);
+	const profiles = mechanics.profiles(angle);
 	const crushed = profiles.reduce((sum, p, i) => sum + groups[i]!.fyc * p.total[0]!, 0);
 	const stretched = profiles.reduce((sum, p, i) => sum + groups[i]!.fy * p.total[0]!, 0);
 	const slack = 1e-12 * (crushed + stretched);
@@ -134,8 +134,7 @@ export function fullPlastic(section: PreparedSection) {
 /** Squash load, kN: every part at its own compressive strength. */
 export function squashLoad(section: PreparedSection): number {
 	const mechanics = mechanicsOf(section);
-	return groupProfiles(mechanics, 0).reduce(
-		(sum, { total }, i) => sum + mechanics.groups[i]!.fyc * total[0]! * 1e-3,
-		0
-	);
+	return mechanics
+		.profiles(0)
+		.reduce((sum, { total }, i) => sum + mechanics.groups[i]!.fyc * total[0]! * 1e-3, 0);
 }

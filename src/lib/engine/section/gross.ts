@@ -2,6 +2,7 @@ import type { Loop, Point } from '../geometry/boundary';
 import { loopBounds } from '../geometry/bounds';
 import { frameAt } from '../geometry/frame';
 import { momentCount } from '../geometry/flank-moments';
+import { regionMoments } from '../geometry/moments';
 import { momentsBelow, profileOf, type Profile } from '../geometry/profile';
 import { weightedLevel } from '../geometry/weighted-level';
 import type { GrossProperties, Part } from './prepared';
@@ -56,10 +57,10 @@ export function grossProperties(parts: readonly Part[], extra: GrossExtra): Gros
 export function areaCentroid(loops: readonly Loop[]): Point {
 	const { left, right, bottom, top } = loopBounds(loops);
 	const middle = { y: (left + right) / 2, z: (bottom + top) / 2 };
-	const { total } = profileOf(loops, frameAt(middle, 0));
+	const { area, firstY, firstZ } = regionMoments({ loops }, middle);
 	const size = Math.hypot(right - left, top - bottom);
-	const offset = (first: number) => withoutNoise(first / total[0]!, size);
-	return { y: middle.y + offset(total[2]!), z: middle.z + offset(total[1]!) };
+	const offset = (first: number) => withoutNoise(first / area, size);
+	return { y: middle.y + offset(firstZ), z: middle.z + offset(firstY) };
 }
 
 /** Rounding that is left where symmetry makes a value zero is taken as zero. */
@@ -67,8 +68,9 @@ const withoutNoise = (value: number, scale: number): number =>
 	Math.abs(value) < 1e-14 * scale ? 0 : value;
 
 function partMass({ region, material }: Part): number {
-	const { total } = profileOf(region.loops, frameAt(areaCentroid(region.loops), 0));
-	return total[0]! * material.density * 1e-6;
+	const { left, right, bottom, top } = loopBounds(region.loops);
+	const middle = { y: (left + right) / 2, z: (bottom + top) / 2 };
+	return regionMoments(region, middle).area * material.density * 1e-6;
 }
 
 function principalMoments(Iy: number, Iz: number, Iyz: number) {

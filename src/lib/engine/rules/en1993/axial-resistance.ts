@@ -1,4 +1,4 @@
-import { groupProfiles } from '../../response/law-groups';
+import { regionMoments } from '../../geometry/moments';
 import type { EnModel } from './model';
 
 /**
@@ -14,11 +14,13 @@ export function axialStrength(model: EnModel, plastic: boolean): number {
 }
 
 /** The plastic forces of a hybrid balance about its gross centroid. */
-function isCentred({ mechanics }: EnModel): boolean {
-	const { groups, squash, reach } = mechanics;
-	const profiles = mechanics.profiles(0);
-	const strength = groups.map(({ fy, fyc }) => Math.min(fy, fyc));
-	const about = (place: number) =>
-		profiles.reduce((sum, { total }, i) => sum + strength[i]! * total[place]!, 0);
-	return Math.hypot(about(1), about(2)) <= 1e-9 * squash * reach;
+function isCentred({ section, mechanics }: EnModel): boolean {
+	let [aboutY, aboutZ] = [0, 0];
+	for (const { region, material } of section.parts) {
+		const { firstY, firstZ } = regionMoments(region, section.gross.centroid);
+		const strength = Math.min(material.fy, material.fyc);
+		aboutY += strength * firstY;
+		aboutZ += strength * firstZ;
+	}
+	return Math.hypot(aboutY, aboutZ) <= 1e-9 * mechanics.squash * mechanics.reach;
 }
