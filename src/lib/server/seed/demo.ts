@@ -47,7 +47,8 @@ const insertFirm = (hash: string): Promise<void> =>
 		for (const section of demoSections) await insertDemoSection(tx, firmId, crew, section);
 	});
 
-const demoStands = async (): Promise<boolean> => {
+/** Whether the demo firm is in the database. */
+export const demoStands = async (): Promise<boolean> => {
 	const rows = await db().select({ id: firms.id }).from(firms).where(eq(firms.demo, true)).limit(1);
 	return rows.length > 0;
 };
