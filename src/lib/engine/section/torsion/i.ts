@@ -30,8 +30,8 @@ export function iTorsion(sizes: Flanged, fabrication: Fabrication): TorsionFigur
 /**
  * Rolled I, mm⁴: walls as bt³/3, less 0.105t⁴ at each free flange end, plus the junctions.
  * The default junction is El Darwish & Johnston's (1965), which the UK tables (UB, UC) and the AISC
- * tables (W) print. The continental tables (IPE, HE) print `continentalITorsion`: from 4 % below to 8 % above it
- * over the shipped shapes.
+ * tables (W) print. The continental tables (IPE, HE) print `continentalITorsion`: from 4 % below to
+ * 8 % above it over the shipped shapes.
  */
 export function rolledITorsion(sizes: Flanged, junction: Junction): number {
 	const { h, bTop, tfTop, bBottom, tfBottom, tw, r } = sizes;
