@@ -1,0 +1,28 @@
+import { openingBend, openingStudy } from './study';
+import { addressedStudy, addressText, studyParameter, type Addressed } from './study-address';
+
+export interface Opened {
+	readonly addressed: Addressed;
+	/** Why the study in the address was not opened; empty when it was, or when there was none. */
+	readonly notice: string;
+}
+
+export const openingAddressed: Addressed = { study: openingStudy, bend: openingBend };
+
+/** The study that an address carries, or the ready plate girder. */
+export function openedStudy(parameters: URLSearchParams): Opened {
+	const text = parameters.get(studyParameter);
+	if (text === null) return { addressed: openingAddressed, notice: '' };
+	const read = addressedStudy(text);
+	if (read.ok) return { addressed: read.value, notice: '' };
+	return {
+		addressed: openingAddressed,
+		notice: `${read.error} A plate girder is opened instead.`
+	};
+}
+
+/** Path of the Bench with a study in it; plain for the study it opens with. */
+export function benchPath(addressed: Addressed): string {
+	const text = addressText(addressed);
+	return text === addressText(openingAddressed) ? '/bench' : `/bench?${studyParameter}=${text}`;
+}

@@ -1,0 +1,20 @@
+import { flushSync, tick } from 'svelte';
+
+/** The printed page is built only while it is printed, so that bending never waits for it. */
+export class Printing {
+	under = $state(false);
+
+	begin = () => {
+		flushSync(() => (this.under = true));
+	};
+
+	end = () => {
+		this.under = false;
+	};
+
+	print = async () => {
+		this.under = true;
+		await tick();
+		window.print();
+	};
+}

@@ -1,0 +1,36 @@
+import type { CreateSectionRequest, SectionRecord } from '$lib/api/sections';
+import { openingStudy, type Study } from '../study';
+
+/** What of a study is kept on the Rack. */
+export function sectionToSave(
+	study: Study
+): Pick<CreateSectionRequest, 'definition' | 'settings' | 'standard'> {
+	return {
+		definition: study.section as CreateSectionRequest['definition'],
+		standard: '',
+		settings: {
+			code: { ...study.code },
+			strengthBasis: study.strengthBasis,
+			demands: [...study.demands],
+			...(study.shape ? { shape: study.shape } : {})
+		}
+	};
+}
+
+/** The study of a saved section; what its settings leave out opens as on a fresh Bench. */
+export function savedStudy({
+	definition,
+	settings
+}: Pick<SectionRecord, 'definition' | 'settings'>): Study {
+	const demands = (settings.demands ?? []).map((demand, index) => ({
+		...demand,
+		name: demand.name ?? `Case ${index + 1}`
+	}));
+	return {
+		shape: typeof settings.shape === 'string' ? settings.shape : null,
+		section: definition as Study['section'],
+		code: { ...openingStudy.code, ...(settings.code as Study['code']) },
+		strengthBasis: settings.strengthBasis ?? openingStudy.strengthBasis,
+		demands: demands.length > 0 ? demands : [{ name: 'Case 1' }]
+	};
+}

@@ -1,0 +1,100 @@
+import { z } from 'zod';
+import { codeSchema } from '$lib/api/code';
+import { demandSchema } from '$lib/api/demand';
+import { sectionSchema } from '$lib/api/section';
+import { fail, ok, type Result } from '$lib/engine/result';
+import { prepareSection } from '$lib/engine/section/prepare';
+import type { SectionDefinition } from '$lib/engine/section/definition';
+import { openingBend, type BendChoice, type Study } from './study';
+
+/** Name of the query parameter that carries an unsaved study. */
+export const studyParameter = 'study';
+/** First sign of the text; raised when its form changes. */
+const addressVersion = '1';
+const longest = 60_000;
+
+/** Compact form: short keys, defaults left out. */
+const addressSchema = z.object({
+	n: z.string().max(120).optional(),
+	s: sectionSchema,
+	c: codeSchema.optional(),
+	b: z.literal('code-table').optional(),
+	d: z
+		.array(demandSchema.extend({ name: z.string().max(120) }))
+		.min(1)
+		.max(60),
+	a: z.number().min(-360).max(360).optional(),
+	t: z.literal('curvature-zero').optional(),
+	k: z.number().min(-1000).max(1000).optional(),
+	i: z.int().min(0).max(59).optional()
+});
+
+export interface Addressed {
+	readonly study: Study;
+	readonly bend: BendChoice;
+}
+
+/** An unsaved study as text for the address bar: version, then JSON in base64url. */
+export function addressText({ study, bend }: Addressed): string {
+	const compact: z.input<typeof addressSchema> = {
+		...(study.shape ? { n: study.shape } : {}),
+		s: study.section as z.input<typeof sectionSchema>,
+		c: study.code,
+		...(study.strengthBasis === 'code-table' ? { b: 'code-table' } : {}),
+		d: [...study.demands],
+		...(bend.axisAngle ? { a: bend.axisAngle } : {}),
+		...(bend.transverse === 'curvature-zero' ? { t: 'curvature-zero' } : {}),
+		k: Number(bend.ratio.toPrecision(6)),
+		...(bend.activeCase === null ? {} : { i: bend.activeCase })
+	};
+	return addressVersion + '.' + toBase64Url(JSON.stringify(compact));
+}
+
+/** Reads `addressText` back; a sentence for the person when it cannot be used. */
+export function addressedStudy(text: string): Result<Addressed, string> {
+	if (text.length > longest) return fail('The study in this link is too long to be one of ours.');
+	const [version, body = ''] = text.split('.', 2);
+	if (version !== addressVersion)
+		return fail('The study in this link was made by a version that is not understood here.');
+	const parsed = addressSchema.safeParse(jsonOf(body));
+	if (!parsed.success) return fail('The study in this link is damaged and could not be read.');
+	const addressed = fromCompact(parsed.data);
+	const prepared = prepareSection(addressed.study.section, addressed.study.strengthBasis);
+	if (prepared.ok) return ok(addressed);
+	const why = prepared.error[0]?.message ?? '';
+	return fail(`The section in this link cannot be built. ${why}`.trim());
+}
+
+function fromCompact(compact: z.output<typeof addressSchema>): Addressed {
+	return {
+		study: {
+			shape: compact.n ?? null,
+			section: compact.s as SectionDefinition,
+			code: compact.c ?? {},
+			strengthBasis: compact.b ?? 'product-standard',
+			demands: compact.d
+		},
+		bend: {
+			axisAngle: compact.a ?? 0,
+			transverse: compact.t ?? 'moment-zero',
+			ratio: compact.k ?? openingBend.ratio,
+			activeCase: compact.i === undefined ? null : Math.min(compact.i, compact.d.length - 1)
+		}
+	};
+}
+
+function toBase64Url(text: string): string {
+	const bytes = new TextEncoder().encode(text);
+	const binary = Array.from(bytes, (byte) => String.fromCharCode(byte)).join('');
+	return btoa(binary).replaceAll('+', '-').replaceAll('/', '_').replace(/=+$/, '');
+}
+
+function jsonOf(text: string): unknown {
+	try {
+		const binary = atob(text.replaceAll('-', '+').replaceAll('_', '/'));
+		const bytes = Uint8Array.from(binary, (letter) => letter.charCodeAt(0));
+		return JSON.parse(new TextDecoder().decode(bytes));
+	} catch {
+		return null;
+	}
+}
