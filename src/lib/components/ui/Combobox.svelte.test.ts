@@ -68,6 +68,17 @@ describe('Combobox', () => {
 		await vi.waitFor(() => expect(offered()).toEqual(['second']));
 	});
 
+	it('takes nothing from the last answer while a new one is awaited', async () => {
+		let first = true;
+		const { input, onselect } = show(() => {
+			if (!first) return new Promise(() => {});
+			first = false;
+			return ['IPE 300'];
+		});
+		await userEvent.type(input, 'ip{Enter}');
+		expect(onselect).not.toHaveBeenCalled();
+	});
+
 	it('says so when the search fails', async () => {
 		const { input } = show(() => Promise.reject(new Error('offline')));
 		await userEvent.type(input, 'i');

@@ -87,4 +87,21 @@ describe('NumberField', () => {
 		await userEvent.keyboard('{Escape}');
 		expect(onchange.mock.lastCall).toEqual([400]);
 	});
+
+	it('drops text left with a fault when the value is set from outside', async () => {
+		const props = { label: 'Width', quantity: 'length' as const, value: 400 };
+		const { rerender } = render(NumberField, props);
+		const input = screen.getByRole('spinbutton', { name: 'Width' });
+		await userEvent.type(input, 'wide');
+		await userEvent.tab();
+		expect(input).toHaveValue('wide');
+		await rerender({ value: 350 });
+		expect(input).toHaveValue('350');
+		expect(screen.queryByRole('alert')).toBeNull();
+	});
+
+	it('sends the engine value in a form, whatever units are shown', () => {
+		show({ value: 304.8, name: 'width' });
+		expect(document.querySelector<HTMLInputElement>('input[name=width]')?.value).toBe('304.8');
+	});
 });

@@ -25,6 +25,8 @@ export class ComboboxState<T> {
 		const asked = new AbortController();
 		this.#asked = asked;
 		this.open = true;
+		// No item of the last answer may be taken for one of this query.
+		this.active = -1;
 		this.status = 'searching';
 		try {
 			const answer = this.#search()(query, asked.signal);
