@@ -28,9 +28,7 @@ const rows = async (sql: string) => {
 };
 
 test('two instances started at once on an empty database are both healthy', async () => {
-	const answers = await Promise.all(
-		instances.map(({ url }) => fetch(`${url}/api/v1/health`))
-	);
+	const answers = await Promise.all(instances.map(({ url }) => fetch(`${url}/api/v1/health`)));
 	expect(answers.map(({ status }) => status)).toEqual([200, 200]);
 	const bodies = await Promise.all(answers.map((answer) => answer.json()));
 	for (const body of bodies) expect(body.migration.applied).toBe(body.migration.latest);

@@ -42,11 +42,17 @@ const refusals: Readonly<Record<string, string>> = {
 	ENOTFOUND: 'DATABASE_URL names a host that cannot be found.'
 };
 
+/** What went wrong at the bottom, without the statement and its values. */
+const rootMessage = (error: unknown): string => {
+	if (!(error instanceof Error)) return String(error);
+	return error.cause ? rootMessage(error.cause) : error.message;
+};
+
 const explain = (error: unknown): string => {
 	const known = refusals[databaseFailure(error)?.code ?? ''];
 	if (known) return known;
 	if (isDatabaseAway(error)) return 'DATABASE_URL names a server that does not answer.';
-	const reason = error instanceof Error ? error.message : String(error);
+	const reason = rootMessage(error).split('\n')[0];
 	return `The database could not be brought up to date: ${reason}`;
 };
 

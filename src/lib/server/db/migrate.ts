@@ -38,9 +38,13 @@ const runStatement = async (connection: Connection, statement: string, isRepeat:
 	}
 };
 
+const changed = (tag: string) =>
+	`migration ${tag} is not the one that was applied to this database. Migrations are added, never edited; a database that holds nothing of worth can be dropped and made anew.`;
+
 /** MariaDB commits each change of a table by itself, so progress is kept statement by statement. */
 const apply = async (connection: Connection, { tag, hash, statements }: Migration) => {
 	const before = await appliedRow(connection, tag);
+	if (before && before.hash !== hash) throw new Error(changed(tag));
 	if (before?.finished) return false;
 	if (!before)
 		await connection.query('INSERT INTO schema_migrations (tag, hash) VALUES (?, ?)', [tag, hash]);
