@@ -2,6 +2,7 @@ import { isHttpError, isRedirect, type RequestEvent } from '@sveltejs/kit';
 import { isDatabaseAway } from '../db/failure';
 import { log } from '../log';
 import { refused, type Refusal } from './refusal';
+import { dropUnreadBody } from './unread-body';
 
 const broken = (error: unknown, id: string) => {
 	log.error({ err: error }, 'An API call failed');
@@ -35,6 +36,8 @@ export const handled = async (
 			);
 		if (isDatabaseAway(error)) return databaseAway(error, event.locals.requestId);
 		return broken(error, event.locals.requestId);
+	} finally {
+		await dropUnreadBody(event.request);
 	}
 };
 
@@ -47,4 +50,4 @@ const notAllowed = (method: string, allowed: string): Refusal => ({
 
 /** For the `fallback` of a route: 405 that says what is answered. */
 export const onlyMethods = (allowed: string) => (event: RequestEvent) =>
-	refused(notAllowed(event.request.method, allowed));
+	handled(event, () => refused(notAllowed(event.request.method, allowed)));
