@@ -1,0 +1,104 @@
+import { describe, expect, it } from 'vitest';
+import type { ISection, SectionDefinition } from '../section/definition';
+import { prepareSection } from '../section/prepare';
+import { analyse } from './analyse';
+import type { CodeChoice } from './result';
+
+function analysed(definition: SectionDefinition, code: Partial<CodeChoice> = {}) {
+	const section = prepareSection(definition);
+	if (!section.ok) throw new Error(section.error.map(({ message }) => message).join(' '));
+	return analyse(section.value, { code, demands: [{ My: 10 }] });
+}
+
+const beam: ISection = {
+	kind: 'i',
+	fabrication: 'welded',
+	h: 300,
+	b: 200,
+	tw: 10,
+	tf: 20,
+	grade: 'S355'
+};
+
+describe('outside the rules', () => {
+	it.each(['EN1993-1-1:2022', 'AISC360-22', 'CSA-S16:19', 'AS4100', 'IS800'] as const)(
+		'gives %s no class and no resistance while it is not built',
+		(standard) => {
+			const { classification, resistance, notes, verdict } = analysed(beam, { standard });
+			expect([classification, resistance]).toEqual([null, null]);
+			expect(notes.map(({ code }) => code)).toContain('code-not-built');
+			expect(verdict.status).toBe('no-figure');
+			expect(verdict.countable.moment).toBeNull();
+		}
+	);
+
+	const others: SectionDefinition[] = [
+		{ kind: 'channel', h: 200, b: 75, tw: 8.5, tf: 11.5, r: 10, grade: 'S355' },
+		{ kind: 'tee', fabrication: 'welded', h: 150, b: 150, tw: 10, tf: 15, grade: 'S355' },
+		{ kind: 'angle', h: 100, b: 100, t: 10, grade: 'S355' },
+		{ kind: 'flat', b: 100, h: 20, grade: 'S355' },
+		{ kind: 'round', d: 50, grade: 'S355' },
+		{
+			kind: 'outline',
+			outer: [
+				[0, 0],
+				[100, 0],
+				[100, 200],
+				[0, 200]
+			],
+			grade: 'S355'
+		}
+	];
+	it.each(others.map((definition) => [definition.kind, definition] as const))(
+		'gives a %s moments as properties but no class and no resistance',
+		(_kind, definition) => {
+			const { classification, resistance, moment, notes } = analysed(definition);
+			expect([classification, resistance]).toEqual([null, null]);
+			expect(moment.firstYieldY).toBeGreaterThan(0);
+			expect(moment.plasticY).toBeGreaterThan(moment.firstYieldY ?? 0);
+			expect(notes.map(({ code }) => code)).toContain('class-not-built');
+		}
+	);
+
+	it.each([
+		['fy over 460', { ...beam, grade: 'S690Q' }, 'strength-out-of-range'],
+		['aluminium', { ...beam, grade: { fy: 250, E: 70_000 } }, 'modulus-out-of-range'],
+		[
+			'a flange over twice as strong as the web',
+			{ ...beam, grade: 460, partGrades: { web: 229 } },
+			'hybrid-out-of-range'
+		],
+		['too little ductility', { ...beam, grade: { fy: 355, fu: 380 } }, 'ductility-out-of-range']
+	] as const)('refuses %s with a reason', (_what, definition, code) => {
+		const { classification, resistance, notes } = analysed(definition);
+		expect([classification, resistance]).toEqual([null, null]);
+		expect(notes.map((note) => note.code)).toContain(code);
+	});
+
+	it('takes fy 460 itself, and a web of just half the flange', () => {
+		expect(analysed({ ...beam, grade: 460 }).classification).not.toBeNull();
+		const half: ISection = { ...beam, grade: 460, partGrades: { web: 230 } };
+		expect(analysed(half).classification).not.toBeNull();
+	});
+
+	it('gives a round tube beyond 90ε² class 4 and nothing to count', () => {
+		const tube = (t: number) => analysed({ kind: 'circular-hollow', d: 900, t, grade: 235 });
+		expect(tube(10).classification?.overall).toBe(3);
+		expect(tube(9.99).classification?.overall).toBe(4);
+		expect(tube(9.99).resistance).toMatchObject({ MyRd: null, NRd: null, VzRd: null });
+	});
+
+	it('never answers with NaN or Infinity', () => {
+		const sizes: ISection[] = [
+			beam,
+			{ ...beam, h: 40.02, tw: 0.01 },
+			{ ...beam, tw: 199.9, grade: 345 }
+		];
+		for (const definition of sizes) {
+			const text = JSON.stringify(analysed(definition), (_key, value: unknown) =>
+				typeof value === 'number' && !Number.isFinite(value) ? 'not finite' : value
+			);
+			expect(text).not.toContain('not finite');
+		}
+	});
+});

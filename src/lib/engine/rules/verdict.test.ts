@@ -1,0 +1,116 @@
+import { describe, expect, it } from 'vitest';
+import type { ISection, SectionDefinition } from '../section/definition';
+import { prepareSection } from '../section/prepare';
+import { analyse, type AnalyseRequest } from './analyse';
+import { verdict } from './verdict';
+import { plainSentence, ratioPair } from './verdict-tokens';
+
+function prepared(definition: SectionDefinition) {
+	const section = prepareSection(definition);
+	if (!section.ok) throw new Error(section.error.map(({ message }) => message).join(' '));
+	return section.value;
+}
+
+const verdictOn = (definition: SectionDefinition, request?: AnalyseRequest) =>
+	analyse(prepared(definition), request).verdict;
+
+/** Class 1: Mpl = 235·(200·20·280 + 10·260²/4) = 302.9 kNm. */
+const stocky: ISection = {
+	kind: 'i',
+	fabrication: 'welded',
+	h: 300,
+	b: 200,
+	tw: 10,
+	tf: 20,
+	grade: 235
+};
+
+describe('what may be counted, in a sentence', () => {
+	it('counts the full block of a class 1 section', () => {
+		const said = verdictOn(stocky);
+		expect(said.sentence).toBe('Class 1. Count 303 kNm, the full plastic block.');
+		expect(said.detail).toContain('comes closest');
+		expect(said.detail).toContain('beyond first yield may be counted.');
+		expect(said.countable.basis).toBe('plastic');
+	});
+
+	it('says when a class 3 web is counted as class 2', () => {
+		const said = verdictOn({ ...stocky, h: 600, tw: 6, weldLeg: 6, grade: 275 });
+		expect(said.sentence).toBe(
+			'Class 3, web as Class 2. Count 744 kNm, the plastic block of the effective section.'
+		);
+		expect(said.governing).toBe('web');
+	});
+
+	it('counts nothing in class 4', () => {
+		const said = verdictOn({ ...stocky, h: 1540, tw: 8, grade: 355 }, { demands: [{ My: 10 }] });
+		expect(said.sentence).toBe('Class 4. Nothing may be counted yet.');
+		expect(said.detail).toContain('is over the Class 3 limit');
+		expect(said.detail).toContain('nor anything beyond is to be counted');
+		expect(said.notChecked).toContain('effective widths');
+		expect(said.status).toBe('incomplete');
+	});
+
+	it('says why a section without a class counts nothing', () => {
+		const said = verdictOn({ kind: 'flat', b: 100, h: 20, grade: 'S355' });
+		expect(said.sentence).toBe('No class. Nothing may be counted yet.');
+		expect(said.detail).toContain('not built yet');
+		expect(said.ruler.firstYield).toBeGreaterThan(0);
+		expect(said.ruler.countable).toBeNull();
+	});
+
+	it('keeps the numbers apart from the words', () => {
+		const { sentence, sentenceTokens } = verdictOn(stocky);
+		expect(sentenceTokens).toHaveLength(3);
+		expect(sentenceTokens[1]).toMatchObject({ quantity: 'moment' });
+		expect(plainSentence(sentenceTokens)).toBe(sentence);
+	});
+
+	it('counts what the linear sum leaves beside an axial force', () => {
+		// Half of NRd leaves half of MyRd.
+		const half = (10600 * 0.235) / 2;
+		const said = verdictOn(stocky, { demands: [{ N: -half, My: 50 }] });
+		expect(said.countable.moment).toBeCloseTo(302.915 / 2, 6);
+		expect(said.sentence).toContain('beside −1246 kN, by the linear sum.');
+	});
+});
+
+describe('status', () => {
+	const status = (request: AnalyseRequest) => verdictOn(stocky, request).status;
+
+	it('passes, fails or stays open with the demand', () => {
+		expect(status({ demands: [{ My: 100 }] })).toBe('passes');
+		expect(status({ demands: [{ My: 400 }] })).toBe('fails');
+		expect(status({ demands: [{ My: 100, unbracedLength: 5000 }] })).toBe('incomplete');
+		expect(status({ demands: [] })).toBe('no-figure');
+		expect(status({ demands: [{ name: 'empty' }] })).toBe('no-figure');
+	});
+
+	it('fails rather than stays open when a check that was made is exceeded', () => {
+		expect(status({ demands: [{ My: 400, unbracedLength: 5000 }] })).toBe('fails');
+	});
+
+	it('is of the demand that is asked for, else of the worst', () => {
+		const section = prepared(stocky);
+		const demands = [
+			{ name: 'A', My: 100 },
+			{ name: 'B', My: -400 }
+		];
+		const analysis = analyse(section, { demands });
+		expect(analysis.verdict).toMatchObject({ demand: 'B', status: 'fails' });
+		expect(analysis.verdict.ruler).toMatchObject({ axisAngle: 180, demand: 400 });
+		expect(verdict(section, analysis, 'A')).toMatchObject({ demand: 'A', status: 'passes' });
+	});
+});
+
+describe('ratios side by side', () => {
+	it('take as many decimals as it needs to tell them apart', () => {
+		const written = (a: number, b: number) =>
+			ratioPair(a, b)
+				.map((token) => plainSentence([token]))
+				.join(' / ');
+		expect(written(9.25, 8.2532)).toBe('9.25 / 8.25');
+		expect(written(26.861, 26.859)).toBe('26.861 / 26.859');
+		expect(written(9.163, 9.1516)).toBe('9.16 / 9.15');
+	});
+});
