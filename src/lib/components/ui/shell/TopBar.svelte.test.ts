@@ -6,11 +6,13 @@ import TopBar from './TopBar.svelte';
 vi.mock('$app/state', () => ({ page: { url: new URL('http://localhost/rack/01HX') } }));
 vi.mock('$app/navigation', () => ({ afterNavigate: () => {} }));
 
+const firm = { id: '1', name: 'Tarn Bridge Steelwork' };
 const person = {
 	name: 'Ruth Tarn',
 	email: 'ruth@tarnbridge.example',
-	firm: { name: 'Tarn Bridge Steelwork' },
-	role: 'designer'
+	firm,
+	role: 'designer',
+	memberships: [{ firm }, { firm: { id: '2', name: 'Gull Point Fabrication' } }]
 };
 
 describe('TopBar', () => {
@@ -33,6 +35,15 @@ describe('TopBar', () => {
 		const form = screen.getByRole('button', { name: 'Sign out' }).closest('form');
 		expect(form).toHaveAttribute('action', '/sign-out');
 		expect(form).toHaveAttribute('method', 'POST');
+	});
+
+	it('offers the other firms of a person, not the one in hand', async () => {
+		render(TopBar, { person });
+		await userEvent.click(screen.getByLabelText('Account of Ruth Tarn, and units'));
+		const changes = screen.getAllByRole('button', { name: /^Change to/ });
+		expect(changes.map((button) => button.textContent.trim())).toEqual([
+			'Change to Gull Point Fabrication'
+		]);
 	});
 
 	it('offers signing in to those who are not, and units to everyone', async () => {

@@ -2,8 +2,9 @@
 export interface PersonAtScreen {
 	name: string;
 	email: string;
-	firm: { name: string } | null;
+	firm: { id: string; name: string } | null;
 	role: string | null;
+	memberships: readonly { firm: { id: string; name: string } }[];
 }
 
 /** At most two initials: first and last name. */
