@@ -101,4 +101,20 @@ describe('outside the rules', () => {
 			expect(text).not.toContain('not finite');
 		}
 	});
+
+	it('does not change class when every size is a hundredth or tenfold, and moments go with the cube', () => {
+		const uneven = { b: 180, bBottom: 220, tf: 14, tfBottom: 12, tw: 5, h: 400, grade: 355 };
+		const at = (k: number) => {
+			const { b, bBottom, tf, tfBottom, tw, h } = uneven;
+			const sizes = { b: b * k, bBottom: bBottom * k, tf: tf * k, tfBottom: tfBottom * k };
+			return analysed({ ...beam, ...sizes, tw: tw * k, h: h * k, grade: 355 });
+		};
+		const one = at(1);
+		for (const k of [0.01, 10]) {
+			const scaled = at(k);
+			expect(scaled.classification?.byCase).toEqual(one.classification?.byCase);
+			const ratio = (scaled.resistance?.MyRd ?? 0) / (one.resistance?.MyRd ?? 1);
+			expect(ratio / k ** 3).toBeCloseTo(1, 10);
+		}
+	});
 });
