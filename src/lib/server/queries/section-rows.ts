@@ -3,6 +3,8 @@ import { eq } from 'drizzle-orm';
 import { sectionSettings, type SectionRecord, type SectionSummary } from '../../api/sections';
 import { sectionSchema } from '../../api/section';
 import type { SectionKind } from '../../engine/section/definition';
+import { migratedDefinition } from '../../engine/section/migrate';
+import { schemaVersion } from '../../engine/version';
 import type { Writer } from '../db/connection';
 import { sections, users } from '../db/schema';
 
@@ -80,10 +82,17 @@ export const summaryOf = (row: SummaryRow): SectionSummary => ({
 	updatedAt: row.updatedAt.toISOString()
 });
 
+/** The stored definition in today's form; one that cannot be brought there is a fault of ours. */
+const definitionOf = (row: RecordRow) => {
+	const today = migratedDefinition(row);
+	if (!today.ok) throw new Error(`Section ${row.id}: ${today.error}`);
+	return sectionSchema.parse(today.value);
+};
+
 /** A row in full; what was stored is held against the schema again, as everything that comes in. */
 export const recordOf = (row: RecordRow): SectionRecord => ({
 	...summaryOf(row),
-	definition: sectionSchema.parse(row.definition),
-	schemaVersion: row.schemaVersion,
+	definition: definitionOf(row),
+	schemaVersion,
 	settings: sectionSettings.parse(row.settings)
 });

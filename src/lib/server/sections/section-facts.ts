@@ -1,10 +1,10 @@
 import type { SectionSettings } from '../../api/sections';
 import { fail, ok, type Result } from '../../engine/result';
+import { inputHash } from '../../engine/section/canonical';
 import type { SectionDefinition, SectionKind } from '../../engine/section/definition';
 import { prepareSection } from '../../engine/section/prepare';
 import { engineVersion, schemaVersion } from '../../engine/version';
 import type { Refusal } from '../http/refusal';
-import { inputHash } from '../queries/input-hash';
 
 /** What the server itself finds out about a section that is to be kept. mm, mm², kg/m. */
 export interface SectionFacts {
