@@ -102,7 +102,7 @@ function drawingScale(extent: Extent, widthRoom: number, depthRoom: number): num
 	const width = extent.right - extent.left || 1;
 	const fit = Math.min(depthRoom / depth, widthRoom / width);
 	const readable = Math.min(150, depthRoom * 0.4);
-	return Math.max(fit, readable / depth);
+	return fit * depth < readable * 0.6 ? readable / depth : fit;
 }
 
 function windowsOf(extent: Extent, scale: number, left: number, space: number): SectionWindow[] {

@@ -4,14 +4,6 @@ export interface WantedLabel {
 	readonly size: number;
 }
 
-/** A box on the drawing, px, y down. */
-export interface Box {
-	readonly x: number;
-	readonly y: number;
-	readonly width: number;
-	readonly height: number;
-}
-
 interface Cluster {
 	members: number[];
 	size: number;
@@ -83,23 +75,3 @@ function placed(
 	}
 	return out;
 }
-
-export const overlaps = (a: Box, b: Box) =>
-	a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
-
-/** Index of the first place that meets nothing taken and stays inside; −1 when there is none. */
-export function freePlace(
-	places: readonly Box[],
-	taken: readonly Box[],
-	inside: Box | null = null
-): number {
-	return places.findIndex(
-		(place) => !taken.some((box) => overlaps(place, box)) && (!inside || contains(inside, place))
-	);
-}
-
-const contains = (outer: Box, inner: Box) =>
-	inner.x >= outer.x &&
-	inner.y >= outer.y &&
-	inner.x + inner.width <= outer.x + outer.width &&
-	inner.y + inner.height <= outer.y + outer.height;
