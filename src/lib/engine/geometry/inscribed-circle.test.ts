@@ -20,6 +20,11 @@ describe('the largest circle within rings', () => {
 		expect(inscribedDiameter([outer, hole])).toBeCloseTo(corner, 6);
 	});
 
+	it('comes to an end on a ridge that runs askew', () => {
+		const askew = ring([1, 0], [0, 3], [2, 3], [3, 2], [2, 1], [1, 2], [0, 3]);
+		expect(inscribedDiameter([askew])).toBeGreaterThan(0);
+	});
+
 	it('scales with the rings', () => {
 		const at = (s: number) =>
 			inscribedDiameter([ring([0, 0], [3 * s, 0], [2 * s, 3 * s], [0, 4 * s])]);

@@ -9,11 +9,11 @@ interface Cell extends Point {
 }
 
 const enough = 1.01;
-const probesAtMost = 4000;
+const probesAtMost = 1000;
 
 /**
  * Diameter of the largest circle within rings (outer and holes), mm: quartered cells, most promising
- * first, until nothing more than 1 % larger can be left, then a descent to the exact place.
+ * first, until nothing more than 1 % larger can be left, then a walk uphill towards the exact place.
  */
 export function inscribedDiameter(rings: readonly (readonly Point[])[]): number {
 	const cellAt = cellsOver(rings);
@@ -80,10 +80,13 @@ function clearance(rings: readonly (readonly Point[])[], point: Point): number {
 	return inside ? nearest : -nearest;
 }
 
-/** Walks uphill in eight directions with halving steps. */
+const polishingStepsAtMost = 400;
+
+/** Walks uphill in eight directions with halving steps; a ridge that runs askew ends the walk early, never below the start. */
 function polished(start: Cell, cellAt: CellAt): number {
 	let best = start;
-	for (let step = start.clear; step > 1e-11 * start.clear;) {
+	let step = start.clear;
+	for (let k = 0; k < polishingStepsAtMost && step > 1e-11 * start.clear; k++) {
 		const around = [...corners, [1, 0], [0, 1], [-1, 0], [0, -1]] as const;
 		const tried = around.map(([sy, sz]) => cellAt(best.y + sy! * step, best.z + sz! * step, 0));
 		const top = tried.reduce((a, b) => (b.clear > a.clear ? b : a));
