@@ -6,10 +6,14 @@ export const noClassSentence = (): VerdictToken[] => [
 	words('No class. Nothing may be counted yet.')
 ];
 
+/** A limit this many times the slenderness is not worth naming: hardly anything is compressed. */
+const farOff = 20;
+
 /** "Class 3. Count 3110 kNm, up to first yield." */
 export function countSentence(view: VerdictView): VerdictToken[] {
 	const { countable } = view.ruler;
 	if (countable === null) return [words(`Class ${view.class}. Nothing may be counted yet.`)];
+	if (countable === 0) return [words(`Class ${view.class}. N leaves no moment to count.`)];
 	const head =
 		view.basis === 'effective-class-2' ? 'Class 3, web as Class 2' : `Class ${view.class}`;
 	return [words(`${head}. Count `), moment(countable), ...countedAs(view)];
@@ -40,6 +44,8 @@ function decidingPart({ class: overall, element }: VerdictView): VerdictToken[] 
 	const symbol = type === 'tubular' ? 'd/t' : 'c/t';
 	const passed = Math.max(overall - 1, 1);
 	const [own, limit] = ratioPair(slenderness, limits[passed - 1] ?? slenderness);
+	if (overall === 1 && (limits[0] ?? 0) > farOff * slenderness)
+		return [words('No part comes near its Class 1 limit.')];
 	if (overall === 1)
 		return [
 			words(`The ${name} comes closest: ${symbol} `),

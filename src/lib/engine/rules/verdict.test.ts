@@ -86,6 +86,19 @@ describe('status', () => {
 		expect(status({ demands: [{ name: 'empty' }] })).toBe('no-figure');
 	});
 
+	it('says when N leaves nothing, and names no limit that is far off', () => {
+		const said = verdictOn(stocky, { demands: [{ N: 5000, My: 1 }] });
+		expect(said.sentence).toBe('Class 1. N leaves no moment to count.');
+		expect(said.status).toBe('fails');
+	});
+
+	it('speaks of the demand that fails before one that misses a check', () => {
+		const open = { name: 'open', My: 10, unbracedLength: 5000 };
+		const over = { name: 'over', My: 400 };
+		expect(verdictOn(stocky, { demands: [open, over, { name: 'none' }] }).demand).toBe('over');
+		expect(verdictOn(stocky, { demands: [{ My: 10 }, open] }).demand).toBe('open');
+	});
+
 	it('fails rather than stays open when a check that was made is exceeded', () => {
 		expect(status({ demands: [{ My: 400, unbracedLength: 5000 }] })).toBe('fails');
 	});

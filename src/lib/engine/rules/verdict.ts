@@ -73,9 +73,10 @@ export function verdict(
 	};
 }
 
-/** Without a figure first, then the one that uses most. */
+/** What fails first, then what misses a check, then what uses most; what asks nothing last. */
 function pressing(demands: readonly DemandState[]): DemandState | undefined {
-	const press = ({ utilisation }: DemandState) => utilisation ?? Number.POSITIVE_INFINITY;
+	const press = ({ utilisation, missing }: DemandState) =>
+		utilisation ?? (missing.length > 0 ? 1 : -1);
 	return demands.reduce<DemandState | undefined>(
 		(most, state) => (most === undefined || press(state) > press(most) ? state : most),
 		undefined

@@ -4,7 +4,8 @@ import type { BendingPath } from '../../response/state';
 
 /**
  * Plastic state reached when N (kN) and M (kNm) grow together: the factor k with
- * Mpl(kN) = kM, by halving between no load and the squash load.
+ * Mpl(kN) = kM, between no load and the squash load by false position with the Illinois halving
+ * (Dowell and Jarratt 1971).
  */
 export function proportionalBlock(
 	mechanics: Mechanics,
@@ -13,13 +14,27 @@ export function proportionalBlock(
 	M: number
 ): PlasticState {
 	const at = (factor: number) => plasticMomentOf(mechanics, { ...path, N: factor * N });
-	let [low, high] = [0, (2e-3 * mechanics.squash) / Math.abs(N)];
+	const beyond = (state: PlasticState, factor: number) => (state.moment ?? 0) - factor * M;
 	let state = at(0);
-	for (let i = 0; i < 60 && high - low > 1e-13 * high; i++) {
-		const factor = (low + high) / 2;
+	let [low, high] = [0, (2e-3 * mechanics.squash) / Math.abs(N)];
+	let [atLow, atHigh] = [beyond(state, 0), -high * M];
+	const small = 1e-13 * atLow;
+	let side = 0;
+	for (let i = 0; i < 60 && high - low > 1e-14 * high; i++) {
+		const factor = low + (atLow / (atLow - atHigh)) * (high - low);
 		const next = at(factor);
-		if (next.moment !== null && next.moment >= factor * M) [low, state] = [factor, next];
-		else high = factor;
+		const value = beyond(next, factor);
+		if (next.moment !== null) state = next;
+		if (Math.abs(value) <= small) break;
+		if (value > 0) {
+			[low, atLow] = [factor, value];
+			if (side === 1) atHigh /= 2;
+			side = 1;
+		} else {
+			[high, atHigh] = [factor, value];
+			if (side === -1) atLow /= 2;
+			side = -1;
+		}
 	}
 	return state;
 }
