@@ -50,12 +50,10 @@ export function classifyPlate(
 		element.type === 'internal'
 			? internalLimits(element.epsilon, share, psi)
 			: outstandLimits(element.epsilon, { alpha: share, plasticEnd, psi, elasticEnd });
-	return {
-		...described(element, limits),
-		stress: stressName(share, psi),
-		alpha: share,
-		...(elastic ? { psi } : {})
-	};
+	const row = described(element, limits, stressName(share, psi));
+	row.alpha = share;
+	if (elastic) row.psi = psi;
+	return row;
 }
 
 export function classifyTube(
@@ -63,7 +61,7 @@ export function classifyTube(
 	compressed: 'compression' | 'bending' | 'combined' | 'tension'
 ): ClassifiedElement {
 	if (compressed === 'tension') return inTension(element);
-	return { ...described(element, tubularLimits(element.epsilon)), stress: compressed };
+	return described(element, tubularLimits(element.epsilon), compressed);
 }
 
 function gradientOf(from: number, to: number, zero: number): Gradient | null {
@@ -82,23 +80,32 @@ function stressName(share: number, psi: number): ClassifiedElement['stress'] {
 	return bending ? 'bending' : 'combined';
 }
 
-function described(element: PlateElement | TubeElement, limits: ClassLimits) {
-	const { part, type, c, t, epsilon } = element;
+function described(
+	{ part, type, c, t, epsilon }: PlateElement | TubeElement,
+	limits: ClassLimits,
+	stress: ClassifiedElement['stress']
+): ClassifiedElement {
 	const slenderness = c / t;
+	const own = classWithin(slenderness, limits);
 	return {
 		part,
 		type,
+		stress,
 		c,
 		t,
 		slenderness,
 		epsilon,
 		limits,
-		class: classWithin(slenderness, limits),
-		clause: `${table}, sheet ${sheets[type]}`
+		class: own,
+		clause: sheets[type]
 	};
 }
 
-const sheets = { internal: 1, outstand: 2, tubular: 3 };
+const sheets = {
+	internal: `${table}, sheet 1`,
+	outstand: `${table}, sheet 2`,
+	tubular: `${table}, sheet 3`
+} as const;
 
 /** Unrounded: on a limit is within it. */
 export function classWithin(slenderness: number, limits: ClassLimits): SectionClass {

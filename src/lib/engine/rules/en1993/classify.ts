@@ -31,13 +31,18 @@ export function classifySection(
 }
 
 function classifyPlates(plates: readonly PlateElement[], stress: StressCase) {
-	const greatest = (value: StressCase['plastic']) =>
-		Math.max(...plates.flatMap(({ from, to }) => [Math.abs(value(from)), Math.abs(value(to))]));
 	const scale: StressScale = {
-		plastic: greatest(stress.plastic),
-		elastic: greatest(stress.elastic)
+		plastic: greatestSize(plates, stress.plastic),
+		elastic: greatestSize(plates, stress.elastic)
 	};
 	return plates.map((plate) => classifyPlate(plate, stress, scale));
+}
+
+function greatestSize(plates: readonly PlateElement[], value: StressCase['plastic']): number {
+	let greatest = 0;
+	for (const { from, to } of plates)
+		greatest = Math.max(greatest, Math.abs(value(from)), Math.abs(value(to)));
+	return greatest;
 }
 
 function tubeStress({ N, My, Mz }: Effects) {
@@ -55,13 +60,13 @@ function heldElastically(row: ClassifiedElement): ClassifiedElement {
 }
 
 function worstRows(rows: readonly ClassifiedElement[]): ClassifiedElement[] {
-	const kept = new Map<string, ClassifiedElement>();
+	const kept: ClassifiedElement[] = [];
 	for (const row of rows) {
-		const key = `${row.part} ${row.type}`;
-		const before = kept.get(key);
-		if (!before || isWorse(row, before)) kept.set(key, row);
+		const at = kept.findIndex(({ part, type }) => part === row.part && type === row.type);
+		if (at < 0) kept.push(row);
+		else if (isWorse(row, kept[at]!)) kept[at] = row;
 	}
-	return [...kept.values()];
+	return kept;
 }
 
 function isWorse(a: ClassifiedElement, b: ClassifiedElement): boolean {

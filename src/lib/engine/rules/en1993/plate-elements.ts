@@ -58,9 +58,11 @@ export function elementsOf(
 	}
 }
 
+const webs = new Set(['web', 'leftWeb', 'rightWeb']);
+
 /** A web follows the strain of its flanges: its ε is that of the strongest part (EN 1993-1-5, 4.3(6)). */
 function measured(flats: readonly Flat[], strengths: Strengths): SectionElements {
-	const strength = (part: string) => (/web$/i.test(part) ? strengths.most : strengths.of(part));
+	const strength = (part: string) => (webs.has(part) ? strengths.most : strengths.of(part));
 	const plates = flats.map((flat) => ({
 		...flat,
 		c: Math.hypot(flat.to.y - flat.from.y, flat.to.z - flat.from.z),
