@@ -50,6 +50,10 @@ const standingBehind = async (token: unknown, isNew: boolean): Promise<Standing 
 	return isNew || parsed.data.epoch === standing.sessionEpoch ? standing : null;
 };
 
+/** A wrong password or a cookie that is none: anybody can send these, they are no fault of ours. */
+const isTheVisitors = (error: Error) =>
+	error instanceof CredentialsSignin || error.name === 'JWTSessionError';
+
 /** The settings of Auth.js for one request; `found` is told who is behind a valid session. */
 export const authConfig = (
 	event: RequestEvent,
@@ -81,7 +85,8 @@ export const authConfig = (
 	},
 	logger: {
 		error: (error) => {
-			if (!(error instanceof CredentialsSignin)) log.error({ err: error }, 'sign-in failed');
+			const level = isTheVisitors(error) ? 'debug' : 'error';
+			log[level]({ err: error }, 'sign-in failed');
 		},
 		warn: (code) => log.debug({ code }, 'sign-in warning'),
 		debug: () => undefined

@@ -17,7 +17,7 @@ const familiesByCatalogue = async () => {
 /** The shipped catalogues with their families. */
 export const listCatalogues = async (): Promise<Catalogue[]> => {
 	const [rows, families] = await Promise.all([
-		db().select().from(catalogues).orderBy(asc(catalogues.slug)),
+		db().select().from(catalogues).orderBy(asc(catalogues.id)),
 		familiesByCatalogue()
 	]);
 	return rows.map(({ id, slug, standard, title, shapeCount, source }) => ({

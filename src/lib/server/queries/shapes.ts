@@ -38,7 +38,7 @@ const filtersOf = ({ family, catalogue, kind }: ShapeQuery): (SQL | undefined)[]
 ];
 
 const orderOf = (sort: ShapeQuery['sort']): SQL[] => {
-	if (!sort) return [asc(catalogues.slug), asc(shapes.position), asc(shapes.id)];
+	if (!sort) return [asc(catalogues.id), asc(shapes.position), asc(shapes.id)];
 	const down = sort.startsWith('-');
 	const column = sortColumns[(down ? sort.slice(1) : sort) as Sort];
 	return [down ? desc(column) : asc(column), asc(shapes.id)];

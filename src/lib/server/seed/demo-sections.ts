@@ -12,7 +12,7 @@ export interface DemoSection {
 	status: SectionState;
 }
 
-/** All invented; one is deliberately odd. Lengths mm, kN, kNm. */
+/** In the order of the list, newest first. All invented; one is deliberately odd. Lengths mm, kN, kNm. */
 export const demoSections: readonly DemoSection[] = [
 	{
 		by: 'designer',

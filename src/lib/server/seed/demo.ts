@@ -44,7 +44,8 @@ const insertFirm = (hash: string): Promise<void> =>
 		const firmId = newId();
 		await tx.insert(firms).values({ id: firmId, name: demoAccounts.firm, demo: true });
 		const crew = await insertCrew(tx, firmId, hash);
-		for (const section of demoSections) await insertDemoSection(tx, firmId, crew, section);
+		for (const section of [...demoSections].reverse())
+			await insertDemoSection(tx, firmId, crew, section);
 	});
 
 /** Whether the demo firm is in the database. */
