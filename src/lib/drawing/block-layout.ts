@@ -43,7 +43,7 @@ const shares = {
 };
 const room = {
 	wide: { head: 58, above: 40, below: 46, dimension: 26, gutter: 86, side: 14 },
-	narrow: { head: 44, above: 34, below: 40, dimension: 14, gutter: 44, side: 6 }
+	narrow: { head: 44, above: 34, below: 40, dimension: 18, gutter: 44, side: 6 }
 };
 const breakGap = 12;
 
