@@ -6,12 +6,13 @@ import {
 	readFileSync,
 	rmSync,
 	statSync,
-	utimesSync
+	utimesSync,
+	writeFileSync
 } from 'node:fs';
 import path from 'node:path';
 import { withLock } from './lock.js';
 import { inLocal, inRoot, root } from './paths.js';
-import { run } from './processes.js';
+import { birthOf, isAlive, run } from './processes.js';
 import { Refusal, say } from './say.js';
 
 const sources = [
@@ -52,12 +53,33 @@ export const sourceDigest = () => {
 const builds = inLocal('builds');
 const kept = 4;
 
-/** Removes all but the builds used last; a running server may still read from one of them. */
+/** @param {string} out who is using a build: one file for each process */
+const usersOf = (out) => path.join(out, '.users');
+
+/** @param {string} out */
+export const isUsed = (out) => {
+	const place = usersOf(out);
+	if (!existsSync(place)) return false;
+	return readdirSync(place).some((pid) => {
+		const birth = readFileSync(path.join(place, pid), 'utf8');
+		return isAlive({ pid: Number(pid), birth });
+	});
+};
+
+/** @param {string} out */
+export const use = (out) => {
+	mkdirSync(usersOf(out), { recursive: true });
+	writeFileSync(path.join(usersOf(out), String(process.pid)), String(birthOf(process.pid) ?? ''));
+	utimesSync(out, new Date(), new Date());
+};
+
+/** Removes all but the builds used last and those that a living process still reads from. */
 const sweep = () => {
 	const age = (/** @type {string} */ name) => statSync(path.join(builds, name)).mtimeMs;
 	const old = readdirSync(builds)
 		.sort((a, b) => age(b) - age(a))
-		.slice(kept);
+		.slice(kept)
+		.filter((name) => !isUsed(path.join(builds, name)));
 	for (const name of old) rmSync(path.join(builds, name), { recursive: true, force: true });
 };
 
@@ -84,7 +106,7 @@ export const ensureBuild = () =>
 			const out = path.join(builds, sourceDigest());
 			mkdirSync(builds, { recursive: true });
 			if (!existsSync(path.join(out, 'index.js'))) await build(out);
-			utimesSync(out, new Date(), new Date());
+			use(out);
 			sweep();
 			return out;
 		},
