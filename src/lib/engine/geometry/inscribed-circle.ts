@@ -14,15 +14,17 @@ const probesAtMost = 1000;
 /**
  * Diameter of the largest circle within rings (outer and holes), mm: quartered cells, most promising
  * first, until nothing more than 1 % larger can be left, then a walk uphill towards the exact place.
+ * A shape too intricate to settle gives the most that it can be: thicker is never the stronger.
  */
 export function inscribedDiameter(rings: readonly (readonly Point[])[]): number {
 	const cellAt = cellsOver(rings);
 	const cells = firstCells(rings).map(([y, z, half]) => cellAt(y, z, half));
 	let best = cells.reduce((a, b) => (b.clear > a.clear ? b : a));
-	for (let probes = 0; probes < probesAtMost; probes++) {
+	for (let probes = 0; ; probes++) {
 		cells.sort((a, b) => a.most - b.most);
 		const cell = cells.pop();
 		if (!cell || cell.most <= best.clear * enough) break;
+		if (probes === probesAtMost) return 2 * cell.most;
 		const half = cell.half / 2;
 		for (const [sy, sz] of corners) {
 			const quarter = cellAt(cell.y + sy * half, cell.z + sz * half, half);
