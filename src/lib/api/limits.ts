@@ -3,7 +3,7 @@ export const limits = {
 	/** States, moments, curvatures or strain planes in one request. */
 	states: 2000,
 	/** Plates of one section, and joins between them. */
-	plates: 2000,
+	plates: 200,
 	/** Points over all rings of an outline. */
 	points: 2000,
 	/** Points of one stress–strain curve. */
