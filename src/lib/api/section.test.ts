@@ -99,6 +99,6 @@ describe('sectionSchema', () => {
 		);
 		const plate = { name: 'a', width: 10, thickness: 1, y: 0, z: 0, angle: 0 };
 		const plates = Array.from({ length: limits.plates + 1 }, () => plate);
-		expect(issues({ kind: 'plates', plates, grade: 355 })[0]?.message).toContain('at most 2000');
+		expect(issues({ kind: 'plates', plates, grade: 355 })[0]?.message).toContain('at most 200');
 	});
 });

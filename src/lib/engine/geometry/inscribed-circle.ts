@@ -9,7 +9,8 @@ interface Cell extends Point {
 }
 
 const enough = 1.01;
-const probesAtMost = 1000;
+/** Work that one search may take: probes times edges. */
+const workAtMost = 2e6;
 
 /**
  * Diameter of the largest circle within rings (outer and holes), mm: quartered cells, most promising
@@ -20,19 +21,32 @@ export function inscribedDiameter(rings: readonly (readonly Point[])[]): number 
 	const cellAt = cellsOver(rings);
 	const cells = firstCells(rings).map(([y, z, half]) => cellAt(y, z, half));
 	let best = cells.reduce((a, b) => (b.clear > a.clear ? b : a));
+	cells.sort((a, b) => a.most - b.most);
+	const edges = rings.reduce((sum, ring) => sum + ring.length, 0);
+	const probesAtMost = Math.max(1000, workAtMost / edges);
 	for (let probes = 0; ; probes++) {
-		cells.sort((a, b) => a.most - b.most);
 		const cell = cells.pop();
 		if (!cell || cell.most <= best.clear * enough) break;
-		if (probes === probesAtMost) return 2 * cell.most;
+		if (probes >= probesAtMost) return 2 * cell.most;
 		const half = cell.half / 2;
 		for (const [sy, sz] of corners) {
 			const quarter = cellAt(cell.y + sy * half, cell.z + sz * half, half);
 			if (quarter.clear > best.clear) best = quarter;
-			if (quarter.most > best.clear * enough) cells.push(quarter);
+			if (quarter.most > best.clear * enough) insert(cells, quarter);
 		}
 	}
 	return 2 * polished(best, cellAt);
+}
+
+/** Keeps the cells in the order of what they promise. */
+function insert(cells: Cell[], cell: Cell): void {
+	let [low, high] = [0, cells.length];
+	while (low < high) {
+		const middle = (low + high) >> 1;
+		if (cells[middle]!.most < cell.most) low = middle + 1;
+		else high = middle;
+	}
+	cells.splice(low, 0, cell);
 }
 
 const corners = [
