@@ -185,6 +185,23 @@ describe('saving from the Bench', () => {
 		await thick.fill('20');
 		await thick.press('Enter');
 		await page.getByText('changed since saved').waitFor();
+
+		// Somebody else saves in between: the later one is shown both and chooses.
+		const other = await page.context().newPage();
+		await other.goto(address);
+		const otherThick = other.getByRole('spinbutton', { name: 'Web thickness' });
+		await curve(other).waitFor();
+		await otherThick.fill('22');
+		await otherThick.press('Enter');
+		await other.getByRole('button', { name: 'Save', exact: true }).click();
+		await other.getByText('saved', { exact: true }).waitFor();
+		await page.getByRole('button', { name: 'Save', exact: true }).click();
+		const dialog = page.getByRole('dialog', { name: /Somebody saved this section/ });
+		expect(await dialog.getByRole('row', { name: /^tw/ }).textContent()).toMatch(/22.*20/s);
+		await dialog.getByRole('button', { name: 'Overwrite version 2' }).click();
+		await page.getByText('saved', { exact: true }).waitFor();
+		await other.reload();
+		await expect.poll(() => otherThick.inputValue()).toBe('20');
 		await page.context().close();
 	});
 });

@@ -46,6 +46,8 @@ const room = {
 	narrow: { head: 44, above: 34, below: 40, dimension: 18, gutter: 44, side: 6 }
 };
 const breakGap = 12;
+/** Depth on the drawing below which a section counts as very flat, px. */
+const leastDepth = 44;
 
 /** Lays the drawing out for a size in px and an extent in mm. */
 export function blockLayout(width: number, height: number, extent: Extent): BlockLayout {
@@ -102,7 +104,7 @@ function drawingScale(extent: Extent, widthRoom: number, depthRoom: number): num
 	const width = extent.right - extent.left || 1;
 	const fit = Math.min(depthRoom / depth, widthRoom / width);
 	const readable = Math.min(150, depthRoom * 0.4);
-	return fit * depth < readable * 0.6 ? readable / depth : fit;
+	return fit * depth < leastDepth ? readable / depth : fit;
 }
 
 function windowsOf(extent: Extent, scale: number, left: number, space: number): SectionWindow[] {

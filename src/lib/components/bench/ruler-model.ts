@@ -60,10 +60,9 @@ const fromRules = ({
 function ownFigures(section: PreparedSection, { N = 0, My = 0, Mz = 0 }: Demand): Figures {
 	const size = Math.hypot(My, Mz);
 	const axisAngle = size > 0 ? Math.atan2(Mz, My) * degrees : 0;
-	const single = My === 0 || Mz === 0;
 	const bent = bending(section, {
 		axisAngle,
-		transverse: single ? 'curvature-zero' : 'moment-zero',
+		transverse: 'moment-zero',
 		N
 	});
 	return {

@@ -2,7 +2,11 @@ import { formatNumber, formatQuantity, type Preferences } from '$lib/units';
 
 /** Figures as they stand on the drawing: short, in the person's units. */
 export const figures = (preferences: Preferences) => ({
-	length: (mm: number) => formatQuantity(mm, 'length', preferences, { digits: 5, trim: true }),
+	length: (mm: number) =>
+		formatQuantity(mm, 'length', preferences, {
+			digits: preferences.system === 'us' ? 4 : 5,
+			trim: true
+		}),
 	level: (mm: number) =>
 		formatQuantity(mm, 'length', preferences, {
 			decimals: preferences.system === 'us' ? 2 : 1
