@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { blockLayout, depthToPx, pxToDepth, sideToPx } from './block-layout';
+import { blockLayout, depthToPx, sideToPx } from './block-layout';
 
 const extent = (width: number, depth: number) => ({
 	left: -width / 2,
@@ -37,10 +37,5 @@ describe('the layout of the drawing', () => {
 		expect(sideToPx(layout, -100)).toBeCloseTo(layout.steel.left, 6);
 		expect(sideToPx(layout, 100)).toBeCloseTo(layout.steel.right, 6);
 		expect(sideToPx(layout, -60)).toBeNull();
-	});
-
-	it('reads a depth back from its height', () => {
-		const layout = blockLayout(720, 600, extent(400, 940));
-		expect(pxToDepth(layout, depthToPx(layout, 123.4))).toBeCloseTo(123.4, 9);
 	});
 });

@@ -125,10 +125,6 @@ function windowsOf(extent: Extent, scale: number, left: number, space: number): 
 export const depthToPx = (layout: BlockLayout, depth: number) =>
 	layout.top + (layout.extent.top - depth) * layout.pxPerMm;
 
-/** Depth at a height on the drawing, mm. */
-export const pxToDepth = (layout: BlockLayout, px: number) =>
-	layout.extent.top - (px - layout.top) / layout.pxPerMm;
-
 /** Place on the drawing of a distance to the side, in the window that shows it; null when broken off. */
 export function sideToPx(layout: BlockLayout, side: number): number | null {
 	const slack = 1e-6 / layout.pxPerMm;

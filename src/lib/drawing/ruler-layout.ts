@@ -38,7 +38,10 @@ export function rulerLayout(
 ): RulerLayout {
 	const most = Math.max(...marks.map(({ value }) => value), 1e-9);
 	const scale = scaleLinear([0, most * 1.01], [0, width]);
-	const wanted = marks.map((mark) => anchored(mark, scale(mark.value), measure(mark.label, size)));
+	const wanted = clearOfStart(
+		marks.map((mark) => anchored(mark, scale(mark.value), measure(mark.label, size))),
+		width
+	);
 	const placed: PlacedMark[] = [];
 	for (const label of placingOrder(wanted)) placed.push({ ...label, row: freeRow(label, placed) });
 	return {
@@ -58,10 +61,22 @@ const anchored = (mark: RulerMark, x: number, labelWidth: number): Anchored => (
 	labelX: x >= labelWidth ? x - labelWidth : Math.max(0, x - 2)
 });
 
+const beginsAt = ({ x, labelX }: Anchored) => labelX + 2 >= x;
+
+/** A label that would cover the line of one that begins near the left end begins at its mark too. */
+function clearOfStart(labels: readonly Anchored[], width: number): Anchored[] {
+	const starts = labels.filter(beginsAt).map(({ x }) => x);
+	return labels.map((label) => {
+		const covers = starts.some((x) => x >= label.labelX - gap && x < label.x);
+		const fits = label.x + label.labelWidth <= width;
+		return covers && fits && !beginsAt(label) ? { ...label, labelX: label.x - 2 } : label;
+	});
+}
+
 /** Labels that end at their mark from left to right, then those that begin there from right to left. */
 function placingOrder(labels: readonly Anchored[]): Anchored[] {
-	const ends = labels.filter(({ x, labelWidth }) => x >= labelWidth);
-	const begins = labels.filter(({ x, labelWidth }) => x < labelWidth);
+	const ends = labels.filter((label) => !beginsAt(label));
+	const begins = labels.filter(beginsAt);
 	return [...ends.sort((a, b) => a.x - b.x), ...begins.sort((a, b) => b.x - a.x)];
 }
 
