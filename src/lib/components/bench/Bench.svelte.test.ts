@@ -103,6 +103,17 @@ describe('demand cases', () => {
 	});
 });
 
+describe('an axial force that the section cannot carry', () => {
+	it('is told in place of a curve and of stresses', async () => {
+		const { user } = open();
+		await type(user, 'N', '-50000');
+		expect(screen.getByText(/has no state of balance/)).toBeInTheDocument();
+		expect(screen.queryByRole('slider', { name: 'Strain at the top' })).toBeNull();
+		await type(user, 'N', '-100');
+		expect(screen.getByRole('slider', { name: 'Strain at the top' })).toBeInTheDocument();
+	});
+});
+
 describe('bending by the keys', () => {
 	it('steps the handle on the curve and everything that follows it', async () => {
 		const { bench, user } = open();

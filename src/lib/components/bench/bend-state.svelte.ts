@@ -53,7 +53,7 @@ export class BendState {
 
 	/** Direction of the level line on the drawing: the neutral axis, or the asked axis when there is none. */
 	readonly seenAngle: number = $derived.by(() =>
-		levelAngle(this.state.neutralAxis?.angle ?? this.axisAngle)
+		levelAngle(this.state.neutralAxis?.angle ?? this.axisAngle, this.axisAngle)
 	);
 
 	/** Strain over the depth as drawn; all zero where no state exists. */
@@ -90,11 +90,14 @@ export class BendState {
 	}
 }
 
-/** An angle as the direction of a line, degrees in (−90, 90], free of the last digits' noise. */
-function levelAngle(degrees: number): number {
-	const turned = degrees - 180 * Math.ceil((degrees - 90) / 180);
-	const rounded = Math.round(turned * 1e6) / 1e6;
-	return rounded === -90 ? 90 : rounded + 0;
+/**
+ * The direction of a line as an angle within 90° of the asked axis, so that positive bending always
+ * has its tension at the bottom of the drawing; free of the last digits' noise.
+ */
+function levelAngle(degrees: number, asked: number): number {
+	const apart = degrees - asked;
+	const turned = asked + apart - 180 * Math.ceil((apart - 90) / 180);
+	return Math.round(turned * 1e6) / 1e6 + 0;
 }
 
 function strainLine({ e0, ky, kz }: ResponseState, angle: number): StrainLine {
