@@ -96,6 +96,16 @@ describe('demand cases', () => {
 		expect(bench.demands.map(({ name }) => name)).toEqual(['Crane']);
 	});
 
+	it('show no green while a check is missing in any of them', async () => {
+		const { user } = open();
+		expect(screen.getByText('The demand is met by every check made for it.')).toHaveClass('clear');
+		await user.click(screen.getByRole('button', { name: 'Add a case' }));
+		await type(user, 'Vz', '600');
+		await user.click(screen.getByRole('button', { name: /^Case 1/ }));
+		expect(screen.getByText('Case 1 is met by every check made for it.')).not.toHaveClass('clear');
+		expect(screen.getByText(/a check that applies to it is missing/)).toBeInTheDocument();
+	});
+
 	it('hold N while bending', async () => {
 		const { bench, user } = open();
 		await type(user, 'N', '-500');
