@@ -1,7 +1,7 @@
 import { codeSchema, standardSchema } from './code';
 import { demandSchema } from './demand';
 import { must } from './describe';
-import { envelopeFields } from './envelope';
+import { envelopeFields, noteSchema } from './envelope';
 import { listOf, oneOf, quantity } from './fields';
 import { grossSchema } from './gross';
 import { limits } from './limits';
@@ -38,6 +38,15 @@ const sectionClass = z.union([
 	z.enum(['compact', 'noncompact', 'slender'])
 ]);
 
+const classBasis = z.enum(['+My', '−My', 'N', 'demand']);
+const resistanceBasis = z.enum([
+	'plastic',
+	'effective-class-2',
+	'interpolated',
+	'elastic',
+	'effective'
+]);
+
 const momentSchema = z.object({
 	firstYieldY: figure('kNm'),
 	firstYieldZ: figure('kNm'),
@@ -67,7 +76,7 @@ const elementSchema = z.object({
 const classificationSchema = z.object({
 	standard: standardSchema,
 	overall: sectionClass,
-	basis: z.enum(['+My', '−My', 'N', 'demand']),
+	basis: classBasis,
 	elements: z.array(elementSchema),
 	governing: z.string(),
 	byCase: z.object({
@@ -104,7 +113,7 @@ const checkSchema = z.object({
 
 const resistanceSchema = z.object({
 	standard: standardSchema,
-	basis: z.enum(['plastic', 'effective-class-2', 'interpolated', 'elastic', 'effective']),
+	basis: resistanceBasis,
 	MyRd: figure('kNm'),
 	MyRdNegative: figure('kNm'),
 	MzRd: figure('kNm'),
@@ -124,11 +133,48 @@ const resistanceSchema = z.object({
 		.meta({ description: 'Null when a check that applies is missing.' })
 });
 
+const rulerFields = {
+	axisAngle: z.number().meta({ 'x-unit': '°', description: 'Axis of the moment, from y.' }),
+	countable: figure('kNm'),
+	firstYield: figure('kNm'),
+	fullPlastic: figure('kNm')
+};
+
+const token = z.union([
+	z.object({ text: z.string() }),
+	z.object({ quantity: z.enum(['moment', 'force']), value: z.number() }),
+	z.object({ quantity: z.literal('ratio'), value: z.number(), decimals: z.number() })
+]);
+
 const verdictSchema = z.object({
 	sentence: z.string(),
 	detail: z.string(),
+	sentenceTokens: z.array(token).meta({ description: 'The sentence with its numbers apart.' }),
+	detailTokens: z.array(token),
+	countable: z.object({ moment: figure('kNm'), basis: resistanceBasis.nullable() }),
+	governing: z.string().nullable(),
+	notChecked: z.array(z.string()),
 	status: z.enum(['passes', 'fails', 'incomplete', 'no-figure']),
-	notChecked: z.array(z.string())
+	clear: z.boolean().meta({
+		description:
+			'Every demand passes and nothing that may apply, member buckling included, is unchecked.'
+	}),
+	demand: z.string().nullable(),
+	ruler: z.object({ ...rulerFields, demand: figure('kNm') })
+});
+
+const demandStateSchema = z.object({
+	demand: z.string(),
+	class: sectionClass,
+	governing: z.string(),
+	basis: classBasis,
+	elements: z.array(elementSchema),
+	N: z.number().meta({ 'x-unit': 'kN' }),
+	...rulerFields,
+	moment: z.number().meta({ 'x-unit': 'kNm' }),
+	countableBasis: resistanceBasis.nullable(),
+	utilisation: figure(''),
+	missing: z.array(noteSchema).meta({ description: 'Checks that apply and are not built.' })
 });
 
 export const analyseAnswerSchema = z
@@ -140,6 +186,9 @@ export const analyseAnswerSchema = z
 		classification: classificationSchema.nullable(),
 		effective: effectiveSchema.nullable(),
 		resistance: resistanceSchema.nullable(),
+		demands: z
+			.array(demandStateSchema)
+			.meta({ description: 'One for each demand, in their order.' }),
 		verdict: verdictSchema.nullable().meta({ description: 'The same in plain words.' })
 	})
 	.meta({ id: 'AnalyseAnswer' });

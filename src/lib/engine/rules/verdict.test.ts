@@ -127,3 +127,19 @@ describe('ratios side by side', () => {
 		expect(written(9.163, 9.1516)).toBe('9.16 / 9.15');
 	});
 });
+
+describe('a clear verdict', () => {
+	it('is not given while buckling of the member may apply and is unchecked', () => {
+		const bent = verdictOn(stocky, { demands: [{ My: 100 }] });
+		expect(bent).toMatchObject({ status: 'passes', clear: false });
+		expect(bent.notChecked).toContain('lateral–torsional buckling');
+		expect(verdictOn(stocky, { demands: [{ N: -100 }] }).clear).toBe(false);
+	});
+
+	it('is given to tension, and to a round tube in bending', () => {
+		expect(verdictOn(stocky, { demands: [{ N: 100 }] }).clear).toBe(true);
+		const tube: SectionDefinition = { kind: 'circular-hollow', d: 200, t: 10, grade: 'S355' };
+		expect(verdictOn(tube, { demands: [{ My: 20 }] }).clear).toBe(true);
+		expect(verdictOn(tube, { demands: [{ My: 20 }, { My: 2000 }] }).clear).toBe(false);
+	});
+});

@@ -1,3 +1,4 @@
+import type { Note } from '../result';
 import type { PreparedSection } from '../section/prepared';
 import type { AnalysisFigures } from './analysis';
 import type { ClassifiedElement, DemandState, Resistance, SectionClass } from './result';
@@ -29,6 +30,8 @@ export interface Verdict {
 	notChecked: string[];
 	/** `no-figure`: nothing is demanded, or nothing may be counted for want of a rule. */
 	status: VerdictStatus;
+	/** Every demand passes and nothing that may apply to it, member buckling included, is unchecked. */
+	clear: boolean;
 	/** The demand that the verdict speaks of. */
 	demand: string | null;
 	ruler: VerdictRuler;
@@ -68,6 +71,7 @@ export function verdict(
 		governing: view?.element?.part ?? null,
 		notChecked: notChecked(figures, view?.class ?? null),
 		status: statusOf(figures, named),
+		clear: statusOf(figures, undefined) === 'passes' && !figures.notes.some(isMemberCheck),
 		demand: state?.demand ?? null,
 		ruler: view?.ruler ?? bareRuler(figures)
 	};
@@ -135,6 +139,9 @@ function statusOf(figures: AnalysisFigures, named: DemandState | undefined): Ver
 	const asked = named ? [named] : demands;
 	return asked.some(({ missing }) => missing.length > 0) ? 'incomplete' : 'no-figure';
 }
+
+const isMemberCheck = ({ code }: Note): boolean =>
+	code === 'ltb-not-checked' || code === 'member-buckling-not-checked';
 
 const uncheckedWords: Readonly<Record<string, string>> = {
 	'ltb-not-checked': 'lateral–torsional buckling',
