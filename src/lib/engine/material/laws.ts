@@ -151,3 +151,20 @@ export function segmentAt({ kinks }: StressStrainLaw, strain: number): number {
 export function initialModulus(law: StressStrainLaw): number {
 	return law.slopes[segmentAt(law, 0)]!;
 }
+
+/** Greatest stress that a law can give in tension and in compression, N/mm², both positive; infinite while it hardens. */
+export function lawLimits({ kinks, offsets, slopes }: StressStrainLaw): {
+	tension: number;
+	compression: number;
+} {
+	let tension = slopes.at(-1)! > 0 ? Infinity : 0;
+	let compression = slopes[0]! > 0 ? Infinity : 0;
+	kinks.forEach((kink, i) => {
+		for (const segment of [i, i + 1]) {
+			const stress = offsets[segment]! + slopes[segment]! * kink;
+			tension = Math.max(tension, stress);
+			compression = Math.max(compression, -stress);
+		}
+	});
+	return { tension, compression };
+}

@@ -1,4 +1,5 @@
 import type { PreparedSection } from '../section/prepared';
+import { bender, bentAtCurvature } from './bender';
 import { elasticPath, elasticUse, type ElasticPath } from './elastic-path';
 import { mechanicsOf, type Mechanics } from './law-groups';
 import type { BendingPath, FirstYield } from './state';
@@ -15,11 +16,36 @@ export function firstYield(section: PreparedSection, path: BendingPath): FirstYi
 }
 
 export function firstYieldOf(mechanics: Mechanics, path: BendingPath): FirstYield {
+	if (!Number.isFinite(path.N * 1e3)) return { curvature: null, moment: null };
 	const angle = path.axisAngle * radians;
 	const elastic = elasticPath(mechanics, angle, path.transverse, path.N * 1e3);
-	const curvature = yieldCurvature(mechanics, angle, elastic);
+	const straight = mechanics.groups.some(({ law }) => law.kinks.includes(0))
+		? balancedPath(mechanics, path, elastic)
+		: elastic;
+	const curvature = yieldCurvature(mechanics, angle, straight);
 	if (curvature === null) return { curvature: null, moment: null };
-	return { curvature: curvature * 1e3, moment: elastic.moment(curvature) * 1e-6 };
+	return { curvature: curvature * 1e3, moment: straight.moment(curvature) * 1e-6 };
+}
+
+/**
+ * The path of a section whose steel is stiffer in one sense than in the other: no straight lines,
+ * so that each curvature is balanced.
+ */
+function balancedPath(
+	mechanics: Mechanics,
+	{ axisAngle, transverse, N }: BendingPath,
+	elastic: ElasticPath
+): ElasticPath {
+	const b = bender(mechanics, axisAngle * radians);
+	const at = (curvature: number) => {
+		const guess = { e0: elastic.e0(curvature), turn: elastic.turn(curvature) };
+		return bentAtCurvature(b, transverse, N * 1e3, curvature, guess);
+	};
+	return {
+		e0: (curvature) => at(curvature).e0,
+		turn: (curvature) => at(curvature).turn,
+		moment: (curvature) => at(curvature).forces.M
+	};
 }
 
 /** 1/mm. The use of the section is convex in the curvature, so that secants from beyond close in. */
@@ -32,7 +58,7 @@ function yieldCurvature(
 		elasticUse(mechanics, angle, e0(curvature), curvature, turn(curvature)) - 1;
 	let low = 0;
 	let atLow = excess(0);
-	if (atLow >= 0) return null;
+	if (!(atLow < 0)) return null;
 	let high = 1e-3 / mechanics.reach;
 	let atHigh = excess(high);
 	while (atHigh < 0) {

@@ -1,7 +1,7 @@
 import type { Loop, Point } from '../geometry/boundary';
 import { frameAt } from '../geometry/frame';
 import { profileOf, type Profile } from '../geometry/profile';
-import { initialModulus } from '../material/laws';
+import { initialModulus, lawLimits } from '../material/laws';
 import type { StressStrainLaw } from '../material/law';
 import type { Material } from '../material/material';
 import type { PreparedSection } from '../section/prepared';
@@ -12,8 +12,11 @@ export interface LawGroup {
 	readonly law: StressStrainLaw;
 	/** Slope of the law at zero strain, N/mm². */
 	readonly modulus: number;
+	/** Strength of the full plastic block: the grade's, or less where the law never gets there. */
 	readonly fy: number;
 	readonly fyc: number;
+	/** Greatest stresses that the law can give, hardening included. */
+	readonly most: { readonly tension: number; readonly compression: number };
 	/** Strains at which to cut when tension and compression are told apart. */
 	readonly cuts: readonly number[];
 	readonly cutOffsets: readonly number[];
@@ -62,15 +65,23 @@ function lawGroups({ parts }: PreparedSection): LawGroup[] {
 		if (same) same.loops.push(...region.loops);
 		else found.push({ material, loops: [...region.loops] });
 	}
-	return found.map(({ material, loops }) => ({
-		loops,
-		law: material.law,
-		modulus: initialModulus(material.law),
-		fy: material.fy,
-		fyc: material.fyc,
-		...cutsOf(material.law)
-	}));
+	return found.map(({ material, loops }) => {
+		const most = lawLimits(material.law);
+		return {
+			loops,
+			law: material.law,
+			modulus: initialModulus(material.law),
+			fy: atMost(material.fy, most.tension),
+			fyc: atMost(material.fyc, most.compression),
+			most,
+			...cutsOf(material.law)
+		};
+	});
 }
+
+/** The strength itself unless the law falls short of it by more than rounding. */
+const atMost = (strength: number, most: number): number =>
+	most < strength * (1 - 1e-12) ? most : strength;
 
 function sameStrength(a: Material, b: Material): boolean {
 	if (a === b || a.law === b.law) return a.fy === b.fy && a.fyc === b.fyc;

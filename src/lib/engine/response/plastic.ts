@@ -2,7 +2,7 @@ import { momentCount } from '../geometry/flank-moments';
 import { momentsBelow, type Profile } from '../geometry/profile';
 import { weightedLevel } from '../geometry/weighted-level';
 import type { PreparedSection } from '../section/prepared';
-import { mechanicsOf, type Mechanics } from './law-groups';
+import { mechanicsOf, type LawGroup, type Mechanics } from './law-groups';
 import type { BendingPath, NeutralAxis } from './state';
 
 const radians = Math.PI / 180;
@@ -31,11 +31,16 @@ export function plasticMoment(section: PreparedSection, path: BendingPath): Plas
 	return plasticMomentOf(mechanicsOf(section), path);
 }
 
-export function plasticMomentOf(mechanics: Mechanics, path: BendingPath): PlasticState {
+export function plasticMomentOf(
+	mechanics: Mechanics,
+	path: BendingPath,
+	strengths: BlockStrengths = yieldStrengths
+): PlasticState {
 	const angle = path.axisAngle * radians;
 	const N = path.N * 1e3;
-	const turned = path.transverse === 'moment-zero' ? plasticTurn(mechanics, angle, N) : 0;
-	const at = turned === null ? null : plasticForces(mechanics, angle + turned, N);
+	const block = (turned: number) => plasticForces(mechanics, angle + turned, N, strengths);
+	const turned = path.transverse === 'moment-zero' ? plasticTurn(mechanics, block) : 0;
+	const at = turned === null ? null : block(turned);
 	if (turned === null || at === null) return noState;
 	const [c, s] = [Math.cos(turned), Math.sin(turned)];
 	const own = { M: at.M * c - at.T * s, T: at.M * s + at.T * c };
@@ -48,6 +53,11 @@ export function plasticMomentOf(mechanics: Mechanics, path: BendingPath): Plasti
 	};
 }
 
+/** Stresses of the block in one body, N/mm². */
+export type BlockStrengths = (group: LawGroup) => { tension: number; compression: number };
+
+const yieldStrengths: BlockStrengths = ({ fy, fyc }) => ({ tension: fy, compression: fyc });
+
 const noState: PlasticState = { moment: null, My: null, Mz: null, neutralAxis: null };
 
 /** The same line with its angle in (−90, 90]. */
@@ -56,19 +66,25 @@ export function neutralAxisAt(degrees: number, level: number): NeutralAxis {
 	return { distance: half % 2 === 0 ? level : -level, angle: degrees - 180 * half };
 }
 
-function plasticForces(mechanics: Mechanics, angle: number, N: number): PlasticForces | null {
-	const { groups } = mechanics;
+function plasticForces(
+	mechanics: Mechanics,
+	angle: number,
+	N: number,
+	strengths: BlockStrengths = yieldStrengths
+): PlasticForces | null {
 	const profiles = mechanics.profiles(angle);
-	const crushed = profiles.reduce((sum, p, i) => sum + groups[i]!.fyc * p.total[0]!, 0);
-	const stretched = profiles.reduce((sum, p, i) => sum + groups[i]!.fy * p.total[0]!, 0);
+	const stresses = mechanics.groups.map(strengths);
+	const crushed = profiles.reduce((sum, p, i) => sum + stresses[i]!.compression * p.total[0]!, 0);
+	const stretched = profiles.reduce((sum, p, i) => sum + stresses[i]!.tension * p.total[0]!, 0);
 	const slack = 1e-12 * (crushed + stretched);
-	if (N < -crushed - slack || N > stretched + slack) return null;
-	const weights = groups.map(({ fy, fyc }) => fy + fyc);
+	if (!(N >= -crushed - slack && N <= stretched + slack)) return null;
+	const weights = stresses.map(({ tension, compression }) => tension + compression);
 	const target = Math.min(Math.max(N + crushed, 0), crushed + stretched);
 	const level = weightedLevel(profiles, weights, target);
 	let [M, T] = [0, 0];
 	profiles.forEach((profile, i) => {
-		const forces = blockForces(profile, groups[i]!.fy, groups[i]!.fyc, level);
+		const { tension, compression } = stresses[i]!;
+		const forces = blockForces(profile, tension, compression, level);
 		M += forces.M;
 		T += forces.T;
 	});
@@ -87,9 +103,12 @@ function blockForces(profile: Profile, fy: number, fyc: number, level: number) {
 }
 
 /** How far the neutral axis turns from the asked axis until the transverse moment is zero; radians. */
-function plasticTurn(mechanics: Mechanics, angle: number, N: number): number | null {
+function plasticTurn(
+	mechanics: Mechanics,
+	block: (turned: number) => PlasticForces | null
+): number | null {
 	const across = (turned: number) => {
-		const at = plasticForces(mechanics, angle + turned, N);
+		const at = block(turned);
 		return at === null ? NaN : at.M * Math.sin(turned) + at.T * Math.cos(turned);
 	};
 	const scale = mechanics.squash * mechanics.reach;

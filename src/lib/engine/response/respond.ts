@@ -4,6 +4,7 @@ import { bendingStiffness, bentAtCurvature, bender, type Bender, type Bent } fro
 import { elasticPath, type ElasticPath } from './elastic-path';
 import { firstYieldOf } from './first-yield';
 import { mechanicsOf } from './law-groups';
+import { canCarry, momentLimits } from './limits';
 import { plasticMomentOf } from './plastic';
 import { risingRoot } from './rising-root';
 import { noState, stateReport } from './state-report';
@@ -49,22 +50,33 @@ export function bending(section: PreparedSection, path: BendingPath): Bending {
 	const firstYield = firstYieldOf(mechanics, path);
 	const plasticMoment = plasticMomentOf(mechanics, path).moment;
 	const bent = balancer(b, path, elastic);
+	const carries = canCarry(mechanics, path.N * 1e3);
+	const limits = once(() => (carries ? momentLimits(mechanics, path) : null));
 	const report = (state: Bent) => stateReport(b, state, firstYield.curvature);
 	return {
 		path,
 		firstYield,
 		plasticMoment,
-		atCurvature: (curvature) => report(bent(curvature * 1e-3)),
+		atCurvature: (curvature) =>
+			carries && Number.isFinite(curvature) ? report(bent(curvature * 1e-3)) : noState,
 		atMoment: (moment) => {
+			const within = limits();
+			if (!within || !(moment > within.least && moment < within.most)) return noState;
 			const state = bentAtMoment(b, path, elastic, bent, moment * 1e6);
 			return state ? report(state) : noState;
 		},
 		atPlane: (plane) => report(bentByPlane(b, plane)),
 		momentAt: (curvature) => {
+			if (!carries) return null;
 			const state = bent(curvature * 1e-3);
 			return state.converged ? state.forces.M * 1e-6 : null;
 		}
 	};
+}
+
+function once<T>(make: () => T): () => T {
+	let made: { value: T } | undefined;
+	return () => (made ??= { value: make() }).value;
 }
 
 /** Balanced planes by curvature (1/mm); each search begins from the plane before, scaled. */
@@ -117,7 +129,9 @@ function bentByPlane(b: Bender, { e0, ky, kz }: StrainPlane): Bent {
 	const [c, s] = [Math.cos(b.angle), Math.sin(b.angle)];
 	const curvature = (ky * c + kz * s) * 1e-3;
 	const turn = (kz * c - ky * s) * 1e-3;
-	return { e0, curvature, turn, forces: b.evaluate(e0, curvature, turn), converged: true };
+	const forces = b.evaluate(e0, curvature, turn);
+	const converged = Number.isFinite(forces.N + forces.M + forces.T);
+	return { e0, curvature, turn, forces, converged };
 }
 
 /** States along a path as the contract's POST /response gives them. */

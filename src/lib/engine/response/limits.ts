@@ -1,0 +1,38 @@
+import { stressAt } from '../material/laws';
+import type { Mechanics } from './law-groups';
+import { plasticMomentOf, type BlockStrengths } from './plastic';
+import type { BendingPath } from './state';
+
+/** No law is followed beyond this strain, a plain number. */
+export const furthestStrain = 10;
+
+/** What a law can give at most within `furthestStrain`, N/mm². */
+const mostStresses: BlockStrengths = ({ law, most }) => ({
+	tension: Number.isFinite(most.tension) ? most.tension : stressAt(law, furthestStrain),
+	compression: Number.isFinite(most.compression)
+		? most.compression
+		: -stressAt(law, -furthestStrain)
+});
+
+/** Whether any state at all can carry N (newton). */
+export function canCarry(mechanics: Mechanics, N: number): boolean {
+	let [crushed, stretched] = [0, 0];
+	mechanics.profiles(0).forEach(({ total }, i) => {
+		const { tension, compression } = mostStresses(mechanics.groups[i]!);
+		stretched += tension * total[0]!;
+		crushed += compression * total[0]!;
+	});
+	const slack = 1e-12 * (crushed + stretched);
+	return N >= -crushed - slack && N <= stretched + slack;
+}
+
+/**
+ * The moments about the axis (kNm) between which every state under the path's N lies; null where
+ * no state carries N.
+ */
+export function momentLimits(mechanics: Mechanics, path: BendingPath) {
+	const most = plasticMomentOf(mechanics, path, mostStresses).moment;
+	const turned = { ...path, axisAngle: path.axisAngle + 180 };
+	const least = plasticMomentOf(mechanics, turned, mostStresses).moment;
+	return most === null || least === null ? null : { least: -least, most };
+}
