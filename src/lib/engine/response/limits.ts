@@ -26,6 +26,9 @@ export function canCarry(mechanics: Mechanics, N: number): boolean {
 	return N >= -crushed - slack && N <= stretched + slack;
 }
 
+/** Nearer to the limit than this share of it, a moment would need a curvature without end. */
+const unreachable = 1e-10;
+
 /**
  * The moments about the axis (kNm) between which every state under the path's N lies; null where
  * no state carries N.
@@ -34,5 +37,7 @@ export function momentLimits(mechanics: Mechanics, path: BendingPath) {
 	const most = plasticMomentOf(mechanics, path, mostStresses).moment;
 	const turned = { ...path, axisAngle: path.axisAngle + 180 };
 	const least = plasticMomentOf(mechanics, turned, mostStresses).moment;
-	return most === null || least === null ? null : { least: -least, most };
+	if (most === null || least === null) return null;
+	const margin = unreachable * Math.max(Math.abs(most), Math.abs(least));
+	return { least: margin - least, most: most - margin };
 }
