@@ -1,6 +1,7 @@
 import { mkdirSync } from 'node:fs';
 import type { TestProject } from 'vitest/node';
 import { ensureBuild } from '../../scripts/lib/build.js';
+import { isFree } from '../../scripts/lib/ports.js';
 import { chromium, ensureSystem, findProgram } from '../../scripts/lib/system-packages.js';
 import { startInstanceOf } from './instance';
 import { startMailFake } from './mail';
@@ -28,6 +29,13 @@ const undo = async (endings: Ending[]) => {
 	for (const end of endings.reverse()) await end().catch(() => undefined);
 };
 
+/** PORT where it is given and free; otherwise a free port is taken, so that a running app is no obstacle. */
+const wishedPort = async (): Promise<{ PORT?: string }> => {
+	const wish = Number(process.env.PORT);
+	const usable = Number.isInteger(wish) && wish > 0 && wish < 65_536 && (await isFree(wish));
+	return usable ? { PORT: String(wish) } : {};
+};
+
 const start = async (project: TestProject, endings: Ending[]) => {
 	mkdirSync('tests/output', { recursive: true });
 	await ensureSystem(chromium);
@@ -36,7 +44,7 @@ const start = async (project: TestProject, endings: Ending[]) => {
 	endings.push(database.release);
 	const mail = await startMailFake();
 	endings.push(mail.stop);
-	const env = { DATABASE_URL: database.url, SMTP_URL: mail.smtpUrl };
+	const env = { DATABASE_URL: database.url, SMTP_URL: mail.smtpUrl, ...(await wishedPort()) };
 	const app = await startInstanceOf(buildFolder, env);
 	endings.push(app.stop);
 	project.provide('baseUrl', app.url);
