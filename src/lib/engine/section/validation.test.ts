@@ -81,8 +81,8 @@ const wrong: [string, SectionDefinition, string][] = [
 	['a negative radius', { ...i, r: -1 }, 'r: Root radius must be 0 or more, not -1.'],
 	[
 		'a weld that does not fit',
-		{ ...i, fabrication: 'welded', weldLeg: 200 },
-		'weldLeg: Weld leg 200 mm must not be more than half the clear web depth, 139.3 mm.'
+		{ ...i, h: 40, fabrication: 'welded', weldLeg: 10 },
+		'weldLeg: Weld leg 10 mm must not be more than half the clear web depth, 9.3 mm.'
 	],
 	[
 		'a leg and a throat that differ',

@@ -5,7 +5,7 @@ import type { BoxSection } from '../definition';
 import type { ShapeResult } from '../shape';
 import { conditionIssues, fits, millimetres, needed, optional, sizeIssues } from '../sizes';
 import { boxTorsion } from '../torsion/box';
-import { weldFields, weldIssues, weldLegOf } from '../weld-leg';
+import { weldFields, weldIssues, type WeldPlace } from '../weld-leg';
 
 /** Sizes of a box with every default filled in, mm. */
 export interface BoxSizes {
@@ -62,35 +62,41 @@ function boxIssues(definition: BoxSection): Issue[] {
 }
 
 function fitIssues(definition: BoxSection): Issue[] {
-	const { h, bTop, bBottom, tw, tfTop, tfBottom, webGap } = boxSizes(definition);
+	const sizes = boxSizes(definition);
+	const { h, bTop, bBottom, tw, tfTop, tfBottom, webGap } = sizes;
 	const clear = h - tfTop - tfBottom;
 	const overWebs = webGap + 2 * tw;
-	const leg = weldLegOf(definition);
-	return [
-		...conditionIssues([
-			[
-				clear > 0,
-				'tfTop',
-				`Flange thicknesses ${millimetres(tfTop)} and ${millimetres(tfBottom)} leave no web in a depth of ${millimetres(h)}.`
-			],
-			[
-				fits(overWebs, bTop),
-				'webGap',
-				`Width over the webs, ${millimetres(overWebs)}, must not be more than the top flange width ${millimetres(bTop)}.`
-			],
-			[
-				fits(overWebs, bBottom),
-				'webGap',
-				`Width over the webs, ${millimetres(overWebs)}, must not be more than the bottom flange width ${millimetres(bBottom)}.`
-			],
-			[
-				clear <= 0 || fits(2 * leg, clear),
-				'weldLeg',
-				`Weld leg ${millimetres(leg)} must not be more than half the clear web depth, ${millimetres(clear / 2)}.`
-			]
-		]),
-		...weldIssues(definition)
-	];
+	const issues = conditionIssues([
+		[
+			clear > 0,
+			'tfTop',
+			`Flange thicknesses ${millimetres(tfTop)} and ${millimetres(tfBottom)} leave no web in a depth of ${millimetres(h)}.`
+		],
+		[
+			fits(overWebs, bTop),
+			'webGap',
+			`Width over the webs, ${millimetres(overWebs)}, must not be more than the top flange width ${millimetres(bTop)}.`
+		],
+		[
+			fits(overWebs, bBottom),
+			'webGap',
+			`Width over the webs, ${millimetres(overWebs)}, must not be more than the bottom flange width ${millimetres(bBottom)}.`
+		]
+	]);
+	return issues.length > 0 ? issues : weldIssues(definition, outsideWeld(sizes));
+}
+
+/** Fillets stand outside the webs, on the outstands of both flanges. */
+function outsideWeld({ h, bTop, bBottom, tw, tfTop, tfBottom, webGap }: BoxSizes): WeldPlace {
+	return {
+		outstand: (Math.min(bTop, bBottom) - webGap) / 2 - tw,
+		web: (h - tfTop - tfBottom) / 2,
+		webWords: 'half the clear web depth',
+		joints: [
+			[tw, tfTop],
+			[tw, tfBottom]
+		]
+	};
 }
 
 function boxLoops({ h, bTop, bBottom, tw, tfTop, tfBottom, webGap, middle: c }: BoxSizes) {

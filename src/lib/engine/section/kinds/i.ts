@@ -5,7 +5,7 @@ import type { ISection } from '../definition';
 import type { ShapeResult } from '../shape';
 import { conditionIssues, fits, millimetres, needed, optional, radius, sizeIssues } from '../sizes';
 import { iTorsion } from '../torsion/i';
-import { weldFields, weldIssues, weldLegOf } from '../weld-leg';
+import { weldFields, weldIssues, type WeldPlace } from '../weld-leg';
 
 /** Sizes of an I with every default filled in, mm. */
 export interface ISizes {
@@ -69,7 +69,6 @@ function fitIssues(definition: ISection): Issue[] {
 	const { h, bTop, tfTop, bBottom, tfBottom, tw, r } = iSizes(definition);
 	const clear = h - tfTop - tfBottom;
 	const outstand = (Math.min(bTop, bBottom) - tw) / 2;
-	const leg = weldLegOf(definition);
 	const issues = conditionIssues([
 		[
 			clear > 0,
@@ -88,6 +87,15 @@ function fitIssues(definition: ISection): Issue[] {
 		]
 	]);
 	if (issues.length > 0) return issues;
+	const place: WeldPlace = {
+		outstand,
+		web: clear / 2,
+		webWords: 'half the clear web depth',
+		joints: [
+			[tw, tfTop],
+			[tw, tfBottom]
+		]
+	};
 	return [
 		...conditionIssues([
 			[
@@ -99,14 +107,9 @@ function fitIssues(definition: ISection): Issue[] {
 				fits(r, outstand),
 				'r',
 				`Root radius ${millimetres(r)} must not be more than the flange outstand, ${millimetres(outstand)}.`
-			],
-			[
-				fits(2 * leg, clear),
-				'weldLeg',
-				`Weld leg ${millimetres(leg)} must not be more than half the clear web depth, ${millimetres(clear / 2)}.`
 			]
 		]),
-		...weldIssues(definition)
+		...(definition.fabrication === 'welded' ? weldIssues(definition, place) : [])
 	];
 }
 

@@ -5,7 +5,7 @@ import type { TeeSection } from '../definition';
 import type { ShapeResult } from '../shape';
 import { conditionIssues, fits, millimetres, needed, radius, sizeIssues } from '../sizes';
 import { teeTorsion } from '../torsion/tee';
-import { weldFields, weldIssues, weldLegOf } from '../weld-leg';
+import { weldFields, weldIssues } from '../weld-leg';
 
 const rootRadius = ({ fabrication, r = 0 }: TeeSection): number =>
 	fabrication === 'rolled' ? r : 0;
@@ -46,7 +46,7 @@ function teeIssues(definition: TeeSection): Issue[] {
 function fitIssues(definition: TeeSection): Issue[] {
 	const { h, b, tw, tf } = definition;
 	const r = rootRadius(definition);
-	const [clear, outstand, leg] = [h - tf, (b - tw) / 2, weldLegOf(definition)];
+	const [clear, outstand] = [h - tf, (b - tw) / 2];
 	return [
 		...conditionIssues([
 			[
@@ -68,15 +68,17 @@ function fitIssues(definition: TeeSection): Issue[] {
 				outstand < 0 || fits(r, outstand),
 				'r',
 				`Root radius ${millimetres(r)} must not be more than the flange outstand, ${millimetres(outstand)}.`
-			],
-			[
-				clear <= 0 || fits(leg, clear),
-				'weldLeg',
-				`Weld leg ${millimetres(leg)} must not be more than the web depth below the flange, ${millimetres(clear)}.`
 			]
 		]),
-		...weldIssues(definition)
+		...weldedIssues(definition, clear, outstand)
 	];
+}
+
+function weldedIssues(definition: TeeSection, clear: number, outstand: number): Issue[] {
+	const { tw, tf, fabrication } = definition;
+	if (fabrication !== 'welded' || clear <= 0 || outstand < 0) return [];
+	const webWords = 'the web depth below the flange';
+	return weldIssues(definition, { outstand, web: clear, webWords, joints: [[tw, tf]] });
 }
 
 function webLoop(definition: TeeSection): Loop {
