@@ -24,6 +24,8 @@ export interface Catalogue {
 		readonly id: string;
 		readonly title: string;
 		readonly standard: string;
+		/** Edition, and how the dimensions were confirmed. */
+		readonly source: string;
 		/** SHA-256 of the shapes below; the same as long as nothing in them changes. */
 		readonly contentHash: string;
 	};
@@ -35,11 +37,11 @@ export interface Catalogue {
  * Dimensions only: properties are the engine's. Throws when a file of the release is damaged.
  */
 export function catalogueShapes(root = process.cwd()): Catalogue[] {
-	return catalogueSources.map((source) => {
-		const { id, title, standard } = source;
-		const shapes = rowsOf(resolve(root, 'data', source.file)).map((row) => shapeIn(source, row));
+	return catalogueSources.map((listed) => {
+		const { id, title, standard, source } = listed;
+		const shapes = rowsOf(resolve(root, 'data', listed.file)).map((row) => shapeIn(listed, row));
 		const contentHash = createHash('sha256').update(JSON.stringify(shapes)).digest('hex');
-		return { catalogue: { id, title, standard, contentHash }, shapes };
+		return { catalogue: { id, title, standard, source, contentHash }, shapes };
 	});
 }
 

@@ -56,6 +56,7 @@ export interface CatalogueRow {
 	slug: string;
 	standard: string;
 	title: string;
+	source: string;
 	shapeCount: number;
 	contentHash: string;
 }

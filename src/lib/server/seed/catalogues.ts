@@ -12,7 +12,7 @@ import { shapeRow, type ShapeRow } from './shape-row';
 /** Changes with the shipped content, and with the engine that computes the properties. */
 const hashOf = ({ catalogue }: Catalogue) =>
 	createHash('sha256')
-		.update([catalogue.contentHash, engineVersion, schemaVersion].join())
+		.update([catalogue.contentHash, catalogue.source, engineVersion, schemaVersion].join())
 		.digest('hex');
 
 const rowsOf = ({ catalogue, shapes }: Catalogue, catalogueId: string): ShapeRow[] =>
@@ -26,10 +26,10 @@ const rowsOf = ({ catalogue, shapes }: Catalogue, catalogueId: string): ShapeRow
 const seedOne = async (source: Catalogue, known: string | undefined): Promise<number> => {
 	const id = known ?? newId();
 	const rows = rowsOf(source, id);
-	const { id: slug, standard, title } = source.catalogue;
+	const { id: slug, ...told } = source.catalogue;
 	const contentHash = hashOf(source);
 	await writeTransaction(async (tx) => {
-		await writeCatalogue(tx, id, { slug, standard, title, shapeCount: rows.length, contentHash });
+		await writeCatalogue(tx, id, { ...told, slug, shapeCount: rows.length, contentHash });
 		await writeShapes(tx, rows);
 		await dropOtherShapes(
 			tx,
