@@ -44,7 +44,7 @@ function gradeOf(
 	{ oneThickness }: Shape,
 	thickest: number
 ): PartGrade {
-	const own = definition.partGrades?.[part.name];
+	const own = ownGrade(definition, part.name);
 	if (own !== undefined)
 		return { grade: own, path: `partGrades.${part.name}`, thickness: part.thickness };
 	const thickness = oneThickness ? thickest : part.thickness;
@@ -52,6 +52,10 @@ function gradeOf(
 	const list = definition.kind === 'plates' ? 'plates' : 'regions';
 	return { grade: part.grade, path: `${list}.${index}.grade`, thickness };
 }
+
+/** A part may be called `constructor`: only what was written counts, not what objects inherit. */
+const ownGrade = ({ partGrades = {} }: SectionDefinition, name: string) =>
+	Object.hasOwn(partGrades, name) ? partGrades[name] : undefined;
 
 /** Names of `partGrades` that the section does not have. */
 export function partGradeIssues({ partGrades = {} }: SectionDefinition, shape: Shape): Issue[] {

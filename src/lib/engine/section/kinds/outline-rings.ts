@@ -5,6 +5,7 @@ import { ringArea, wound } from '../../geometry/rings';
 import { segmentGap } from '../../geometry/segments';
 import { windingFault } from '../../geometry/winding';
 import type { Issue } from '../../result';
+import { sameLength } from '../../tolerances';
 import { millimetres } from '../sizes';
 
 /** Rings of one region, mm. */
@@ -34,7 +35,21 @@ export function regionIssues(region: RegionRings, label: Label, tolerance: numbe
 		);
 		return message === null ? [] : [{ path: ringPath(label, i), message }];
 	});
-	return alone.length > 0 ? alone : holeIssues(rings, label, tolerance);
+	if (alone.length > 0) return alone;
+	const holes = holeIssues(rings, label, tolerance);
+	return holes.length > 0 ? holes : steelIssues(region, label);
+}
+
+/** Holes that together take away all that the outer ring encloses. */
+function steelIssues({ outer, holes }: RegionRings, label: Label): Issue[] {
+	const whole = Math.abs(ringArea(outer));
+	const taken = holes.reduce((sum, hole) => sum + Math.abs(ringArea(hole)), 0);
+	if (whole - taken > sameLength * whole) return [];
+	const message =
+		holes.length === 1
+			? `The hole${label.name} fills the whole outer ring and leaves no steel.`
+			: `The holes${label.name} fill the whole outer ring and leave no steel.`;
+	return [{ path: ringPath(label, 1), message }];
 }
 
 const ringName = (i: number): string => (i === 0 ? 'outer ring' : `hole ${i}`);
