@@ -2,9 +2,7 @@ import type { Handle, RequestEvent } from '@sveltejs/kit';
 import { config } from '../config';
 import { authJs, foundStanding } from './auth-js';
 import { personIn, wishedFirm } from './current-firm';
-
-const hasSessionCookie = ({ cookies }: RequestEvent) =>
-	cookies.getAll().some(({ name }) => name.includes('authjs.session-token'));
+import { hasSessionCookie } from './session-cookie';
 
 const personBehind = async (event: RequestEvent): Promise<App.Locals['person']> => {
 	const session = await event.locals.auth();
