@@ -1,4 +1,4 @@
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, describe, expect, inject, it } from 'vitest';
 import { errorSchema } from '$lib/api/error';
 import { limits } from '$lib/api/limits';
 import { startInstance, type Instance } from '../setup/instance';
@@ -82,6 +82,56 @@ describe('refusals', () => {
 	it('415: another content type', async () => {
 		const answer = await raw(JSON.stringify({ section: flat }), { 'content-type': 'text/csv' });
 		expect(refusal(answer)).toMatchObject({ status: 415, code: 'unsupported_media_type' });
+	});
+
+	it.each(['text/plain', 'application/x-www-form-urlencoded', 'multipart/form-data; boundary=x'])(
+		'415: what a form sends, %s, from anywhere',
+		async (type) => {
+			for (const path of ['/api/v1/analyse', '/api/v1/response'])
+				for (const origin of [undefined, 'https://elsewhere.example']) {
+					const headers = { 'content-type': type, ...(origin === undefined ? {} : { origin }) };
+					const answer = await call(path, { method: 'POST', headers, body: 'a=b' });
+					expect(refusal(answer)).toMatchObject({ status: 415, code: 'unsupported_media_type' });
+				}
+		}
+	);
+
+	it('403: a form that another site sends to a page', async () => {
+		const sent = (origin: Record<string, string>) =>
+			fetch(`${inject('baseUrl')}/sign-in?/password`, {
+				...{ method: 'POST', redirect: 'manual' },
+				headers: { accept: 'text/html', ...origin },
+				body: new URLSearchParams({ email: 'nobody@firm.example', password: 'not the one' })
+			});
+		for (const origin of ['https://elsewhere.example', 'null'])
+			expect((await sent({ origin })).status).toBe(403);
+		expect((await sent({})).status).toBe(403);
+		expect((await sent({ origin: inject('baseUrl') })).status).not.toBe(403);
+	});
+
+	it('403: a write that another site sends with a session', async () => {
+		const headers = {
+			...json,
+			origin: 'https://elsewhere.example',
+			cookie: 'authjs.session-token=anything'
+		};
+		for (const path of ['/api/v1/sections', '/api/v1/analyse'])
+			expect(refusal(await call(path, { method: 'POST', headers, body: '{}' }))).toMatchObject({
+				status: 403,
+				code: 'other_origin'
+			});
+	});
+
+	it('400: numbers that no steel section has, at once', async () => {
+		const section = { ...flat, grade: { fy: 355, E: 1e308 } };
+		expect(refusal(await post('/api/v1/analyse', { section })).issues?.[0]?.path).toBe(
+			'section.grade.E'
+		);
+		const at = { strainPlanes: [{ e0: 0, ky: 1e308, kz: 0 }] };
+		expect(refusal(await post('/api/v1/response', { section: flat, at }))).toMatchObject({
+			status: 400,
+			issues: [{ path: 'at.strainPlanes.0.ky' }]
+		});
 	});
 
 	it('leaves the connection good for the next call when a large body was not wanted', async () => {

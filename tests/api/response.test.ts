@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { responseAnswerSchema } from '$lib/api/response';
 import { sectionKinds } from '$lib/api/section';
 import { exampleSections } from '$lib/server/http/compute/example-sections';
-import { post } from './call';
+import { call, post } from './call';
 
 const rectangle = { kind: 'flat', b: 100, h: 200, grade: 250 };
 /** fy·b·h²/6 in kNm. */
@@ -85,6 +85,26 @@ describe('POST /api/v1/response', () => {
 		});
 		expect(states[0]).toMatchObject({ converged: false, moment: null });
 		expect(notes[0]?.code).toBe('residual_not_built');
+	});
+
+	it('lets others have their answer while it computes', async () => {
+		const outer = Array.from({ length: 1000 }, (_, i) => {
+			const [turn, radius] = [(i * Math.PI) / 500, 500 + 50 * (i % 2)];
+			return [radius * Math.cos(turn), radius * Math.sin(turn)];
+		});
+		const curvature = Array.from({ length: 800 }, (_, i) => Math.sin(i * 17) / 10);
+		let done = false;
+		const long = asked({
+			section: { kind: 'outline', outer, grade: 355 },
+			axisAngle: 10,
+			at: { curvature }
+		}).then(() => (done = true));
+		const started = performance.now();
+		const health = await call('/api/v1/health');
+		expect(health.status).toBe(200);
+		expect(done).toBe(false);
+		expect(performance.now() - started).toBeLessThan(1500);
+		await long;
 	});
 
 	it('takes as many states as it says', async () => {

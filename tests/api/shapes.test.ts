@@ -19,6 +19,14 @@ describe('GET /api/v1/catalogues', () => {
 		expect(items.reduce((sum, { count }) => sum + count, 0)).toBeGreaterThan(2200);
 		expect(items.flatMap(({ families }) => families)).toContain('IPE');
 	});
+
+	it('says of every catalogue which edition it follows and how it was confirmed', async () => {
+		const { body } = await call('/api/v1/catalogues');
+		for (const { source } of catalogueListSchema.parse(body).items) {
+			expect(source).toMatch(/EN 10\d{3}(-\d)?:\d{4}|ASTM A\d+/);
+			expect(source).toContain('Confirmed by');
+		}
+	});
 });
 
 describe('GET /api/v1/shapes', () => {
@@ -50,6 +58,23 @@ describe('GET /api/v1/shapes', () => {
 		expect(heavy.items.map(({ id }) => id)).toEqual(light.items.map(({ id }) => id).reverse());
 		const catalogue = light.items[0]?.catalogue ?? '';
 		expect((await list(`catalogue=${catalogue}&family=IPE`)).total).toBe(light.total);
+	});
+
+	it('filters by standard', async () => {
+		const { items, total } = await list('standard=EN%2010056-1&pageSize=200');
+		expect(total).toBeGreaterThan(0);
+		expect(total).toBeLessThan((await list('pageSize=1')).total);
+		expect(items.every(({ standard }) => standard === 'EN 10056-1')).toBe(true);
+	});
+
+	it('refuses a parameter that it does not know, and names those that it does', async () => {
+		const { status, body } = await call('/api/v1/shapes?standart=EN%2010056-1');
+		expect({ status, body }).toMatchObject({
+			status: 400,
+			body: { error: { code: 'invalid_request', issues: [{ path: 'standart' }] } }
+		});
+		expect(JSON.stringify(body)).toContain('did you mean');
+		expect(JSON.stringify(body)).toContain('pageSize');
 	});
 
 	it('joins words, filter and sort', async () => {

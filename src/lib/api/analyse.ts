@@ -2,19 +2,12 @@ import { codeSchema, standardSchema } from './code';
 import { demandSchema } from './demand';
 import { must } from './describe';
 import { envelopeFields, noteSchema } from './envelope';
-import { listOf, oneOf, quantity } from './fields';
+import { listOf } from './fields';
 import { grossSchema } from './gross';
 import { limits } from './limits';
+import { stiffenersSchema } from './stiffeners';
 import { namesOneTarget, targetFields, targetMissing } from './target';
 import { z } from './zod';
-
-const stiffeners = z.object(
-	{
-		spacing: quantity('Spacing of stiffeners', 'mm'),
-		endPost: oneOf('endPost', ['rigid', 'non-rigid'])
-	},
-	{ error: must('stiffeners', 'an object with spacing and endPost') }
-);
 
 export const analyseRequestSchema = z
 	.object(
@@ -23,7 +16,7 @@ export const analyseRequestSchema = z
 			code: codeSchema.optional(),
 			demand: demandSchema.optional(),
 			demands: listOf('demands', demandSchema, limits.demands).optional(),
-			stiffeners: stiffeners.optional()
+			stiffeners: stiffenersSchema.optional()
 		},
 		{ error: must('The request', 'an object with section or shapeId') }
 	)

@@ -1,12 +1,15 @@
 import type { CodeChoice } from '$lib/engine/rules/result';
 import { must } from './describe';
-import { oneOf, quantity } from './fields';
+import { oneOf, strict, within } from './fields';
+import { ranges } from './ranges';
 import { z } from './zod';
 
-const factor = (title: string) =>
-	quantity(title, '').refine((value) => value > 0, {
-		error: (issue) => `${title} must be greater than 0, not ${String(issue.input)}.`
-	});
+const factor = (title: string) => within(title, '', ranges.partialFactor);
+
+const shearEta = z
+	.number({ error: must('eta', '1 or 1.2') })
+	.refine((value) => [1, 1.2].includes(value), { error: must('eta', '1 or 1.2') })
+	.meta({ title: 'eta', enum: [1, 1.2] });
 
 export const strengthBasisSchema = oneOf('strengthBasis', ['code-table', 'product-standard']);
 
@@ -20,24 +23,19 @@ export const standardSchema = oneOf('standard', [
 ]);
 
 /** The code of practice and the choices it leaves open; what is absent takes its default. */
-export const codeSchema = z
-	.object(
-		{
-			standard: standardSchema.optional(),
-			strengthBasis: strengthBasisSchema.optional(),
-			gammaM0: factor('gammaM0').optional(),
-			gammaM1: factor('gammaM1').optional(),
-			gammaM2: factor('gammaM2').optional(),
-			eta: factor('eta').optional(),
-			method: oneOf('method', ['LRFD', 'ASD']).optional(),
-			classAlpha: oneOf('classAlpha', ['actual-N', 'proportional']).optional(),
-			allowEffectiveClass2: z
-				.boolean({ error: must('allowEffectiveClass2', 'true or false') })
-				.optional()
-		},
-		{ error: must('code', 'an object with a standard') }
-	)
-	.meta({ id: 'Code', description: 'Code of practice and the choices it leaves open.' });
+export const codeSchema = strict('code', {
+	standard: standardSchema.optional(),
+	strengthBasis: strengthBasisSchema.optional(),
+	gammaM0: factor('gammaM0').optional(),
+	gammaM1: factor('gammaM1').optional(),
+	gammaM2: factor('gammaM2').optional(),
+	eta: shearEta.optional(),
+	method: oneOf('method', ['LRFD', 'ASD']).optional(),
+	classAlpha: oneOf('classAlpha', ['actual-N', 'proportional']).optional(),
+	allowEffectiveClass2: z
+		.boolean({ error: must('allowEffectiveClass2', 'true or false') })
+		.optional()
+}).meta({ id: 'Code', description: 'Code of practice and the choices it leaves open.' });
 
 /** The code's fields all fit what the engine takes; a difference is a compile error. */
 export const codeChoiceOf = ({

@@ -1,27 +1,22 @@
 import type { Demand } from '$lib/engine/rules/result';
-import { must } from './describe';
-import { quantity, text } from './fields';
+import { strict, text, within } from './fields';
 import { limits } from './limits';
-import { z } from './zod';
+import { ranges } from './ranges';
+import type { z } from './zod';
 
 /** Factored design effects; tension positive, My positive puts the bottom in tension. */
-export const demandSchema = z
-	.object(
-		{
-			name: text('Name of a demand', limits.name).optional(),
-			N: quantity('Axial force N', 'kN').optional(),
-			My: quantity('Moment My', 'kNm').optional(),
-			Mz: quantity('Moment Mz', 'kNm').optional(),
-			Vy: quantity('Shear Vy', 'kN').optional(),
-			Vz: quantity('Shear Vz', 'kN').optional(),
-			unbracedLength: quantity('Unbraced length', 'mm').optional(),
-			C1: quantity('Moment factor C1', '').optional(),
-			zg: quantity('Height of the load above the shear centre zg', 'mm').optional()
-		},
-		{ error: must('A demand', 'an object with N, My, Mz, Vy, Vz') }
-	)
-	.meta({
-		id: 'Demand',
-		description:
-			'Factored design effects. Tension positive; My positive puts the bottom in tension, Mz positive the right.'
-	}) satisfies z.ZodType<Demand>;
+export const demandSchema = strict('A demand', {
+	name: text('Name of a demand', limits.name).optional(),
+	N: within('Axial force N', 'kN', ranges.force).optional(),
+	My: within('Moment My', 'kNm', ranges.moment).optional(),
+	Mz: within('Moment Mz', 'kNm', ranges.moment).optional(),
+	Vy: within('Shear Vy', 'kN', ranges.force).optional(),
+	Vz: within('Shear Vz', 'kN', ranges.force).optional(),
+	unbracedLength: within('Unbraced length', 'mm', ranges.unbracedLength).optional(),
+	C1: within('Moment factor C1', '', ranges.momentFactor).optional(),
+	zg: within('Height of the load above the shear centre zg', 'mm', ranges.loadHeight).optional()
+}).meta({
+	id: 'Demand',
+	description:
+		'Factored design effects. Tension positive; My positive puts the bottom in tension, Mz positive the right.'
+}) satisfies z.ZodType<Demand>;

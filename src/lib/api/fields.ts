@@ -1,5 +1,6 @@
 import { sizeLimits, coordinateLimit } from '$lib/engine/tolerances';
 import { must, mustHold } from './describe';
+import { rangeWords, type Range } from './ranges';
 import { z } from './zod';
 
 /** Number with a unit, its title used in messages and in the description of the API. */
@@ -7,6 +8,31 @@ export const quantity = (title: string, unit: string) =>
 	z
 		.number({ error: must(title, unit ? `a number in ${unit}` : 'a plain number') })
 		.meta({ title, ...(unit ? { 'x-unit': unit } : {}) });
+
+/** Number with a unit inside a range; the message names the field, what came and the limits. */
+export const within = (title: string, unit: string, range: Range) => {
+	const error = must(title, rangeWords(range, unit));
+	const number = z
+		.number({ error: must(title, unit ? `a number in ${unit}` : 'a plain number') })
+		.max(range.most, { error });
+	const bounded =
+		range.above === undefined
+			? number.min(range.least ?? -range.most, { error })
+			: number.gt(range.above, { error });
+	return bounded.meta({ title, ...(unit ? { 'x-unit': unit } : {}) });
+};
+
+/** Whole number inside a range. */
+export const wholeWithin = (title: string, range: Range) =>
+	z
+		.number({ error: must(title, 'a whole number') })
+		.refine(
+			(value) => Number.isInteger(value) && value >= (range.least ?? 0) && value <= range.most,
+			{
+				error: must(title, `a whole number ${rangeWords(range, '')}`)
+			}
+		)
+		.meta({ title, type: 'integer', minimum: range.least ?? 0, maximum: range.most });
 
 /** A length of the section, mm; the engine holds it between 0.01 mm and 100 m. */
 export const size = (title: string) =>

@@ -1,16 +1,20 @@
 import type { GradeDefinition, LawDefinition } from '$lib/engine/material/material';
 import { must } from './describe';
-import { listOf, oneOf, quantity, strict } from './fields';
+import { listOf, oneOf, strict, text, within } from './fields';
 import { limits } from './limits';
+import { ranges } from './ranges';
 import { z } from './zod';
 
-const stress = (title: string) => quantity(title, 'N/mm²');
+const strength = (title: string) => within(title, 'N/mm²', ranges.strength);
 const curve = (title: string) =>
 	listOf(
 		title,
-		z.tuple([quantity('Strain', ''), stress('Stress')], {
-			error: must('A point of the curve', 'a pair [strain, stress]')
-		}),
+		z.tuple(
+			[within('Strain', '', ranges.curveStrain), within('Stress', 'N/mm²', ranges.curveStress)],
+			{
+				error: must('A point of the curve', 'a pair [strain, stress]')
+			}
+		),
 		limits.curvePoints
 	);
 
@@ -18,15 +22,15 @@ const lawKinds = [
 	strict('An elastic–plastic law', { type: z.literal('elastic-plastic') }),
 	strict('A bilinear law', {
 		type: z.literal('bilinear'),
-		Eh: stress('Hardening modulus Eh'),
-		fu: stress('Tensile strength fu').optional()
+		Eh: within('Hardening modulus Eh', 'N/mm²', ranges.hardening),
+		fu: strength('Tensile strength fu').optional()
 	}),
 	strict('A quad-linear law', { type: z.literal('quad-linear') }),
 	strict('A Ramberg–Osgood law', {
 		type: z.literal('ramberg-osgood'),
-		n: quantity('Exponent n', ''),
-		m: quantity('Exponent m', '').optional(),
-		epsilonU: quantity('Ultimate strain epsilonU', '').optional()
+		n: within('Exponent n', '', ranges.exponent),
+		m: within('Exponent m', '', ranges.exponent).optional(),
+		epsilonU: within('Ultimate strain epsilonU', '', ranges.curveStrain).optional()
 	}),
 	strict('A law by curve', {
 		type: z.literal('curve'),
@@ -48,17 +52,17 @@ export const lawSchema = z
 	.meta({ id: 'Law', description: 'Stress–strain law; elastic–perfectly plastic when absent.' });
 
 const strengths = strict('A grade', {
-	fy: stress('Yield strength fy'),
-	fyc: stress('Yield strength in compression fyc').optional(),
-	fu: stress('Tensile strength fu').optional(),
-	E: stress('Modulus of elasticity E').optional(),
-	density: quantity('Density', 'kg/m³').optional(),
+	fy: strength('Yield strength fy'),
+	fyc: strength('Yield strength in compression fyc').optional(),
+	fu: strength('Tensile strength fu').optional(),
+	E: within('Modulus of elasticity E', 'N/mm²', ranges.modulus).optional(),
+	density: within('Density', 'kg/m³', ranges.density).optional(),
 	law: lawSchema.optional()
 });
 
 /** A name such as "S355", a plain fy in N/mm² at any thickness, or strengths in full. */
 export const gradeSchema = z
-	.union([z.string().max(limits.name), z.number(), strengths], {
+	.union([text('Name of a grade', limits.name), strength('Grade, a number fy,'), strengths], {
 		error: must('Grade', 'a name such as "S355", a number fy in N/mm², or an object with fy')
 	})
 	.meta({

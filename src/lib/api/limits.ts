@@ -2,6 +2,10 @@
 export const limits = {
 	/** States, moments, curvatures or strain planes in one request. */
 	states: 2000,
+	/** States times edges of the section in one request. */
+	work: 800_000,
+	/** The same for states by moment, each of which is a search. */
+	momentWork: 200_000,
 	/** Plates of one section, and joins between them. */
 	plates: 200,
 	/** Points over all rings of an outline. */

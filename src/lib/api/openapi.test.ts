@@ -18,7 +18,12 @@ const references = (value: unknown): string[] => {
 describe('openApiDocument', () => {
 	it('describes every route', () => {
 		expect(document.openapi).toBe('3.1.0');
-		expect(Object.keys(document.paths)).toEqual(operations.map(({ path }) => path));
+		const told = Object.entries(document.paths).flatMap(([path, methods]) =>
+			Object.keys(methods).map((method) => `${method} ${path}`)
+		);
+		expect(told.sort()).toEqual(operations.map(({ method, path }) => `${method} ${path}`).sort());
+		expect(told).toContain('get /api/v1/health');
+		expect(told).toContain('patch /api/v1/sections/{id}');
 	});
 
 	it('refers only to schemas that are there', () => {
@@ -26,6 +31,15 @@ describe('openApiDocument', () => {
 		expect(names.length).toBeGreaterThan(20);
 		const known = Object.keys(document.components.schemas);
 		expect(names.filter((name) => !known.includes(name))).toEqual([]);
+	});
+
+	it('tells what needs a session, and what a conflict carries', () => {
+		const patch = document.paths['/api/v1/sections/{id}']?.patch;
+		expect(patch?.security).toEqual([{ session: [] }]);
+		expect(JSON.stringify(patch?.responses['409'])).toContain('SectionConflict');
+		expect(JSON.stringify(document.paths['/api/v1/health']?.get?.responses['503'])).toContain(
+			'Health'
+		);
 	});
 
 	it('describes each kind of section apart, refusing fields it does not know', () => {

@@ -1,6 +1,7 @@
 import { engineVersion } from '../engine/version';
 import { errorSchema } from './error';
-import { operations, refusalMeanings, type Operation } from './operations';
+import type { Operation } from './operation';
+import { operations, refusalMeanings } from './operations';
 import { z } from './zod';
 
 export type JsonSchema = z.core.JSONSchema.BaseSchema;
@@ -34,31 +35,50 @@ const pathParameters = (path: string) =>
 		schema: { type: 'string' }
 	}));
 
-const refusalsOf = ({ refusals }: Operation) =>
-	Object.fromEntries(
-		[...refusals, 500].map((status) => [
-			status,
-			{ description: refusalMeanings[status], content: reference(errorSchema) }
-		])
-	);
+const refusalsOf = ({ refusals, conflict }: Operation) =>
+	[...refusals, 500].map((status): [number, object] => [
+		status,
+		{
+			description: refusalMeanings[status],
+			content: reference(status === 409 && conflict ? conflict : errorSchema)
+		}
+	]);
+
+const answersOf = ({ answer, status = 200, alike = [] }: Operation) => {
+	const content = answer
+		? reference(answer)
+		: { 'application/json': { schema: { type: 'array' } } };
+	return [status, ...alike].map((one): [number, object] => [
+		one,
+		{ description: refusalMeanings[one] ?? 'The answer.', content }
+	]);
+};
+
+const responsesOf = (operation: Operation): Record<string, object> =>
+	Object.fromEntries([...answersOf(operation), ...refusalsOf(operation)]);
 
 const operationOf = (operation: Operation) => {
-	const { id, title, description, query, body, answer, path } = operation;
+	const { id, title, description, query, body, path, signedIn } = operation;
 	return {
 		operationId: id,
 		summary: title,
 		description,
 		parameters: [...pathParameters(path), ...(query ? queryParameters(query) : [])],
 		...(body && { requestBody: { required: true, content: reference(body) } }),
-		responses: {
-			200: {
-				description: 'The answer.',
-				content: answer ? reference(answer) : { 'application/json': { schema: { type: 'array' } } }
-			},
-			...refusalsOf(operation)
-		},
-		security: [{}, { bearer: [] }]
+		responses: responsesOf(operation),
+		security: signedIn ? [{ session: [] }] : [{}, { bearer: [] }]
 	};
+};
+
+/** Operations by path, then by method. */
+const pathItems = () => {
+	const items: Record<string, Record<string, ReturnType<typeof operationOf>>> = {};
+	for (const operation of operations)
+		items[operation.path] = {
+			...items[operation.path],
+			[operation.method]: operationOf(operation)
+		};
+	return items;
 };
 
 /** The whole API as an OpenAPI 3.1 document, made from the schemas that check the requests. */
@@ -73,11 +93,12 @@ export const openApiDocument = () => ({
 		'x-engine-version': engineVersion
 	},
 	servers: [{ url: '/' }],
-	paths: Object.fromEntries(
-		operations.map((operation) => [operation.path, { [operation.method]: operationOf(operation) }])
-	),
+	paths: pathItems(),
 	components: {
 		schemas: componentSchemas(),
-		securitySchemes: { bearer: { type: 'http', scheme: 'bearer' } }
+		securitySchemes: {
+			bearer: { type: 'http', scheme: 'bearer' },
+			session: { type: 'apiKey', in: 'cookie', name: 'authjs.session-token' }
+		}
 	}
 });

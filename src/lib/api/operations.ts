@@ -1,21 +1,9 @@
+import type { Operation } from './operation';
 import { analyseAnswerSchema, analyseRequestSchema } from './analyse';
 import { responseAnswerSchema, responseRequestSchema } from './response';
+import { healthSchema } from './health';
+import { sectionOperations } from './section-operations';
 import { catalogueListSchema, shapeListSchema, shapeQuerySchema, shapeSchema } from './shapes';
-import type { z } from './zod';
-
-/** One route of the API, told once for the description and the readable page. */
-export interface Operation {
-	readonly id: string;
-	readonly method: 'get' | 'post';
-	readonly path: string;
-	readonly title: string;
-	readonly description: string;
-	readonly query?: z.ZodObject;
-	readonly body?: z.ZodType;
-	readonly answer: z.ZodType | null;
-	/** What it may refuse with, besides 500. */
-	readonly refusals: readonly number[];
-}
 
 const compute = [400, 404, 413, 415, 422, 429] as const;
 
@@ -81,7 +69,19 @@ export const operations: readonly Operation[] = [
 			'Rows [id, designation, family, standard, mass in kg/m, h in mm, b in mm] for searching on the spot. Carries an ETag.',
 		answer: null,
 		refusals: []
-	}
+	},
+	{
+		id: 'health',
+		method: 'get',
+		path: '/api/v1/health',
+		title: 'Ask how this instance is',
+		description:
+			'200 when everything works, 503 with the same figures when the database is away or not at this program’s level.',
+		answer: healthSchema,
+		alike: [503],
+		refusals: []
+	},
+	...sectionOperations
 ];
 
 /** What each status means, in a sentence. */

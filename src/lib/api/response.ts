@@ -1,22 +1,27 @@
 import { strengthBasisSchema } from './code';
 import { must } from './describe';
 import { envelopeFields } from './envelope';
-import { listOf, oneOf, quantity, strict } from './fields';
+import { listOf, oneOf, strict, within } from './fields';
 import { lawSchema } from './grade';
 import { limits } from './limits';
+import { ranges } from './ranges';
 import { namesOneTarget, targetFields, targetMissing } from './target';
 import { z } from './zod';
 
 const strainPlane = strict('A strain plane', {
-	e0: quantity('Strain at the centroid e0', ''),
-	ky: quantity('Curvature ky', '1/m'),
-	kz: quantity('Curvature kz', '1/m')
+	e0: within('Strain at the centroid e0', '', ranges.strain),
+	ky: within('Curvature ky', '1/m', ranges.curvature),
+	kz: within('Curvature kz', '1/m', ranges.curvature)
 });
 
 const atFields = (most: number) => ({
-	curvature: listOf('curvature', quantity('A curvature', '1/m'), most).optional(),
-	moment: listOf('moment', quantity('A moment', 'kNm'), most).optional(),
-	curvatureRatio: listOf('curvatureRatio', quantity('A curvature ratio', ''), most).optional(),
+	curvature: listOf('curvature', within('A curvature', '1/m', ranges.curvature), most).optional(),
+	moment: listOf('moment', within('A moment', 'kNm', ranges.moment), most).optional(),
+	curvatureRatio: listOf(
+		'curvatureRatio',
+		within('A curvature ratio', '', ranges.curvatureRatio),
+		most
+	).optional(),
 	strainPlanes: listOf('strainPlanes', strainPlane, most).optional()
 });
 
@@ -30,9 +35,9 @@ export const responseRequestSchema = z
 		{
 			...targetFields,
 			strengthBasis: strengthBasisSchema.optional(),
-			axisAngle: quantity('axisAngle', 'degrees').optional(),
+			axisAngle: within('axisAngle', 'degrees', ranges.angle).optional(),
 			transverse: oneOf('transverse', ['curvature-zero', 'moment-zero']).optional(),
-			N: quantity('Axial force N', 'kN').optional(),
+			N: within('Axial force N', 'kN', ranges.force).optional(),
 			at: atSchema('at', limits.states).meta({
 				id: 'At',
 				description:

@@ -1,14 +1,25 @@
 import type { SectionDefinition } from '$lib/engine/section/definition';
 import { must } from './describe';
-import { coordinate, listOf, oneOf, quantity, size, sizeOrZero, strict, text } from './fields';
+import {
+	coordinate,
+	listOf,
+	oneOf,
+	size,
+	sizeOrZero,
+	strict,
+	text,
+	wholeWithin,
+	within
+} from './fields';
 import { gradeSchema } from './grade';
 import { limits } from './limits';
+import { ranges } from './ranges';
 import { z } from './zod';
 
 const boltHoles = strict('An entry of boltHoles', {
 	part: text('part', limits.name),
 	diameter: size('Hole diameter'),
-	count: quantity('Number of holes', '').meta({ minimum: 0 })
+	count: wholeWithin('Number of holes', ranges.boltHoles)
 });
 
 const steel = {
@@ -46,7 +57,7 @@ const iSection = strict('An I section', {
 const channel = strict('A channel', {
 	kind: z.literal('channel'),
 	...{ h, b, tw, tf, r, rToe },
-	flangeSlopePercent: quantity('Slope of the inner flange face', '%').optional(),
+	flangeSlopePercent: within('Slope of the inner flange face', '%', ranges.slope).optional(),
 	tfAt: oneOf('tfAt', ['half-flange', 'half-outstand']).optional(),
 	...steel
 });
@@ -102,7 +113,7 @@ const plate = strict('A plate', {
 	thickness: size('Thickness of a plate'),
 	y: coordinate('Centre y of a plate'),
 	z: coordinate('Centre z of a plate'),
-	angle: quantity('Angle of a plate', 'degrees'),
+	angle: within('Angle of a plate', 'degrees', ranges.angle),
 	grade: gradeSchema.optional()
 });
 

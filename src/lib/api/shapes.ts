@@ -1,3 +1,4 @@
+import { strict } from './fields';
 import { grossSchema } from './gross';
 import { limits } from './limits';
 import { sectionSchema } from './section';
@@ -59,11 +60,15 @@ const whole = (title: string, most: number, absent: number) =>
 
 export const shapeSorts = ['designation', 'mass', 'height', 'width', 'area'] as const;
 
-/** Query of a list of shapes; a minus before `sort` turns the order round. */
-export const shapeQuerySchema = z.object({
+/**
+ * Query of a list of shapes; a minus before `sort` turns the order round. Parameters that it does
+ * not know are refused: a filter left out unseen would give the wrong shapes.
+ */
+export const shapeQuerySchema = strict('The query', {
 	q: z.string().max(limits.name, { error: 'q may have at most 80 characters.' }).default(''),
 	family: z.string().max(limits.name).optional(),
 	catalogue: z.string().max(limits.name).optional(),
+	standard: z.string().max(limits.name).optional(),
 	kind: z.string().max(limits.name).optional(),
 	sort: z
 		.enum([...shapeSorts, ...shapeSorts.map((sort) => `-${sort}` as const)], {

@@ -2,7 +2,7 @@ import type { Issue } from '../../engine/result';
 
 /** An expected refusal on its way to the wire. `code` is for programs, `message` for people. */
 export interface Refusal {
-	readonly status: 400 | 401 | 403 | 404 | 405 | 409 | 413 | 415 | 422 | 429;
+	readonly status: 400 | 401 | 403 | 404 | 405 | 409 | 413 | 415 | 422 | 429 | 499;
 	readonly code: string;
 	readonly message: string;
 	readonly issues?: readonly Issue[];

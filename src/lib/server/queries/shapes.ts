@@ -31,9 +31,10 @@ type Sort = keyof typeof sortColumns;
 const summaryOf = (row: Omit<ShapeSummary, 'version'>): ShapeSummary => ({ ...row, version: 1 });
 
 /** Everything but the search words: they are ranked outside the database. */
-const filtersOf = ({ family, catalogue, kind }: ShapeQuery): (SQL | undefined)[] => [
+const filtersOf = ({ family, catalogue, standard, kind }: ShapeQuery): (SQL | undefined)[] => [
 	family ? eq(shapes.family, family) : undefined,
 	catalogue ? eq(catalogues.slug, catalogue) : undefined,
+	standard ? eq(shapes.standard, standard) : undefined,
 	kind ? eq(shapes.kind, kind) : undefined
 ];
 

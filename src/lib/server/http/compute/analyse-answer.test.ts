@@ -69,8 +69,53 @@ describe('analyseAnswer', () => {
 		expect(value.notes[0]?.code).toBe('law_not_built');
 	});
 
-	it('says which fields nobody reads', async () => {
-		const { notes } = await asked({ section: ipe300, demand: { My: 10, NEd: 900 } });
-		expect(notes.map(({ message }) => message).join()).toContain('"demand.NEd"');
+	it('says which fields at the top nobody reads', async () => {
+		const { notes } = await asked({ section: ipe300, demnd: { My: 10 } });
+		expect(notes.map(({ message }) => message).join()).toContain('"demnd"');
+	});
+
+	it.each([
+		['demand.vz', { demand: { My: 50, vz: 900 } }, 'did you mean "Vz"?'],
+		['demands.1.NEd', { demands: [{ N: 1 }, { NEd: 900 }] }, '"NEd" is not known'],
+		['code.gammaMO', { code: { gammaMO: 1.1 } }, 'did you mean "gammaM0"?'],
+		[
+			'stiffeners.spacng',
+			{ stiffeners: { spacing: 900, endPost: 'rigid', spacng: 1 } },
+			'did you mean "spacing"?'
+		]
+	])('refuses %s: a force left out unseen would be favourable', async (path, more, hint) => {
+		const error = await refusal({ section: ipe300, ...more });
+		expect(error).toMatchObject({ status: 400, code: 'invalid_request' });
+		expect(error?.issues?.[0]?.path).toBe(path);
+		expect(error?.message).toContain(hint);
+	});
+
+	it('takes parts and demands called like what every object inherits', async () => {
+		const plate = { name: 'constructor', width: 100, thickness: 10, y: 0, z: 0, angle: 0 };
+		const section = { kind: 'plates', plates: [plate], partGrades: {}, grade: 355 };
+		const { squashLoad } = await asked({ section, demand: { name: 'toString', My: 1 } });
+		expect(squashLoad).toBeCloseTo(355, 9);
+	});
+
+	it('takes demands of one name', async () => {
+		const demands = [
+			{ name: 'a', My: 1 },
+			{ name: 'a', My: 2 }
+		];
+		expect((await asked({ section: ipe300, demands })).demands).toHaveLength(2);
+	});
+
+	it('says that a hole as large as its outer ring leaves no steel', async () => {
+		const ring = [
+			[0, 0],
+			[100, 0],
+			[100, 50],
+			[0, 50]
+		];
+		const error = await refusal({
+			section: { kind: 'outline', outer: ring, holes: [ring], grade: 'S355' }
+		});
+		expect(error?.message).toContain('leaves no steel');
+		expect(error?.issues?.[0]?.path).toBe('section.holes.0');
 	});
 });

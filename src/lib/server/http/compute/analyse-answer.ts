@@ -3,8 +3,7 @@ import {
 	type AnalyseAnswer,
 	type AnalyseRequest
 } from '../../../api/analyse';
-import { codeChoiceOf, codeSchema } from '../../../api/code';
-import { demandSchema } from '../../../api/demand';
+import { codeChoiceOf } from '../../../api/code';
 import { fail, ok, type Note, type Result } from '../../../engine/result';
 import { analyse } from '../../../engine/rules/analyse';
 import type { Analysis } from '../../../engine/rules/analysis';
@@ -12,16 +11,11 @@ import { prepareSection } from '../../../engine/section/prepare';
 import { contractVersion, engineVersion } from '../../../engine/version';
 import { parsed } from '../parse';
 import { invalid, type Refusal } from '../refusal';
-import { ignoredFields, type KnownFields } from './ignored-fields';
+import { ignoredFields } from './ignored-fields';
 import { placed, subjectOf, type FindShape } from './subject';
 import { hasUnbuiltLaw, unbuiltLawNote, withoutUnbuiltLaws } from './unbuilt-laws';
 
-const known: KnownFields = {
-	self: analyseRequestSchema.shape,
-	code: codeSchema.shape,
-	demand: demandSchema.shape,
-	demands: demandSchema.shape
-};
+const known = Object.keys(analyseRequestSchema.shape);
 
 const stiffenersNote: Note = {
 	code: 'stiffeners_not_used',

@@ -8,7 +8,11 @@ import { handled } from '../handled';
 import { refused, type Refusal } from '../refusal';
 import type { FindShape } from './subject';
 
-type Compute = (body: unknown, findShape: FindShape) => Promise<Result<unknown, Refusal>>;
+type Compute = (
+	body: unknown,
+	findShape: FindShape,
+	signal?: AbortSignal
+) => Promise<Result<unknown, Refusal>>;
 
 /** A stateless compute route: rate, body, figures, answer. */
 export const computeRoute = (compute: Compute) => (event: RequestEvent) =>
@@ -17,6 +21,6 @@ export const computeRoute = (compute: Compute) => (event: RequestEvent) =>
 		if (limited) return limited;
 		const body = await jsonBody(event.request);
 		if (!body.ok) return refused(body.error);
-		const result = await compute(body.value, shapeDefinition);
+		const result = await compute(body.value, shapeDefinition, event.request.signal);
 		return result.ok ? answer(result.value) : refused(result.error);
 	});

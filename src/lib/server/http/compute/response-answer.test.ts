@@ -68,6 +68,34 @@ describe('responseAnswer', () => {
 		expect(error?.code).toBe('invalid_request');
 	});
 
+	it('takes fewer moments at a time where a section has very many edges, and says how many', async () => {
+		const plates = Array.from({ length: 40 }, (_, i) => ({
+			...{ name: `p${i}`, width: 100 + i, thickness: 6, y: i, z: 12 * i, angle: 0 }
+		}));
+		const section = { kind: 'plates', plates, tied: true, grade: 355 };
+		const moment = Array.from({ length: 2000 }, (_, i) => i * 0.01);
+		const error = await refusal({ section, at: { moment } });
+		expect(error).toMatchObject({ status: 400, issues: [{ path: 'at.moment' }] });
+		expect(error?.message).toContain('at most 1250 entries for a section of 160 edges, not 2000');
+	});
+
+	it('lets others have their turn, and stops when nobody waits any more', async () => {
+		const curvature = Array.from({ length: 2000 }, (_, i) => Math.sin(i * 17) / 10);
+		const section = {
+			...{ kind: 'i', h: 300, b: 150, tw: 7.1, tf: 10.7, r: 15, fabrication: 'rolled' },
+			grade: 'S355'
+		};
+		const caller = new AbortController();
+		const work = responseAnswer(
+			{ section, axisAngle: 20, at: { curvature } },
+			noShape,
+			caller.signal
+		);
+		setImmediate(() => caller.abort());
+		const answer = await work;
+		expect(answer.ok ? null : answer.error.code).toBe('client_gone');
+	});
+
 	it('names the field of a section that does not fit', async () => {
 		const error = await refusal({ section: { ...flat, b: 0 }, at: { curvature: [1] } });
 		expect(error).toMatchObject({ status: 400, code: 'invalid_section' });
@@ -75,7 +103,7 @@ describe('responseAnswer', () => {
 	});
 
 	it('names the law that cannot be', async () => {
-		const law = { type: 'bilinear', Eh: 1e9 };
+		const law = { type: 'bilinear', Eh: 500_000 };
 		const error = await refusal({ section: flat, at: { curvature: [1] }, law });
 		expect(error?.issues?.[0]?.path).toBe('law');
 	});

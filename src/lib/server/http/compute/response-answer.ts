@@ -4,7 +4,7 @@ import {
 	type ResponseRequest
 } from '../../../api/response';
 import { fail, ok, type Note, type Result } from '../../../engine/result';
-import { respond, type Imposed } from '../../../engine/response/respond';
+import type { Imposed } from '../../../engine/response/respond';
 import type { BendingPath } from '../../../engine/response/state';
 import { noState } from '../../../engine/response/state-report';
 import type { PreparedSection } from '../../../engine/section/prepared';
@@ -14,10 +14,12 @@ import { parsed } from '../parse';
 import { invalid, type Refusal } from '../refusal';
 import { ignoredFields } from './ignored-fields';
 import { withLaw } from './replaced-law';
+import { respondInTurns } from './states-in-turns';
 import { placed, subjectOf, type FindShape, type Subject } from './subject';
 import { hasUnbuiltLaw, unbuiltLawNote, withoutUnbuiltLaws } from './unbuilt-laws';
+import { workIssues } from './work-limit';
 
-const known = { self: responseRequestSchema.shape };
+const known = Object.keys(responseRequestSchema.shape);
 
 const unloadNote: Note = {
 	code: 'unloading_not_built',
@@ -88,11 +90,13 @@ const preparedFor = (
 
 /**
  * Answer to POST /api/v1/response: states of the bent section. What is not built yet gives states
- * that are not converged, and a note.
+ * that are not converged, and a note. Other requests get their turn between states; once `signal` is
+ * aborted the rest is left undone.
  */
 export const responseAnswer = async (
 	body: unknown,
-	findShape: FindShape
+	findShape: FindShape,
+	signal?: AbortSignal
 ): Promise<Result<ResponseAnswer, Refusal>> => {
 	const request = parsed(responseRequestSchema, body);
 	if (!request.ok) return request;
@@ -102,15 +106,18 @@ export const responseAnswer = async (
 	if (!section.ok) return section;
 	const { at } = request.value;
 	const unbuilt = unbuiltNotes(request.value, subject.value);
+	const tooMuch = workIssues(at, section.value);
+	if (tooMuch.length > 0) return fail(invalid(tooMuch));
 	const response =
 		unbuilt.length > 0
-			? noAnswer(at)
-			: respond(section.value, pathOf(request.value), imposedOf(at));
+			? ok(noAnswer(at))
+			: await respondInTurns(section.value, pathOf(request.value), imposedOf(at), signal);
+	if (!response.ok) return response;
 	return ok({
 		contract: contractVersion,
 		engineVersion,
 		strengthBasis: section.value.strengthBasis,
-		...response,
+		...response.value,
 		notes: [...subject.value.notes, ...ignoredFields(body, known), ...unbuilt]
 	});
 };
