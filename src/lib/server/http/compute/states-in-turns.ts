@@ -14,7 +14,7 @@ import type { Refusal } from '../refusal';
 /** Longest that other requests wait for a turn, ms. */
 const turn = 25;
 /** Longest work on one request, ms: far above what the limits on states allow on any usual machine. */
-const mostWork = 20_000;
+const mostWork = 10_000;
 
 const clientGone: Refusal = {
 	status: 499,
