@@ -47,6 +47,21 @@ describe('what no section can carry', () => {
 	});
 });
 
+describe('a curvature beyond all steel', () => {
+	it('has no state, and one just short of it is balanced', () => {
+		const lopsided = sectionOf(
+			part('a', rectangle(0, 0, 10, 100), steel(200)),
+			part('b', rectangle(10, 0, 60, 12), steel(355))
+		);
+		const bent = bending(lopsided, { ...free, axisAngle: 20 });
+		expect(bent.atCurvature(1e6).converged).toBe(false);
+		const far = bent.atCurvature(500);
+		expect(far.converged).toBe(true);
+		expect(far.moment! / bent.plasticMoment!).toBeCloseTo(1, 6);
+		expect(far.moment!).toBeLessThan(bent.plasticMoment! * (1 + 1e-9));
+	});
+});
+
 describe('steel stiffer in tension than in compression', () => {
 	it('first yields where the balanced plane does, not where one modulus says', () => {
 		const twofold = sectionOf(

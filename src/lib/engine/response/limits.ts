@@ -3,8 +3,8 @@ import type { Mechanics } from './law-groups';
 import { plasticMomentOf, type BlockStrengths } from './plastic';
 import type { BendingPath } from './state';
 
-/** No law is followed beyond this strain, a plain number. */
-export const furthestStrain = 10;
+/** No law is followed beyond this strain, a plain number: far past any steel, and as far as sums stay exact. */
+export const furthestStrain = 100;
 
 /** What a law can give at most within `furthestStrain`, N/mm². */
 const mostStresses: BlockStrengths = ({ law, most }) => ({
@@ -13,6 +13,10 @@ const mostStresses: BlockStrengths = ({ law, most }) => ({
 		? most.compression
 		: -stressAt(law, -furthestStrain)
 });
+
+/** Whether a curvature (1/mm) keeps every fibre within strains that are followed at all. */
+export const isWithinReach = ({ reach }: Mechanics, curvature: number): boolean =>
+	Math.abs(curvature) * reach <= furthestStrain;
 
 /** Whether any state at all can carry N (newton). */
 export function canCarry(mechanics: Mechanics, N: number): boolean {

@@ -4,7 +4,7 @@ import { bendingStiffness, bentAtCurvature, bender, type Bender, type Bent } fro
 import { elasticPath, type ElasticPath } from './elastic-path';
 import { firstYieldOf } from './first-yield';
 import { mechanicsOf } from './law-groups';
-import { canCarry, momentLimits } from './limits';
+import { canCarry, isWithinReach, momentLimits } from './limits';
 import { plasticMomentOf } from './plastic';
 import { risingRoot } from './rising-root';
 import { noState, stateReport } from './state-report';
@@ -58,7 +58,9 @@ export function bending(section: PreparedSection, path: BendingPath): Bending {
 		firstYield,
 		plasticMoment,
 		atCurvature: (curvature) =>
-			carries && Number.isFinite(curvature) ? report(bent(curvature * 1e-3)) : noState,
+			carries && isWithinReach(mechanics, curvature * 1e-3)
+				? report(bent(curvature * 1e-3))
+				: noState,
 		atMoment: (moment) => {
 			const within = limits();
 			if (!within || !(moment > within.least && moment < within.most)) return noState;
@@ -67,7 +69,7 @@ export function bending(section: PreparedSection, path: BendingPath): Bending {
 		},
 		atPlane: (plane) => report(bentByPlane(b, plane)),
 		momentAt: (curvature) => {
-			if (!carries) return null;
+			if (!carries || !isWithinReach(mechanics, curvature * 1e-3)) return null;
 			const state = bent(curvature * 1e-3);
 			return state.converged ? state.forces.M * 1e-6 : null;
 		}
@@ -121,7 +123,7 @@ function bentAtMoment(
 		2e-15 * squash * reach
 	);
 	const balanced = Math.abs(root.value) <= equilibrium * squash * reach;
-	const reached = Math.abs(root.x) < (1e5 * squash * reach) / stiffness;
+	const reached = isWithinReach(b.mechanics, root.x);
 	return balanced && reached && found?.converged ? found : undefined;
 }
 
