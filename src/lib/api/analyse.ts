@@ -144,7 +144,11 @@ const verdictSchema = z.object({
 	detail: z.string(),
 	sentenceTokens: z.array(token).meta({ description: 'The sentence with its numbers apart.' }),
 	detailTokens: z.array(token),
-	countable: z.object({ moment: figure('kNm'), basis: resistanceBasis.nullable() }),
+	countable: z.object({
+		moment: figure('kNm'),
+		force: figure('kN').meta({ 'x-unit': 'kN', description: 'A size; where N acts alone.' }),
+		basis: resistanceBasis.nullable()
+	}),
 	governing: z.string().nullable(),
 	notChecked: z.array(z.string()),
 	status: z.enum(['passes', 'fails', 'incomplete', 'no-figure']),
@@ -166,6 +170,10 @@ const demandStateSchema = z.object({
 	...rulerFields,
 	moment: z.number().meta({ 'x-unit': 'kNm' }),
 	countableBasis: resistanceBasis.nullable(),
+	countableForce: figure('kN').meta({ 'x-unit': 'kN', description: 'A size; where N acts alone.' }),
+	withheld: z
+		.array(z.string())
+		.meta({ description: 'Codes of the missing checks for which nothing is counted.' }),
 	utilisation: figure(''),
 	missing: z.array(noteSchema).meta({ description: 'Checks that apply and are not built.' })
 });

@@ -78,6 +78,21 @@ describe('the parts form', () => {
 });
 
 describe('demand cases', () => {
+	it('are told apart when two have one name', () => {
+		const { bench } = open();
+		bench.change({
+			demands: [
+				{ name: 'A', My: 100 },
+				{ name: 'A', My: 9000 }
+			]
+		});
+		expect(bench.governing?.index).toBe(1);
+		bench.activate(0);
+		expect(bench.verdict).toMatchObject({ demand: 'A', status: 'passes' });
+		bench.activate(1);
+		expect(bench.verdict.status).toBe('fails');
+	});
+
 	it('are added, named, filled and removed, and the governing one is told', async () => {
 		const { bench, user } = open();
 		await user.click(screen.getByRole('button', { name: 'Add a case' }));

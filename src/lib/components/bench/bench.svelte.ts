@@ -1,7 +1,7 @@
 import type { StrengthBasis } from '$lib/engine/material/material';
 import type { Issue } from '$lib/engine/result';
 import { analyse } from '$lib/engine/rules/analyse';
-import type { CodeChoice } from '$lib/engine/rules/result';
+import type { CodeChoice, DemandState } from '$lib/engine/rules/result';
 import { verdict, type Verdict } from '$lib/engine/rules/verdict';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 import { prepareSection } from '$lib/engine/section/prepare';
@@ -84,10 +84,9 @@ export class Bench {
 	/** The case that uses most, or whose check is missing; null where no rule covers the section. */
 	readonly governing: GoverningCase | null = $derived.by(() => {
 		const name = this.analysis.verdict.demand;
-		const index = this.demands.findIndex((demand) => demand.name === name);
-		if (name === null || index < 0) return null;
-		const state = this.analysis.demands.find(({ demand }) => demand === name);
-		return { name, index, value: state?.utilisation ?? null };
+		const index = this.analysis.demands.findIndex(({ demand }) => demand === name);
+		const state = this.analysis.demands[index];
+		return name === null || !state ? null : { name, index, value: state.utilisation };
 	});
 
 	readonly activeCase: number = $derived.by(() =>
@@ -97,10 +96,13 @@ export class Bench {
 		() => this.demands[this.activeCase] ?? { name: 'Case 1' }
 	);
 
-	/** The verdict on the case that is shown. */
-	readonly verdict: Verdict = $derived.by(() =>
-		verdict(this.section, this.analysis, this.activeDemand.name)
+	/** What the rules say of the case that is shown; none where they do not reach. */
+	readonly activeState: DemandState | undefined = $derived.by(
+		() => this.analysis.demands[this.activeCase]
 	);
+
+	/** The verdict on the case that is shown. */
+	readonly verdict: Verdict = $derived.by(() => verdict(this.analysis, this.activeState?.demand));
 
 	readonly ruler: RulerModel = $derived.by(() =>
 		rulerModel(

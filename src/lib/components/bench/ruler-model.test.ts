@@ -13,7 +13,7 @@ function ruler(definition: SectionDefinition, demand: Demand) {
 	const built = prepareSection(definition);
 	if (!built.ok) throw new Error('cannot be built');
 	const figures = analyse(built.value, { demands: [{ name: 'A', ...demand }] });
-	const { demand: named, ruler: ruled } = verdict(built.value, figures, 'A');
+	const { demand: named, ruler: ruled } = verdict(figures, 'A');
 	return rulerModel(built.value, named === null ? null : ruled, demand);
 }
 

@@ -3,7 +3,8 @@ import { squashLoad } from '../response/plastic';
 import type { Note } from '../result';
 import type { PreparedSection } from '../section/prepared';
 import type { Analysis, AnalysisFigures } from './analysis';
-import { codeChoice } from './code-choice';
+import { codeChoice, factorIssues } from './code-choice';
+import { lawIssues } from './en1993/law-cover';
 import { elementsOf, type SectionElements } from './en1993/plate-elements';
 import { en1993Outcome, type EnOutcome } from './en1993/rules';
 import { strengthIssues, strengthsOf, type Strengths } from './en1993/strengths';
@@ -39,7 +40,7 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 		demands: outcome.demands,
 		notes: distinct([...section.notes, ...outcome.notes])
 	};
-	return { ...figures, verdict: verdict(section, figures) };
+	return { ...figures, verdict: verdict(figures) };
 }
 
 type Outcome = Pick<AnalysisFigures, 'classification' | 'resistance' | 'demands' | 'notes'>;
@@ -60,7 +61,11 @@ function judged(
 	if (code.standard !== 'EN1993-1-1:2005') return none([codeNotBuilt(code.standard)]);
 	const elements = elementsOf(section, strengths);
 	if (elements === null) return none([classNotBuilt(section.definition.kind)]);
-	const issues = strengthIssues(section, strengths);
+	const issues = [
+		...factorIssues(code),
+		...strengthIssues(section, strengths),
+		...lawIssues(section.parts)
+	];
 	return issues.length > 0 ? none(issues) : outcome(elements);
 }
 

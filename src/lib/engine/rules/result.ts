@@ -98,8 +98,13 @@ export interface DemandState {
 	axisAngle: number;
 	/** Size of the demand's moment. */
 	moment: number;
+	/** Null without a moment along N, and where a missing check may reduce it. */
 	countable: number | null;
 	countableBasis: Resistance['basis'] | null;
+	/** kN, a size: of N where it acts without a moment. */
+	countableForce: number | null;
+	/** Codes of the missing checks for which nothing is counted. */
+	withheld: string[];
 	/** Under the demand's N, without γM0. */
 	firstYield: number | null;
 	fullPlastic: number | null;

@@ -81,6 +81,43 @@ describe('outside the rules', () => {
 		expect(analysed(half).classification).not.toBeNull();
 	});
 
+	it.each([
+		['gammaM0', 1e-308],
+		['gammaM0', 0.89],
+		['gammaM0', 2.01],
+		['gammaM0', Number.NaN],
+		['gammaM1', 0],
+		['gammaM2', -1],
+		['eta', 1.1],
+		['eta', 0]
+	] as const)('refuses %s of %s, and names it', (factor, value) => {
+		const { classification, resistance, notes, verdict } = analysed(beam, { [factor]: value });
+		expect([classification, resistance]).toEqual([null, null]);
+		expect(notes.find(({ code }) => code === 'factor-out-of-range')?.message).toMatch(
+			factor === 'eta' ? 'η' : `γ${factor.slice(5)}`
+		);
+		expect(verdict.countable.moment).toBeNull();
+	});
+
+	it('takes factors on their limits', () => {
+		for (const gamma of [0.9, 2])
+			expect(
+				analysed(beam, { gammaM0: gamma, gammaM1: gamma, gammaM2: gamma, eta: 1 }).resistance
+			).not.toBeNull();
+	});
+
+	it('says when a class 3 web cannot be taken as an effective class 2 web', () => {
+		// Flanges 200×12 over 200×30, web 400×8, fy 235: the tension flange outweighs the effective
+		// web (3600 mm² over 2 · 160 · 8), so its plastic axis leaves the web.
+		const sizes = { h: 442, tf: 12, tfBottom: 30, tw: 8, grade: 235 };
+		const { resistance, classification, notes } = analysed({ ...beam, ...sizes });
+		expect(classification).toMatchObject({ overall: 3, governing: 'web' });
+		expect(resistance?.basis).toBe('elastic');
+		expect(notes.map(({ code }) => code)).toContain('effective-class-2-not-used');
+		const refused = analysed({ ...beam, ...sizes }, { allowEffectiveClass2: false });
+		expect(refused.notes.map(({ code }) => code)).not.toContain('effective-class-2-not-used');
+	});
+
 	it('gives a round tube beyond 90ε² class 4 and nothing to count', () => {
 		const tube = (t: number) => analysed({ kind: 'circular-hollow', d: 900, t, grade: 235 });
 		expect(tube(10).classification?.overall).toBe(3);

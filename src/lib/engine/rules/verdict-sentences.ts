@@ -11,12 +11,28 @@ const farOff = 20;
 
 /** "Class 3. Count 3110 kNm, up to first yield." */
 export function countSentence(view: VerdictView): VerdictToken[] {
+	if (view.axial) return forceSentence(view);
 	const { countable } = view.ruler;
-	if (countable === null) return [words(`Class ${view.class}. Nothing may be counted yet.`)];
+	if (countable === null) return [words(nothingCounted(view, `Class ${view.class}`, 'No moment'))];
 	if (countable === 0) return [words(`Class ${view.class}. N leaves no moment to count.`)];
 	const head =
 		view.basis === 'effective-class-2' ? 'Class 3, web as Class 2' : `Class ${view.class}`;
 	return [words(`${head}. Count `), moment(countable), ...countedAs(view)];
+}
+
+/** "Class 1 in tension. Count 2000 kN." */
+function forceSentence(view: VerdictView): VerdictToken[] {
+	const head = `Class ${view.class} in ${view.N < 0 ? 'compression' : 'tension'}`;
+	if (view.countableForce === null) return [words(nothingCounted(view, head, 'Nothing'))];
+	return [words(`${head}. Count `), force(view.countableForce), words('.')];
+}
+
+function nothingCounted(view: VerdictView, head: string, what: string): string {
+	const { withheld } = view;
+	if (view.class === 4 || withheld.length === 0) return `${head}. Nothing may be counted yet.`;
+	const all = [withheld.slice(0, -1).join(', '), withheld.at(-1)].filter(Boolean).join(' and ');
+	const are = withheld.length > 1 || all.startsWith('bolt holes') ? 'are' : 'is';
+	return `${head}. ${what} may be counted: ${all} ${are} not checked.`;
 }
 
 function countedAs({ N, biaxial, basis }: VerdictView): VerdictToken[] {
@@ -63,7 +79,8 @@ function decidingPart({ class: overall, element }: VerdictView): VerdictToken[] 
 	];
 }
 
-function beyond({ N, biaxial, basis, ruler }: VerdictView): VerdictToken[] {
+function beyond({ N, biaxial, axial, basis, ruler }: VerdictView): VerdictToken[] {
+	if (axial) return [];
 	const { firstYield, fullPlastic, countable } = ruler;
 	if (firstYield === null || fullPlastic === null) return [];
 	if (countable === null)

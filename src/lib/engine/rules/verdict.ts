@@ -1,7 +1,7 @@
 import type { Note } from '../result';
-import type { PreparedSection } from '../section/prepared';
 import type { AnalysisFigures } from './analysis';
 import type { ClassifiedElement, DemandState, Resistance, SectionClass } from './result';
+import { uncheckedNames } from './unchecked';
 import { countSentence, detailSentence, noClassSentence } from './verdict-sentences';
 import { plainSentence, words, type VerdictToken } from './verdict-tokens';
 
@@ -24,7 +24,8 @@ export interface Verdict {
 	/** The same two sentences with their numbers apart, for other units. */
 	sentenceTokens: VerdictToken[];
 	detailTokens: VerdictToken[];
-	countable: { moment: number | null; basis: Resistance['basis'] | null };
+	/** kNm along the ruler; kN, a size, where N acts alone. */
+	countable: { moment: number | null; force: number | null; basis: Resistance['basis'] | null };
 	/** Part that decides the class. */
 	governing: string | null;
 	notChecked: string[];
@@ -44,6 +45,12 @@ export interface VerdictView {
 	N: number;
 	/** Bending about both axes. */
 	biaxial: boolean;
+	/** N acts, and no moment. */
+	axial: boolean;
+	/** kN, a size, of N alone. */
+	countableForce: number | null;
+	/** Checks, in words, for want of which nothing is counted. */
+	withheld: readonly string[];
 	basis: Resistance['basis'] | null;
 	ruler: VerdictRuler;
 }
@@ -52,11 +59,7 @@ export interface VerdictView {
  * The verdict on one demand: the one named, else the one that fails, is incomplete or uses most.
  * Without demands it speaks of bending with the bottom in tension.
  */
-export function verdict(
-	_section: PreparedSection,
-	figures: AnalysisFigures,
-	demandName?: string
-): Verdict {
+export function verdict(figures: AnalysisFigures, demandName?: string): Verdict {
 	const named = figures.demands.find(({ demand }) => demand === demandName);
 	const state = named ?? pressing(figures.demands);
 	const view = state ? demandView(state) : plainView(figures);
@@ -67,7 +70,11 @@ export function verdict(
 		detail: plainSentence(detailTokens),
 		sentenceTokens,
 		detailTokens,
-		countable: { moment: view?.ruler.countable ?? null, basis: view?.basis ?? null },
+		countable: {
+			moment: view?.ruler.countable ?? null,
+			force: view?.countableForce ?? null,
+			basis: view?.basis ?? null
+		},
 		governing: view?.element?.part ?? null,
 		notChecked: notChecked(figures, view?.class ?? null),
 		status: statusOf(figures, named),
@@ -94,6 +101,9 @@ function demandView(state: DemandState): VerdictView {
 		element: governingElement(state.elements, state.governing, state.class),
 		N: state.N,
 		biaxial: axisAngle % 90 !== 0,
+		axial: state.N !== 0 && demand === 0,
+		countableForce: state.countableForce,
+		withheld: uncheckedNames(state.withheld),
 		basis: state.countableBasis,
 		ruler: { axisAngle, demand, countable, firstYield, fullPlastic }
 	};
@@ -108,6 +118,9 @@ function plainView(figures: AnalysisFigures): VerdictView | null {
 		element: governingElement(elements, governing, overall),
 		N: 0,
 		biaxial: false,
+		axial: false,
+		countableForce: null,
+		withheld: [],
 		basis: resistance.MyRd === null ? null : resistance.basis,
 		ruler: { ...bareRuler(figures), countable: resistance.MyRd }
 	};
@@ -143,22 +156,8 @@ function statusOf(figures: AnalysisFigures, named: DemandState | undefined): Ver
 const isMemberCheck = ({ code }: Note): boolean =>
 	code === 'ltb-not-checked' || code === 'member-buckling-not-checked';
 
-const uncheckedWords: Readonly<Record<string, string>> = {
-	'ltb-not-checked': 'lateral–torsional buckling',
-	'member-buckling-not-checked': 'member buckling',
-	'shear-buckling-not-built': 'shear buckling',
-	'm-v-not-built': 'bending with high shear',
-	'net-section-not-checked': 'net section at bolt holes',
-	'tension-flange-holes-not-built': 'bolt holes in bending',
-	'class-4-not-built': 'effective widths',
-	'class-not-built': 'class and resistance',
-	'code-not-built': 'class and resistance'
-};
-
 /** Effective widths are missed only where the section stands in class 4. */
 function notChecked({ notes }: AnalysisFigures, standing: SectionClass | null): string[] {
-	const found = notes
-		.filter(({ code }) => code !== 'class-4-not-built' || standing === 4)
-		.flatMap(({ code }) => uncheckedWords[code] ?? []);
-	return [...new Set(found)];
+	const codes = notes.map(({ code }) => code);
+	return uncheckedNames(codes.filter((code) => code !== 'class-4-not-built' || standing === 4));
 }

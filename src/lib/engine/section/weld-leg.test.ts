@@ -86,6 +86,10 @@ describe('a fillet weld', () => {
 		]);
 	});
 
+	it('changes nothing in a box whose flanges end flush with the webs', () => {
+		expect(messages({ ...box, b: 424, weldLeg: 6 })).toEqual([]);
+	});
+
 	it('is not asked of a rolled section, which has none', () => {
 		expect(messages({ ...welded, fabrication: 'rolled', weldLeg: 100 })).toEqual([]);
 	});

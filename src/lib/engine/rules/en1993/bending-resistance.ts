@@ -1,4 +1,4 @@
-import type { Resistance } from '../result';
+import type { ClassifiedElement, Resistance } from '../result';
 import type { AxisSense } from '../section-moments';
 import type { ClassifiedCase } from './classify';
 import { effectiveClassTwoMoment } from './effective-class-two';
@@ -8,6 +8,8 @@ import type { EnModel } from './model';
 export interface BendingResistance {
 	readonly value: number | null;
 	readonly basis: Resistance['basis'];
+	/** A class 3 web that might be taken as class 2 but has no such resistance. */
+	readonly webRefused: boolean;
 }
 
 /**
@@ -23,26 +25,33 @@ export function bendingResistance(
 ): BendingResistance {
 	const { plastic, firstYield } = model.moments[sense];
 	const { gammaM0 } = model.code;
-	if (classified.overall === 4) return { value: null, basis: 'effective' };
-	if (classified.overall <= 2) return { value: over(plastic.moment, gammaM0), basis: 'plastic' };
+	if (classified.overall === 4) return { value: null, basis: 'effective', webRefused: false };
+	if (classified.overall <= 2)
+		return { value: over(plastic.moment, gammaM0), basis: 'plastic', webRefused: false };
 	const elastic = over(firstYield, gammaM0);
-	const reduced = effectiveWeb ? over(classTwoMoment(model, sense, classified), gammaM0) : null;
+	const web = effectiveWeb ? classTwoWeb(sense, classified) : undefined;
+	const reduced = web ? over(classTwoMoment(model, sense, web), gammaM0) : null;
 	return reduced !== null && elastic !== null && reduced > elastic
-		? { value: reduced, basis: 'effective-class-2' }
-		: { value: elastic, basis: 'elastic' };
+		? { value: reduced, basis: 'effective-class-2', webRefused: false }
+		: { value: elastic, basis: 'elastic', webRefused: web !== undefined && reduced === null };
 }
 
 const over = (moment: number | null, gamma: number) => (moment === null ? null : moment / gamma);
 
-function classTwoMoment(
-	{ section }: EnModel,
+/** The class 3 web between class 1 or 2 flanges in bending about y, if that is what it is. */
+function classTwoWeb(
 	sense: AxisSense,
 	{ elements }: ClassifiedCase
-): number | null {
-	if (sense === 'plusMz' || sense === 'minusMz') return null;
+): ClassifiedElement | undefined {
+	if (sense === 'plusMz' || sense === 'minusMz') return undefined;
 	const webs = elements.filter(({ part }) => /web$/i.test(part));
 	const flanges = elements.filter((element) => !webs.includes(element));
-	const slenderWeb = webs.find((web) => web.class === 3);
-	if (!slenderWeb || flanges.some((flange) => flange.class > 2)) return null;
-	return effectiveClassTwoMoment(section, sense === 'plusMy', slenderWeb.epsilon);
+	if (flanges.some((flange) => flange.class > 2)) return undefined;
+	return webs.find((web) => web.class === 3);
 }
+
+const classTwoMoment = (
+	{ section }: EnModel,
+	sense: AxisSense,
+	{ epsilon }: ClassifiedElement
+): number | null => effectiveClassTwoMoment(section, sense === 'plusMy', epsilon);

@@ -6,6 +6,7 @@ import { bendingResistance } from './bending-resistance';
 import { holedParts, holesInTension } from './bolt-holes';
 import type { ClassifiedCase } from './classify';
 import { effectsOf } from './demand-class';
+import { flangeInducedBuckling } from './flange-induced-buckling';
 import { stabilityGaps } from './member-stability';
 import type { EnModel } from './model';
 import type { ShearResistances } from './shear-resistance';
@@ -18,6 +19,8 @@ export interface DemandChecks {
 	/** Shares of N and of M in the linear sum; null where a resistance is missing. */
 	readonly axialShare: number | null;
 	readonly bendingShare: number | null;
+	/** Codes of the missing checks for which no moment, and no N alone, is counted. */
+	readonly withheld: string[];
 }
 
 const code = 'EN 1993-1-1:2005';
@@ -34,15 +37,18 @@ export function demandChecks(
 	const axialShare = axialUse(model, effects, classified);
 	const bendingShare = bendingUse(model, effects, classified);
 	const sheared = shearChecks(demand, name, shear);
+	const missing = [
+		...strengthGaps(name, classified, axialShare === null || bendingShare === null),
+		...shearGaps(demand, name, shear, sheared),
+		...stabilityGaps(model, demand, name)
+	];
+	const highShear = sheared.some(isHigh) ? ['m-v-not-built'] : [];
 	return {
 		checks: [...normalChecks(model, effects, classified, name), ...sheared],
-		missing: [
-			...strengthGaps(name, classified, axialShare === null || bendingShare === null),
-			...shearGaps(demand, name, shear, sheared),
-			...stabilityGaps(model, demand, name)
-		],
+		missing: [...missing, ...flangeGaps(model, effects, classified)],
 		axialShare,
-		bendingShare
+		bendingShare,
+		withheld: [...new Set([...highShear, ...missing.map(({ code }) => code)])]
 	};
 }
 
@@ -70,9 +76,12 @@ function bendingLimit(
 ): number | null {
 	if (holesInTension(model.section, sense)) return null;
 	if (effects.N !== 0 && holedParts(model.section).length > 0) return null;
-	const alone = effects.N === 0 && effects.Mz === 0 && model.code.allowEffectiveClass2;
-	return bendingResistance(model, sense, classified, alone).value;
+	return bendingResistance(model, sense, classified, bendsAlone(model, effects)).value;
 }
+
+/** Whether a class 3 web may be taken as class 2: bending about y with nothing else. */
+const bendsAlone = ({ code: { allowEffectiveClass2 } }: EnModel, { N, Mz }: Effects): boolean =>
+	N === 0 && Mz === 0 && allowEffectiveClass2;
 
 function bendingUse(model: EnModel, effects: Effects, classified: ClassifiedCase): number | null {
 	const share = (M: number, sense: AxisSense) => {
@@ -151,6 +160,17 @@ function strengthGaps(demand: string, { overall }: ClassifiedCase, absent: boole
 
 const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
+/** Shear beyond half of its plastic resistance, rounding apart, lowers what bending may use. */
+const isHigh = ({ utilisation }: ResistanceCheck): boolean => utilisation > 0.5 * (1 + 1e-12);
+
+function flangeGaps(model: EnModel, effects: Effects, classified: ClassifiedCase): Note[] {
+	const { My } = effects;
+	if (My === 0) return [];
+	const { basis } = bendingResistance(model, senseY(My), classified, bendsAlone(model, effects));
+	const { overall } = classified;
+	return flangeInducedBuckling(model, { overall, basis, topCompressed: My > 0 });
+}
+
 function shearGaps(
 	{ Vy = 0, Vz = 0, N = 0, My = 0, Mz = 0 }: Demand,
 	demand: string,
@@ -158,7 +178,7 @@ function shearGaps(
 	checks: readonly ResistanceCheck[]
 ): Note[] {
 	const unchecked = (Vz !== 0 && shear.z === null) || (Vy !== 0 && shear.y === null);
-	const high = checks.some(({ utilisation }) => utilisation > 0.5);
+	const high = checks.some(isHigh);
 	const notes: Note[] = [];
 	if (unchecked)
 		notes.push({

@@ -5,12 +5,16 @@ import type { DemandChecks } from './demand-checks';
 import { pathOf, type Effects } from './stress-case';
 import type { EnModel } from './model';
 
-type Ruler = Pick<DemandState, 'axisAngle' | 'moment' | 'countable' | 'firstYield' | 'fullPlastic'>;
+type Ruler = Pick<
+	DemandState,
+	'axisAngle' | 'moment' | 'countable' | 'countableForce' | 'firstYield' | 'fullPlastic'
+>;
 
 /**
  * Where a demand stands on the ruler of its own moment, N held: what may be counted by the linear
  * sum, first yield and the full block under that N (both without γM0). kNm along the axis at
- * `axisAngle`; a demand without moment is measured along +My.
+ * `axisAngle`; a demand without moment is measured along +My. N alone has a countable force (kN)
+ * and no countable moment. Nothing is counted while a check is missing that may lower it.
  */
 export function demandRuler(
 	model: EnModel,
@@ -21,14 +25,16 @@ export function demandRuler(
 	const size = Math.hypot(effects.My, effects.Mz);
 	const along = size === 0 ? { ...effects, My: 1 } : effects;
 	const limits = limitsAlong(model, along);
-	const { axialShare, bendingShare, missing } = used;
-	const blocked = missing.some(({ code }) => code === 'm-v-not-built');
-	const rest = axialShare === null || blocked ? null : Math.max(0, 1 - axialShare);
+	const { axialShare, bendingShare, withheld } = used;
+	const onlyN = size === 0 && effects.N !== 0;
+	const held = axialShare === null || withheld.length > 0;
+	const rest = held || onlyN ? null : Math.max(0, 1 - axialShare);
 	const whole = size === 0 ? countableAlone : bendingShare === null ? null : size / bendingShare;
 	return {
 		...limits,
 		moment: size,
-		countable: rest === null || whole === null ? null : rest * whole
+		countable: rest === null || whole === null ? null : rest * whole,
+		countableForce: onlyN && !held ? Math.abs(effects.N) / axialShare : null
 	};
 }
 

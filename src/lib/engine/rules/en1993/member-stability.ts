@@ -45,9 +45,14 @@ export function stabilityGaps({ section }: EnModel, demand: Demand, name: string
 const missing = (what: string, name: string) =>
 	`${what} applies to ${name}, which gives an unbraced length. It is not built yet.`;
 
-/** What is not checked for the member whatever the figures say; without a demand, for bending. */
+/** Whether a demand has neither N nor a moment: it is then answered with the moment +My. */
+export const isUnbent = ({ N = 0, My = 0, Mz = 0 }: Demand): boolean =>
+	N === 0 && My === 0 && Mz === 0;
+
+/** What is not checked for the member whatever the figures say; without an effect, for bending. */
 export function stabilityNotes(section: PreparedSection, demands: readonly Demand[]): Note[] {
-	const asked = demands.length === 0 ? [{ My: 1, Mz: 0 }] : demands;
+	const bent = { My: 1, Mz: 0 };
+	const asked = demands.length === 0 ? [bent] : demands.map((one) => (isUnbent(one) ? bent : one));
 	const notes: Note[] = [];
 	if (asked.some((demand) => canBuckleSideways(section, demand))) notes.push(lateral);
 	if (demands.some(({ N = 0 }) => N < 0)) notes.push(flexural);

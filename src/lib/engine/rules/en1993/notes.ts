@@ -1,5 +1,6 @@
 import type { Note } from '../../result';
 import type { Demand, Resistance } from '../result';
+import { lawNotes } from './law-cover';
 import type { EnModel, PureCases, PureClasses } from './model';
 
 const caseWords: Readonly<Record<keyof PureClasses, string>> = {
@@ -27,16 +28,21 @@ export function classFourNotes(classes: PureClasses): Note[] {
 }
 
 /** How class 3 and hybrid figures were taken. */
-export function strengthNotes(model: EnModel, cases: PureCases, resistance: Resistance): Note[] {
-	const notes: Note[] = [];
+export function strengthNotes(
+	model: EnModel,
+	cases: PureCases,
+	{ basis, webRefused }: { basis: Resistance['basis']; webRefused: boolean }
+): Note[] {
+	const notes: Note[] = lawNotes(model.section.parts);
 	const bent = [cases.plusMy, cases.minusMy, cases.plusMz, cases.minusMz];
-	if (resistance.basis === 'effective-class-2')
+	if (basis === 'effective-class-2')
 		notes.push({
 			code: 'effective-class-2',
 			message:
 				'The class 3 web is taken as an effective class 2 web: only 20 εtw beside the compression flange and beside the plastic neutral axis is counted of its compressed part.',
 			clause: 'EN 1993-1-1:2005 6.2.2.4'
 		});
+	if (webRefused) notes.push(webNotTaken(model));
 	if (model.strengths.hybrid && bent.some(({ overall }) => overall === 3))
 		notes.push({
 			code: 'hybrid-first-yield',
@@ -52,6 +58,18 @@ export function strengthNotes(model: EnModel, cases: PureCases, resistance: Resi
 			clause: 'EN 1993-1-1:2005 6.2.4'
 		});
 	return notes;
+}
+
+function webNotTaken({ section: { definition } }: EnModel): Note {
+	const why =
+		definition.kind === 'rectangular-hollow'
+			? 'that is not built for rectangular hollow sections'
+			: 'the plastic neutral axis of that section would not lie in the clear web';
+	return {
+		code: 'effective-class-2-not-used',
+		message: `The class 3 web is not taken as an effective class 2 web: ${why}. First yield counts, which is on the safe side.`,
+		clause: 'EN 1993-1-1:2005 6.2.2.4'
+	};
 }
 
 /** Several effects together are checked by the linear sum only. */

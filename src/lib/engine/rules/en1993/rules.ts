@@ -2,14 +2,17 @@ import type { Note } from '../../result';
 import type { Classification, Demand, DemandState, Resistance, ResistanceCheck } from '../result';
 import type { AxisSense } from '../section-moments';
 import { axialStrength } from './axial-resistance';
-import { bendingResistance } from './bending-resistance';
+import { bendingResistance, type BendingResistance } from './bending-resistance';
 import { holedParts, holeNotes, holesInTension } from './bolt-holes';
 import type { ClassifiedCase } from './classify';
 import { demandChecks } from './demand-checks';
 import { classifyDemand, effectsOf, type DemandClass } from './demand-class';
+import { demandNames } from './demand-names';
 import { demandRuler } from './demand-state';
-import { stabilityNotes } from './member-stability';
+import { flangeInducedBuckling } from './flange-induced-buckling';
+import { isUnbent, stabilityNotes } from './member-stability';
 import { pureCases, pureClasses, type EnModel, type PureCases } from './model';
+import { withoutNegligible } from './negligible-effects';
 import { classFourNotes, interactionNotes, strengthNotes } from './notes';
 import { shearResistances } from './shear-resistance';
 
@@ -28,42 +31,44 @@ interface Judged {
 }
 
 /** All that the code says of a section and its demands. */
-export function en1993Outcome(model: EnModel, demands: readonly Demand[]): EnOutcome {
+export function en1993Outcome(model: EnModel, asked: readonly Demand[]): EnOutcome {
 	const cases = pureCases(model);
 	const tubeHolds = model.elements.kind !== 'tube' || cases.compression.overall < 4;
 	const shear = shearResistances(model, tubeHolds);
-	const judged = demands.map((demand, i) => judgeDemand(model, cases, demand, i, shear));
+	const names = demandNames(asked);
+	const demands = asked.map((demand) => withoutNegligible(model, demand));
+	const judged = demands.map((demand, i) => judgeDemand(model, cases, demand, names[i]!, shear));
 	const standing = standingCase(cases, judged);
-	const resistance = resistanceOf(model, cases, standing, shear, judged);
+	const bent = bentBothWays(model, cases);
+	const resistance = resistanceOf(model, cases, bent, standing, shear, judged);
+	const webRefused = bent.plus.webRefused || bent.minus.webRefused;
 	return {
 		classification: classificationOf(model, cases, standing),
 		resistance,
 		demands: judged.map(({ state }) => state),
 		notes: [
 			...classFourNotes(pureClasses(cases)),
-			...strengthNotes(model, cases, resistance),
+			...strengthNotes(model, cases, { basis: resistance.basis, webRefused }),
 			...shear.notes,
 			...holeNotes(model.section),
 			...interactionNotes(demands),
 			...judged.flatMap(({ state }) => state.missing),
+			...(demands.length === 0 || demands.some(isUnbent)
+				? flangeNotes(model, cases, bent.plus)
+				: []),
 			...stabilityNotes(model.section, demands)
 		]
 	};
 }
 
-/** A demand is called by its name, or by its place. */
-export const demandName = ({ name }: Demand, place: number): string =>
-	name?.trim() ? name : `demand ${place + 1}`;
-
 function judgeDemand(
 	model: EnModel,
 	cases: PureCases,
 	demand: Demand,
-	place: number,
+	name: string,
 	shear: Parameters<typeof demandChecks>[4]
 ): Judged {
 	const effects = effectsOf(demand);
-	const name = demandName(demand, place);
 	const classed = classifyDemand(model, cases, effects);
 	const { classified, basis } = classed;
 	const used = demandChecks(model, demand, name, classified, shear);
@@ -81,6 +86,7 @@ function judgeDemand(
 		N: effects.N,
 		...ruler,
 		countableBasis: ruler.countable === null ? null : alone.basis,
+		withheld: used.withheld,
 		utilisation: greatest(used.checks, used.missing)?.value ?? null,
 		missing: used.missing
 	};
@@ -113,24 +119,35 @@ function classificationOf(
 	return { standard: code.standard, overall, basis, elements, governing, byCase };
 }
 
+function bentOneWay(model: EnModel, cases: PureCases, sense: AxisSense): BendingResistance {
+	const found = bendingResistance(model, sense, cases[sense]);
+	return holesInTension(model.section, sense) ? { ...found, value: null } : found;
+}
+
+const bentBothWays = (model: EnModel, cases: PureCases) => ({
+	plus: bentOneWay(model, cases, 'plusMy'),
+	minus: bentOneWay(model, cases, 'minusMy')
+});
+
+/** Without a demanded moment the section is judged for bending with the bottom in tension. */
+const flangeNotes = (model: EnModel, { plusMy }: PureCases, { basis }: BendingResistance) =>
+	flangeInducedBuckling(model, { overall: plusMy.overall, basis, topCompressed: true });
+
 function resistanceOf(
 	model: EnModel,
 	cases: PureCases,
+	{ plus, minus }: ReturnType<typeof bentBothWays>,
 	standing: DemandClass,
 	shear: { y: number | null; z: number | null },
 	judged: readonly Judged[]
 ): Resistance {
-	const bent = (sense: AxisSense) => {
-		const found = bendingResistance(model, sense, cases[sense]);
-		return holesInTension(model.section, sense) ? { ...found, value: null } : found;
-	};
-	const [plus, minus] = [bent('plusMy'), bent('minusMy')];
+	const sideways = (sense: AxisSense) => bentOneWay(model, cases, sense).value;
 	return {
 		standard: model.code.standard,
 		basis: (standing.basis === '−My' ? minus : plus).basis,
 		MyRd: plus.value,
 		MyRdNegative: minus.value,
-		MzRd: lesser(bent('plusMz').value, bent('minusMz').value),
+		MzRd: lesser(sideways('plusMz'), sideways('minusMz')),
 		NRd: compressionResistance(model, cases.compression),
 		NtRd: tensionResistance(model),
 		VyRd: shear.y,

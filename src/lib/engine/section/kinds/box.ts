@@ -86,10 +86,12 @@ function fitIssues(definition: BoxSection): Issue[] {
 	return issues.length > 0 ? issues : weldIssues(definition, outsideWeld(sizes));
 }
 
-/** Fillets stand outside the webs, on the outstands of both flanges. */
+/** Fillets stand outside the webs, on the outstands of both flanges; flush flanges give them nothing to shorten. */
 function outsideWeld({ h, bTop, bBottom, tw, tfTop, tfBottom, webGap }: BoxSizes): WeldPlace {
+	const outstand = (Math.min(bTop, bBottom) - webGap) / 2 - tw;
+	const flush = fits(2 * outstand, 1e-9 * bTop);
 	return {
-		outstand: (Math.min(bTop, bBottom) - webGap) / 2 - tw,
+		outstand: flush ? Infinity : outstand,
 		web: (h - tfTop - tfBottom) / 2,
 		webWords: 'half the clear web depth',
 		joints: [
