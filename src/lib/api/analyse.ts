@@ -178,9 +178,22 @@ const demandStateSchema = z.object({
 	missing: z.array(noteSchema).meta({ description: 'Checks that apply and are not built.' })
 });
 
+/** The code and its choices, defaults filled in. */
+const codeChosen = z.object({
+	standard: standardSchema,
+	gammaM0: z.number(),
+	gammaM1: z.number(),
+	gammaM2: z.number(),
+	eta: z.number(),
+	method: z.enum(['LRFD', 'ASD']),
+	classAlpha: z.enum(['actual-N', 'proportional']),
+	allowEffectiveClass2: z.boolean()
+});
+
 export const analyseAnswerSchema = z
 	.object({
 		...envelopeFields,
+		code: codeChosen,
 		gross: grossSchema,
 		moment: momentSchema,
 		squashLoad: figure('kN'),

@@ -66,7 +66,7 @@ const operationOf = (operation: Operation) => {
 		parameters: [...pathParameters(path), ...(query ? queryParameters(query) : [])],
 		...(body && { requestBody: { required: true, content: reference(body) } }),
 		responses: responsesOf(operation),
-		security: signedIn ? [{ session: [] }] : [{}, { bearer: [] }]
+		security: signedIn ? [{ session: [] }] : [{}]
 	};
 };
 
@@ -97,7 +97,6 @@ export const openApiDocument = () => ({
 	components: {
 		schemas: componentSchemas(),
 		securitySchemes: {
-			bearer: { type: 'http', scheme: 'bearer' },
 			session: { type: 'apiKey', in: 'cookie', name: 'authjs.session-token' }
 		}
 	}

@@ -87,7 +87,7 @@ export const operations: readonly Operation[] = [
 /** What each status means, in a sentence. */
 export const refusalMeanings: Readonly<Record<number, string>> = {
 	400: 'The request is not JSON, or a field is wrong: issues name each one by its path.',
-	401: 'Sign in, or send a bearer token.',
+	401: 'Sign in first.',
 	403: 'Your role may not do this.',
 	404: 'There is nothing under this address or id.',
 	405: 'The address answers another method; the Allow header says which.',

@@ -31,6 +31,7 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 	);
 	const figures: AnalysisFigures = {
 		strengthBasis: section.strengthBasis,
+		code,
 		gross: section.gross,
 		moment: momentFigures(section, moments),
 		squashLoad: strengths.even ? mechanics.squash * 1e-3 : squashLoad(section),

@@ -1,13 +1,15 @@
 import type { StrengthBasis } from '../material/material';
 import type { Note } from '../result';
 import type { GrossProperties } from '../section/prepared';
-import type { Classification, DemandState, Resistance } from './result';
+import type { Classification, CodeChoice, DemandState, Resistance } from './result';
 import type { MomentFigures } from './section-moments';
 import type { Verdict } from './verdict';
 
 /** The contract's answer of `analyse` without its envelope. */
 export interface AnalysisFigures {
 	strengthBasis: StrengthBasis;
+	/** The code and its choices that the figures follow, defaults filled in. */
+	code: CodeChoice;
 	gross: GrossProperties;
 	moment: MomentFigures;
 	/** kN */

@@ -35,16 +35,17 @@ function nothingCounted(view: VerdictView, head: string, what: string): string {
 	return `${head}. ${what} may be counted: ${all} ${are} not checked.`;
 }
 
-function countedAs({ N, biaxial, basis }: VerdictView): VerdictToken[] {
+function countedAs({ N, biaxial, basis, gammaM0 }: VerdictView): VerdictToken[] {
+	const over = gammaM0 === 1 ? '' : ` over γM0 ${gammaM0.toFixed(2)}`;
 	if (N !== 0) return [words(' beside '), force(N), words(', by the linear sum.')];
 	if (biaxial) return [words(' about this axis, by the linear sum.')];
 	switch (basis) {
 		case 'plastic':
-			return [words(', the full plastic block.')];
+			return [words(`, the full plastic block${over}.`)];
 		case 'effective-class-2':
-			return [words(', the plastic block of the effective section.')];
+			return [words(`, the plastic block of the effective section${over}.`)];
 		default:
-			return [words(', up to first yield.')];
+			return [words(gammaM0 === 1 ? ', up to first yield.' : `, first yield${over}.`)];
 	}
 }
 
@@ -79,7 +80,7 @@ function decidingPart({ class: overall, element }: VerdictView): VerdictToken[] 
 	];
 }
 
-function beyond({ N, biaxial, axial, basis, ruler }: VerdictView): VerdictToken[] {
+function beyond({ N, biaxial, axial, basis, gammaM0, ruler }: VerdictView): VerdictToken[] {
 	if (axial) return [];
 	const { firstYield, fullPlastic, countable } = ruler;
 	if (firstYield === null || fullPlastic === null) return [];
@@ -90,7 +91,7 @@ function beyond({ N, biaxial, axial, basis, ruler }: VerdictView): VerdictToken[
 			words(' at first yield nor anything beyond is to be counted.')
 		];
 	const reserve = fullPlastic - firstYield;
-	if (N !== 0 || biaxial || basis === 'effective-class-2') {
+	if (N !== 0 || biaxial || gammaM0 !== 1 || basis === 'effective-class-2') {
 		const left = fullPlastic - countable;
 		return left > 0
 			? [words(' The last '), moment(left), words(' of the full block are not to be counted.')]

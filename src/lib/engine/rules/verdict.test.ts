@@ -143,3 +143,14 @@ describe('a clear verdict', () => {
 		expect(verdictOn(tube, { demands: [{ My: 20 }, { My: 2000 }] }).clear).toBe(false);
 	});
 });
+
+describe('a partial factor above one', () => {
+	it('is named in the sentence, and what it takes is not counted', () => {
+		const plastic = verdictOn(stocky, { code: { gammaM0: 1.1 }, demands: [{ My: 100 }] });
+		expect(plastic.sentence).toMatch(/, the full plastic block over γM0 1\.10\.$/);
+		expect(plastic.detail).toMatch(/The last .* kNm of the full block are not to be counted\.$/);
+		const slenderer: ISection = { ...stocky, b: 460, tf: 18, grade: 235 };
+		const elastic = verdictOn(slenderer, { code: { gammaM0: 1.1 }, demands: [{ My: 100 }] });
+		expect(elastic.sentence).toMatch(/^Class 3\. Count .*, first yield over γM0 1\.10\.$/);
+	});
+});

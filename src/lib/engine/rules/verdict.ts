@@ -1,6 +1,12 @@
 import type { Note } from '../result';
 import type { AnalysisFigures } from './analysis';
-import type { ClassifiedElement, DemandState, Resistance, SectionClass } from './result';
+import type {
+	ClassifiedElement,
+	DemandState,
+	Resistance,
+	SectionClass,
+	CodeChoice
+} from './result';
 import { uncheckedNames } from './unchecked';
 import { countSentence, detailSentence, noClassSentence } from './verdict-sentences';
 import { plainSentence, words, type VerdictToken } from './verdict-tokens';
@@ -52,6 +58,7 @@ export interface VerdictView {
 	/** Checks, in words, for want of which nothing is counted. */
 	withheld: readonly string[];
 	basis: Resistance['basis'] | null;
+	gammaM0: number;
 	ruler: VerdictRuler;
 }
 
@@ -62,7 +69,7 @@ export interface VerdictView {
 export function verdict(figures: AnalysisFigures, demandName?: string): Verdict {
 	const named = figures.demands.find(({ demand }) => demand === demandName);
 	const state = named ?? pressing(figures.demands);
-	const view = state ? demandView(state) : plainView(figures);
+	const view = state ? demandView(state, figures.code) : plainView(figures);
 	const sentenceTokens = view ? countSentence(view) : noClassSentence();
 	const detailTokens = view ? detailSentence(view) : [words(figures.notes.at(-1)?.message ?? '')];
 	return {
@@ -94,7 +101,7 @@ function pressing(demands: readonly DemandState[]): DemandState | undefined {
 	);
 }
 
-function demandView(state: DemandState): VerdictView {
+function demandView(state: DemandState, { gammaM0 }: CodeChoice): VerdictView {
 	const { axisAngle, moment: demand, countable, firstYield, fullPlastic } = state;
 	return {
 		class: state.class,
@@ -105,6 +112,7 @@ function demandView(state: DemandState): VerdictView {
 		countableForce: state.countableForce,
 		withheld: uncheckedNames(state.withheld),
 		basis: state.countableBasis,
+		gammaM0,
 		ruler: { axisAngle, demand, countable, firstYield, fullPlastic }
 	};
 }
@@ -122,6 +130,7 @@ function plainView(figures: AnalysisFigures): VerdictView | null {
 		countableForce: null,
 		withheld: [],
 		basis: resistance.MyRd === null ? null : resistance.basis,
+		gammaM0: figures.code.gammaM0,
 		ruler: { ...bareRuler(figures), countable: resistance.MyRd }
 	};
 }
