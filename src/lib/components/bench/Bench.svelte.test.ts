@@ -5,6 +5,7 @@ import { describe, expect, it } from 'vitest';
 import { Bench as BenchOf } from './bench.svelte';
 import Bench from './Bench.svelte';
 import { openingAddressed } from './opened-study';
+import { undoStep } from './undo-step';
 
 function open() {
 	const bench = new BenchOf(openingAddressed);
@@ -68,6 +69,27 @@ describe('the parts form', () => {
 		expect(bench.stale).toBe(true);
 		expect(bench.section.gross.area).toBeGreaterThan(0);
 		expect(screen.getAllByRole('alert')[0]).toHaveTextContent(/[Ww]eb thickness/);
+	});
+
+	it('ties what is wrong to the field that it is about', async () => {
+		const { user } = open();
+		await type(user, 'Web thickness', '0');
+		expect(field('Web thickness')).toHaveAccessibleDescription(/[Ww]eb thickness/);
+		expect(field('Web thickness')).toHaveAttribute('aria-invalid', 'true');
+	});
+
+	it('clears a text it could not read before undoing anything else', async () => {
+		const { bench, user } = open();
+		await type(user, 'Web thickness', '16');
+		await user.clear(field('Top flange width'));
+		await user.type(field('Top flange width'), 'abc');
+		await user.tab();
+		undoStep(bench);
+		flushSync();
+		expect(field('Top flange width')).toHaveValue('400');
+		expect(bench.study.section).toMatchObject({ tw: 16 });
+		undoStep(bench);
+		expect(bench.study.section).toMatchObject({ tw: 14 });
 	});
 
 	it('sets a grade for one plate', async () => {

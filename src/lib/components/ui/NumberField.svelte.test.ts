@@ -1,6 +1,8 @@
 import { render, screen } from '@testing-library/svelte';
 import userEvent from '@testing-library/user-event';
+import { tick } from 'svelte';
 import { describe, expect, it, vi } from 'vitest';
+import { badText } from './bad-text.svelte';
 import NumberField from './NumberField.svelte';
 
 function show(props: Partial<Parameters<typeof render<typeof NumberField>>[1]> = {}) {
@@ -103,5 +105,35 @@ describe('NumberField', () => {
 	it('sends the engine value in a form, whatever units are shown', () => {
 		show({ value: 304.8, name: 'width' });
 		expect(document.querySelector<HTMLInputElement>('input[name=width]')?.value).toBe('304.8');
+	});
+
+	it('shortens a figure to its room, and shows it whole in the title and while it is edited', async () => {
+		const { input, onchange } = show({ value: 103.124, room: 6 });
+		expect(input).toHaveValue('103.12');
+		expect(input).toHaveAttribute('title', '103.124 mm');
+		await userEvent.click(input);
+		expect(input).toHaveValue('103.124');
+		await userEvent.tab();
+		expect(input).toHaveValue('103.12');
+		expect(onchange).not.toHaveBeenCalled();
+	});
+
+	it('is described by a fault that is written elsewhere', () => {
+		document.body.insertAdjacentHTML('beforeend', '<p id="elsewhere">The web is too thin.</p>');
+		const { input } = show({ faultId: 'elsewhere' });
+		expect(input).toHaveAccessibleDescription('The web is too thin.');
+		expect(input).toHaveAttribute('aria-invalid', 'true');
+	});
+
+	it('lets a text left with a fault be cleared from outside', async () => {
+		const { input } = show();
+		expect(badText.clear()).toBe(false);
+		await userEvent.type(input, 'abc');
+		await userEvent.tab();
+		expect(badText.stands).toBe(true);
+		expect(badText.clear()).toBe(true);
+		await tick();
+		expect(input).toHaveValue('400');
+		expect(badText.stands).toBe(false);
 	});
 });

@@ -23,3 +23,18 @@ export function fieldFigure(
 	const digits = whole ? Math.max(LONGEST, format.digits) : format.digits;
 	return formatQuantity(value, quantity, preferences, { digits, trim: true, unit: format.unit });
 }
+
+/** The figure with as many places as `room` characters hold; never cut in its whole part. */
+export function figureWithin(
+	value: number,
+	quantity: Quantity,
+	preferences: Preferences,
+	{ digits, room }: { digits: number; room: number }
+): string {
+	const full = fieldFigure(value, quantity, preferences, { digits });
+	for (let decimals = TYPED_DECIMALS; full.length > room && decimals >= 0; decimals -= 1) {
+		const shorter = formatQuantity(value, quantity, preferences, { decimals, trim: true });
+		if (shorter.length <= room || decimals === 0) return shorter;
+	}
+	return full;
+}
