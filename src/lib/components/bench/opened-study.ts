@@ -1,3 +1,4 @@
+import { changesTold } from './allowed-code';
 import { openingBend, openingStudy } from './study';
 import { addressedStudy, addressText, studyParameter, type Addressed } from './study-address';
 
@@ -5,6 +6,8 @@ export interface Opened {
 	readonly addressed: Addressed;
 	/** Why the study in the address was not opened; empty when it was, or when there was none. */
 	readonly notice: string;
+	/** What was changed of it on opening; empty when nothing was. */
+	readonly adjusted: string;
 }
 
 export const openingAddressed: Addressed = { study: openingStudy, bend: openingBend };
@@ -12,11 +15,15 @@ export const openingAddressed: Addressed = { study: openingStudy, bend: openingB
 /** The study that an address carries, or the ready plate girder. */
 export function openedStudy(parameters: URLSearchParams): Opened {
 	const text = parameters.get(studyParameter);
-	if (text === null) return { addressed: openingAddressed, notice: '' };
+	if (text === null) return { addressed: openingAddressed, notice: '', adjusted: '' };
 	const read = addressedStudy(text);
-	if (read.ok) return { addressed: read.value, notice: '' };
+	if (read.ok) {
+		const { study, bend, changes = [] } = read.value;
+		return { addressed: { study, bend }, notice: '', adjusted: changesTold(changes) };
+	}
 	return {
 		addressed: openingAddressed,
+		adjusted: '',
 		notice: `${read.error} A plate girder is opened instead.`
 	};
 }

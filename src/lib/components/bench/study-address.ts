@@ -5,6 +5,7 @@ import { sectionSchema } from '$lib/api/section';
 import { fail, ok, type Result } from '$lib/engine/result';
 import { prepareSection } from '$lib/engine/section/prepare';
 import type { SectionDefinition } from '$lib/engine/section/definition';
+import { allowedCode } from './allowed-code';
 import { openingBend, type BendChoice, type Study } from './study';
 
 /** Name of the query parameter that carries an unsaved study. */
@@ -32,6 +33,8 @@ const addressSchema = z.object({
 export interface Addressed {
 	readonly study: Study;
 	readonly bend: BendChoice;
+	/** Code values that are no longer allowed and were changed on reading, in words. */
+	readonly changes?: readonly string[];
 }
 
 /** An unsaved study as text for the address bar: version, then JSON in base64url. */
@@ -56,13 +59,32 @@ export function addressedStudy(text: string): Result<Addressed, string> {
 	const [version, body = ''] = text.split('.', 2);
 	if (version !== addressVersion)
 		return fail('The study in this link was made by a version that is not understood here.');
-	const parsed = addressSchema.safeParse(jsonOf(body));
+	const { compact, changes } = withAllowedCode(jsonOf(body));
+	const parsed = addressSchema.safeParse(compact);
 	if (!parsed.success) return fail('The study in this link is damaged and could not be read.');
 	const addressed = fromCompact(parsed.data);
 	const prepared = prepareSection(addressed.study.section, addressed.study.strengthBasis);
-	if (prepared.ok) return ok(addressed);
+	if (prepared.ok) return ok(changes.length > 0 ? { ...addressed, changes } : addressed);
 	const why = prepared.error[0]?.message ?? '';
 	return fail(`The section in this link cannot be built. ${why}`.trim());
+}
+
+/** Links outlive the values that a code choice may take: only its numbers are looked at here. */
+const codeNumbers = z.looseObject({
+	c: z.looseObject({
+		gammaM0: z.number().optional(),
+		gammaM1: z.number().optional(),
+		gammaM2: z.number().optional(),
+		eta: z.number().optional()
+	})
+});
+
+function withAllowedCode(compact: unknown): { compact: unknown; changes: readonly string[] } {
+	const read = codeNumbers.safeParse(compact);
+	if (!read.success) return { compact, changes: [] };
+	const { c, ...rest } = read.data;
+	const { code, changes } = allowedCode(c as Study['code']);
+	return { compact: { ...rest, c: code }, changes };
 }
 
 function fromCompact(compact: z.output<typeof addressSchema>): Addressed {

@@ -58,39 +58,3 @@ export function freeCaseName(demands: readonly DemandCase[]): string {
 	while (demands.some(({ name }) => name === `Case ${number}`)) number += 1;
 	return `Case ${number}`;
 }
-
-/** The section in few words: the shape's designation, or its kind and size. */
-export function studyTitle({ shape, section }: Study): string {
-	return shape ?? sectionTitle(section);
-}
-
-const size = (value: number) => String(Math.round(value * 10) / 10);
-
-function sectionTitle(section: SectionDefinition): string {
-	switch (section.kind) {
-		case 'i':
-			return section.fabrication === 'welded'
-				? `Plate girder ${size(section.h)} × ${size(section.b)}`
-				: `I-section ${size(section.h)} × ${size(section.b)}`;
-		case 'channel':
-			return `Channel ${size(section.h)} × ${size(section.b)}`;
-		case 'tee':
-			return `Tee ${size(section.h)} × ${size(section.b)}`;
-		case 'angle':
-			return `Angle ${size(section.h)} × ${size(section.b)} × ${size(section.t)}`;
-		case 'rectangular-hollow':
-			return `Hollow ${size(section.h)} × ${size(section.b)} × ${size(section.t)}`;
-		case 'circular-hollow':
-			return `Tube ${size(section.d)} × ${size(section.t)}`;
-		case 'box':
-			return `Box girder ${size(section.h)} × ${size(section.b)}`;
-		case 'flat':
-			return `Flat ${size(section.b)} × ${size(section.h)}`;
-		case 'round':
-			return `Round ${size(section.d)}`;
-		case 'plates':
-			return `${section.plates.length} plates`;
-		case 'outline':
-			return 'Outline';
-	}
-}

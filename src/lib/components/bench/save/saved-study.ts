@@ -1,4 +1,5 @@
 import type { CreateSectionRequest, SectionRecord } from '$lib/api/sections';
+import { allowedCode, changesTold } from '../allowed-code';
 import { openingStudy, type Study } from '../study';
 
 /** What of a study is kept on the Rack. */
@@ -29,8 +30,12 @@ export function savedStudy({
 	return {
 		shape: typeof settings.shape === 'string' ? settings.shape : null,
 		section: definition as Study['section'],
-		code: { ...openingStudy.code, ...(settings.code as Study['code']) },
+		code: { ...openingStudy.code, ...allowedCode((settings.code ?? {}) as Study['code']).code },
 		strengthBasis: settings.strengthBasis ?? openingStudy.strengthBasis,
 		demands: demands.length > 0 ? demands : [{ name: 'Case 1' }]
 	};
 }
+
+/** What `savedStudy` changes of a section saved when other code values were allowed; or empty. */
+export const savedChanges = ({ settings }: Pick<SectionRecord, 'settings'>): string =>
+	changesTold(allowedCode((settings.code ?? {}) as Study['code']).changes);

@@ -3,12 +3,14 @@ import type { SectionConflict, SectionRecord } from '$lib/api/sections';
 import type { Result } from '$lib/engine/result';
 import type { Bench } from '../bench.svelte';
 import type { Study } from '../study';
+import type { SaveRights } from './save-act';
 import { savedStudy, sectionToSave } from './saved-study';
 
 export interface SavedMark {
 	readonly id: string;
 	readonly name: string;
 	readonly version: number;
+	readonly status: SectionRecord['status'];
 	readonly study: Study;
 }
 
@@ -18,13 +20,24 @@ export class Saving {
 	conflict = $state.raw<SectionConflict | null>(null);
 	busy = $state(false);
 	fault = $state('');
+	#rights = $state.raw<SaveRights>({ create: true, change: true });
 	readonly #bench: Bench;
 	readonly #fetcher: typeof fetch;
 
-	constructor(bench: Bench, record: SectionRecord | null, fetcher: typeof fetch = fetch) {
+	constructor(
+		bench: Bench,
+		record: SectionRecord | null,
+		rights: SaveRights,
+		fetcher: typeof fetch = fetch
+	) {
 		this.#bench = bench;
+		this.#rights = rights;
 		this.#fetcher = fetcher;
 		this.saved = record && markOf(record, bench.study);
+	}
+
+	get rights(): SaveRights {
+		return this.#rights;
 	}
 
 	get changed(): boolean {
@@ -73,24 +86,33 @@ export class Saving {
 	#take(answer: Result<SectionRecord, SectionFailure>, study: Study): string | null {
 		if (answer.ok) {
 			this.saved = markOf(answer.value, study);
+			this.#rights = { ...this.#rights, change: true };
 			this.conflict = null;
 			return answer.value.id;
 		}
 		if (answer.error.conflict) this.conflict = answer.error.conflict;
-		else this.fault = faultText(answer.error);
+		else this.fault = this.#faultOf(answer.error);
 		return null;
+	}
+
+	/** Whoever may save at all and is refused had the section approved under their hands. */
+	#faultOf(failure: SectionFailure): string {
+		const { create, change } = this.#rights;
+		if (failure.status !== 403 || !create || !change || !this.saved) return faultText(failure);
+		this.#rights = { create, change: false };
+		return 'This section has been approved since you opened it, so only an owner or a librarian may change it. Your changes are still here: save them as new.';
 	}
 }
 
-const markOf = ({ id, name, version }: SectionRecord, study: Study): SavedMark => ({
+const markOf = ({ id, name, version, status }: SectionRecord, study: Study): SavedMark => ({
 	id,
 	name,
 	version,
+	status,
 	study
 });
 
 function faultText({ status, message, issues }: SectionFailure): string {
 	if (status === 401) return 'You have been signed out. Sign in and save again; the study is kept.';
-	if (status === 403) return 'Your role may look but not save. Ask an owner of the firm.';
 	return issues[0] ? `${message} ${issues[0].message}` : message;
 }
