@@ -56,7 +56,10 @@ export type ResponseRequest = z.infer<typeof responseRequestSchema>;
 
 const figure = (unit: string) => z.number().nullable().meta({ 'x-unit': unit });
 const resultant = z.object({
-	force: z.number().meta({ 'x-unit': 'kN' }),
+	force: z.number().meta({
+		'x-unit': 'kN',
+		description: 'Tension positive, so that of the compressed side is negative; both add up to N.'
+	}),
 	y: z.number().meta({ 'x-unit': 'mm' }),
 	z: z.number().meta({ 'x-unit': 'mm' })
 });
@@ -72,19 +75,31 @@ export const stateSchema = z
 		e0: figure(''),
 		ky: figure('1/m'),
 		kz: figure('1/m'),
-		neutralAxis: z.object({ distance: z.number(), angle: z.number() }).nullable(),
-		yieldedShare: figure(''),
+		neutralAxis: z
+			.object({
+				distance: z.number().meta({
+					'x-unit': 'mm',
+					description:
+						'From the gross centroid along the normal to the left of the axis (up, at 0°).'
+				}),
+				angle: z.number().meta({ 'x-unit': '°', description: 'From y, in (−90, 90].' })
+			})
+			.nullable()
+			.meta({ description: 'Line of zero strain; null without curvature.' }),
+		yieldedShare: figure('').meta({
+			description: 'Share of the area past the first line of its law.'
+		}),
 		extremes: z
 			.object({
 				strainMin: z.number(),
 				strainMax: z.number(),
-				stressMin: z.number(),
-				stressMax: z.number()
+				stressMin: z.number().meta({ 'x-unit': 'N/mm²' }),
+				stressMax: z.number().meta({ 'x-unit': 'N/mm²' })
 			})
 			.nullable(),
 		compression: resultant.nullable(),
 		tension: resultant.nullable(),
-		leverArm: figure('mm'),
+		leverArm: figure('mm').meta({ description: 'Distance between the two resultants.' }),
 		converged: z.boolean()
 	})
 	.meta({
