@@ -197,7 +197,9 @@ describe('saving from the Bench', () => {
 		await other.getByText('saved', { exact: true }).waitFor();
 		await page.getByRole('button', { name: 'Save', exact: true }).click();
 		const dialog = page.getByRole('dialog', { name: /Somebody saved this section/ });
-		expect(await dialog.getByRole('row', { name: /^tw/ }).textContent()).toMatch(/22.*20/s);
+		expect(await dialog.getByRole('row', { name: /^Web thickness/ }).textContent()).toMatch(
+			/22.*20/s
+		);
 		await dialog.getByRole('button', { name: 'Overwrite version 2' }).click();
 		await page.getByText('saved', { exact: true }).waitFor();
 		await other.reload();
