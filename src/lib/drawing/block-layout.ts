@@ -39,7 +39,7 @@ export interface BlockLayout {
 
 const shares = {
 	wide: { section: 0.455, strain: 0.15, stress: 0.245, couple: 0.15 },
-	narrow: { section: 0.37, strain: 0.18, stress: 0.27, couple: 0.18 }
+	narrow: { section: 0.36, strain: 0.18, stress: 0.29, couple: 0.17 }
 };
 const room = {
 	wide: { head: 58, above: 40, below: 46, dimension: 26, gutter: 86, side: 14 },
@@ -48,6 +48,8 @@ const room = {
 const breakGap = 12;
 /** Depth on the drawing below which a section counts as very flat, px. */
 const leastDepth = 44;
+/** Room that is laid out even before the drawing has its size, so that nothing is turned inside out. */
+const leastRoom = 40;
 
 /** Lays the drawing out for a size in px and an extent in mm. */
 export function blockLayout(width: number, height: number, extent: Extent): BlockLayout {
@@ -55,8 +57,8 @@ export function blockLayout(width: number, height: number, extent: Extent): Bloc
 	const use = narrow ? room.narrow : room.wide;
 	const columns = columnsOf(width, narrow ? shares.narrow : shares.wide);
 	const steelLeft = use.dimension + use.gutter;
-	const steelRoom = columns.section.width - steelLeft - use.side;
-	const depthRoom = height - use.head - use.above - use.below;
+	const steelRoom = Math.max(leastRoom, columns.section.width - steelLeft - use.side);
+	const depthRoom = Math.max(leastRoom, height - use.head - use.above - use.below);
 	const scale = drawingScale(extent, steelRoom, depthRoom);
 	const deep = (extent.top - extent.bottom) * scale;
 	const top = use.head + use.above + (depthRoom - deep) / 2;

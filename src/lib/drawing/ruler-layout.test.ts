@@ -32,6 +32,24 @@ describe('the ruler', () => {
 		);
 	});
 
+	it('cuts no name by the line of another mark, for a demand far above all others', () => {
+		for (const demand of [3600, 5000, 9000, 24000]) {
+			for (const width of [300, 560, 700]) {
+				const { marks: placed } = rulerLayout(marks(3110, 3546, demand), width, roughTextWidth, 13);
+				const cut = placed.flatMap((label) =>
+					placed.filter(
+						({ key, x, row }) =>
+							key !== label.key &&
+							row >= label.row &&
+							x > label.labelX &&
+							x < label.labelX + label.labelWidth
+					)
+				);
+				expect(cut).toEqual([]);
+			}
+		}
+	});
+
 	it('puts a label above the line that would run through it', () => {
 		const { marks: placed } = rulerLayout(marks(3110, 3300), 600, roughTextWidth, 13);
 		const [lower, upper] = ['0', '1'].map((key) => placed.find((mark) => mark.key === key));

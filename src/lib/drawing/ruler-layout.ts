@@ -23,12 +23,13 @@ export interface RulerLayout {
 	readonly x: (value: number) => number;
 }
 
+/** Between labels in a row, and between a label and the line of another mark, px. */
 const gap = 8;
+const lineGap = 2;
 
 /**
  * Lays a ruler from 0 to its greatest mark over `width` px. A label ends at its mark, or begins
- * there near the left end; each stands in a row where neither a label nor the line of another mark
- * runs through it.
+ * there; each stands in a row where neither a label nor the line of another mark runs through it.
  */
 export function rulerLayout(
 	marks: readonly RulerMark[],
@@ -38,12 +39,12 @@ export function rulerLayout(
 ): RulerLayout {
 	const most = Math.max(...marks.map(({ value }) => value), 1e-9);
 	const scale = scaleLinear([0, most * 1.01], [0, width]);
-	const wanted = clearOfStart(
-		marks.map((mark) => anchored(mark, scale(mark.value), measure(mark.label, size))),
-		width
-	);
-	const placed: PlacedMark[] = [];
-	for (const label of placingOrder(wanted)) placed.push({ ...label, row: freeRow(label, placed) });
+	const lines = marks.map((mark) => ({
+		...mark,
+		x: scale(mark.value),
+		labelWidth: measure(mark.label, size)
+	}));
+	const placed = bestPlaces(lines, width);
 	return {
 		marks: placed,
 		ticks: tickValues(scale, width).map((value) => ({ value, x: scale(value) })),
@@ -52,39 +53,55 @@ export function rulerLayout(
 	};
 }
 
+type Line = Omit<PlacedMark, 'row' | 'labelX'>;
 type Anchored = Omit<PlacedMark, 'row'>;
 
-const anchored = (mark: RulerMark, x: number, labelWidth: number): Anchored => ({
-	...mark,
-	x,
-	labelWidth,
-	labelX: x >= labelWidth ? x - labelWidth : Math.max(0, x - 2)
-});
-
-const beginsAt = ({ x, labelX }: Anchored) => labelX + 2 >= x;
-
-/** A label that would cover the line of one that begins near the left end begins at its mark too. */
-function clearOfStart(labels: readonly Anchored[], width: number): Anchored[] {
-	const starts = labels.filter(beginsAt).map(({ x }) => x);
-	return labels.map((label) => {
-		const covers = starts.some((x) => x >= label.labelX - gap && x < label.x);
-		const fits = label.x + label.labelWidth <= width;
-		return covers && fits && !beginsAt(label) ? { ...label, labelX: label.x - 2 } : label;
-	});
+/** Of all ways to let labels end or begin at their marks, that with the fewest rows, most ending. */
+function bestPlaces(lines: readonly Line[], width: number): PlacedMark[] {
+	let best: { cost: number; placed: PlacedMark[] } | null = null;
+	for (let choice = 0; choice < 2 ** lines.length; choice += 1) {
+		const labels = lines.map((line, index) => anchored(line, (choice >> index) % 2 === 1, width));
+		const { placed, cuts } = inRows(labels);
+		const rows = Math.max(0, ...placed.map(({ row }) => row));
+		const begins = labels.filter(({ x, labelX }) => labelX >= x).length;
+		const cost = 1000 * cuts + 10 * rows + begins;
+		if (!best || cost < best.cost) best = { cost, placed };
+	}
+	return best?.placed ?? [];
 }
 
-/** Labels that end at their mark from left to right, then those that begin there from right to left. */
-function placingOrder(labels: readonly Anchored[]): Anchored[] {
-	const ends = labels.filter((label) => !beginsAt(label));
-	const begins = labels.filter(beginsAt);
-	return [...ends.sort((a, b) => a.x - b.x), ...begins.sort((a, b) => b.x - a.x)];
+function anchored(line: Line, begins: boolean, width: number): Anchored {
+	const { x, labelWidth } = line;
+	const wanted = begins ? x + lineGap + 1 : x - labelWidth;
+	return { ...line, labelX: Math.max(0, Math.min(wanted, width - labelWidth)) };
+}
+
+const covers = (label: Anchored, { x }: Line) =>
+	x > label.labelX - lineGap && x < label.labelX + label.labelWidth + lineGap;
+
+const meets = (a: Anchored, b: Anchored) =>
+	a.labelX < b.labelX + b.labelWidth + gap && b.labelX < a.labelX + a.labelWidth + gap;
+
+/** Each label above those whose lines it covers; `cuts` counts those that cover each other's. */
+function inRows(labels: readonly Anchored[]): { placed: PlacedMark[]; cuts: number } {
+	const placed: PlacedMark[] = [];
+	const left = [...labels];
+	let cuts = 0;
+	while (left.length > 0) {
+		const free = left.findIndex((label) =>
+			left.every((other) => other === label || !covers(label, other))
+		);
+		if (free < 0) cuts += 1;
+		const [label] = left.splice(Math.max(0, free), 1);
+		if (label) placed.push({ ...label, row: freeRow(label, placed) });
+	}
+	return { placed, cuts };
 }
 
 /** First row above every line that would run through the label, and free of other labels. */
 function freeRow(label: Anchored, placed: readonly PlacedMark[]): number {
-	const [from, to] = [label.labelX - gap, label.labelX + label.labelWidth + gap];
-	const crossing = placed.filter(({ x }) => x > from && x < to);
-	const meeting = placed.filter((one) => one.labelX < to && one.labelX + one.labelWidth > from);
+	const crossing = placed.filter((one) => covers(label, one));
+	const meeting = placed.filter((one) => meets(label, one));
 	let row = Math.max(0, ...crossing.map((one) => one.row + 1));
 	while (meeting.some((one) => one.row === row)) row += 1;
 	return row;

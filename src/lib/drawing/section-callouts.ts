@@ -3,11 +3,11 @@ import type { SectionDefinition } from '$lib/engine/section/definition';
 
 /**
  * A size written on the drawing: above or below the steel or beside a point of it while it stands
- * upright, or the size of the `whole`, true however it is turned.
+ * upright, `room` mm being free there above and below, or the size of the `whole`, true however it is turned.
  */
 export interface Callout {
 	readonly text: string;
-	readonly place: 'above' | 'below' | 'whole' | { readonly beside: Point };
+	readonly place: 'above' | 'below' | 'whole' | { readonly beside: Point; readonly room: number };
 }
 
 type Length = (millimetres: number) => string;
@@ -22,17 +22,27 @@ export function sectionCallouts(definition: SectionDefinition, length: Length): 
 			return [
 				above(by(definition.b, definition.tfTop)),
 				below(by(definition.bBottom ?? definition.b, definition.tfBottom)),
-				beside(length(definition.tw), boxWebEdge(definition), definition.h * 0.36)
+				beside(
+					length(definition.tw),
+					boxWebEdge(definition),
+					definition.tfBottom,
+					definition.h - definition.tfTop
+				)
 			];
 		case 'channel':
 			return [
 				above(by(definition.b, definition.tf)),
-				beside(length(definition.tw), definition.tw, definition.h * 0.36)
+				beside(length(definition.tw), definition.tw, definition.tf, definition.h - definition.tf)
 			];
 		case 'tee':
 			return [
 				above(by(definition.b, definition.tf)),
-				beside(length(definition.tw), (definition.b + definition.tw) / 2, definition.h * 0.3)
+				beside(
+					length(definition.tw),
+					(definition.b + definition.tw) / 2,
+					0,
+					definition.h - definition.tf
+				)
 			];
 		case 'angle':
 			return [whole(`${length(definition.h)} × ${by(definition.b, definition.t)}`)];
@@ -47,7 +57,7 @@ export function sectionCallouts(definition: SectionDefinition, length: Length): 
 		case 'plates':
 			return definition.plates.slice(0, 6).map((plate) => ({
 				text: by(plate.width, plate.thickness),
-				place: { beside: { y: plate.y, z: plate.z } }
+				place: { beside: { y: plate.y, z: plate.z }, room: Infinity }
 			}));
 		case 'outline':
 			return [];
@@ -57,9 +67,10 @@ export function sectionCallouts(definition: SectionDefinition, length: Length): 
 const above = (text: string): Callout => ({ text, place: 'above' });
 const below = (text: string): Callout => ({ text, place: 'below' });
 const whole = (text: string): Callout => ({ text, place: 'whole' });
-const beside = (text: string, y: number, z: number): Callout => ({
+/** A web's thickness beside its edge at `y`, a third up its clear depth between `from` and `to`. */
+const beside = (text: string, y: number, from: number, to: number): Callout => ({
 	text,
-	place: { beside: { y, z } }
+	place: { beside: { y, z: from + (to - from) * 0.34 }, room: to - from }
 });
 
 const boxWebEdge = (box: { b: number; bBottom?: number; webGap: number }) =>
@@ -74,6 +85,6 @@ function iCallouts(
 	return [
 		above(by(i.b, i.tf)),
 		below(by(i.bBottom ?? i.b, i.tfBottom ?? i.tf)),
-		beside(length(i.tw), middle + i.tw / 2, i.h * 0.36)
+		beside(length(i.tw), middle + i.tw / 2, i.tfBottom ?? i.tf, i.h - i.tf)
 	];
 }

@@ -104,7 +104,7 @@ export class BlockScene {
 	});
 	stressPx = (stress: number) => {
 		const { stress: column, narrow } = this.layout;
-		const half = column.width / 2 - (narrow ? 32 : 42);
+		const half = column.width / 2 - (narrow ? 38 : 42);
 		return column.middle + (stress / this.#stressReach) * half;
 	};
 }
