@@ -108,7 +108,8 @@ export class Bench {
 		rulerModel(
 			this.section,
 			this.verdict.demand === null ? null : this.verdict.ruler,
-			this.activeDemand
+			this.activeDemand,
+			this.verdict.countable.force
 		)
 	);
 

@@ -6,15 +6,15 @@ import type { SectionDefinition } from '$lib/engine/section/definition';
 import { prepareSection } from '$lib/engine/section/prepare';
 import { defaultPreferences } from '$lib/units';
 import { rulerModel } from './ruler-model';
-import { rulerPath } from './ruler-text';
+import { rulerPath, rulerText } from './ruler-text';
 import { openingStudy } from './study';
 
 function ruler(definition: SectionDefinition, demand: Demand) {
 	const built = prepareSection(definition);
 	if (!built.ok) throw new Error('cannot be built');
 	const figures = analyse(built.value, { demands: [{ name: 'A', ...demand }] });
-	const { demand: named, ruler: ruled } = verdict(figures, 'A');
-	return rulerModel(built.value, named === null ? null : ruled, demand);
+	const { demand: named, ruler: ruled, countable } = verdict(figures, 'A');
+	return rulerModel(built.value, named === null ? null : ruled, demand, countable.force);
 }
 
 /** 20 × 200, S355 (fy 345 above 16 mm): W = 20 × 200² / 6, plastic 1.5 times. */
@@ -42,5 +42,24 @@ describe('the ruler of a demand', () => {
 		expect(model.count).toBeNull();
 		expect(model.firstYield).toBeCloseTo((345 * 20 * 200 ** 2) / 6e6, 6);
 		expect(model.plastic).toBeCloseTo((345 * 20 * 200 ** 2) / 4e6, 6);
+	});
+
+	it('measures N without a moment in forces, up to the squash load fy A', () => {
+		const model = ruler(flat, { N: -500 });
+		expect(model).toMatchObject({ quantity: 'force', demand: 500, firstYield: null });
+		expect(model.plastic).toBeCloseTo((345 * 20 * 200) / 1e3, 6);
+		expect(rulerText(model, defaultPreferences)).toMatch(/^of compression alone; demand 500\.0.kN/);
+	});
+
+	it('counts in tension what the engine counts of N alone', () => {
+		const model = ruler(openingStudy.section, { N: 900 });
+		expect(model.quantity).toBe('force');
+		expect(model.count).toBeGreaterThan(900);
+		expect(model.plastic).toBeGreaterThanOrEqual(model.count ?? Infinity);
+	});
+
+	it('names a turned axis as a line, with the sense beside it', () => {
+		const model = ruler(openingStudy.section, { My: -100, Mz: 20 });
+		expect(rulerPath(model, defaultPreferences)).toBe('about an axis at −11.3°, top in tension');
 	});
 });
