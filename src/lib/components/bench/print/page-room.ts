@@ -3,7 +3,7 @@ import type { Analysis } from '$lib/engine/rules/analysis';
 type Counted = Pick<Analysis, 'notes' | 'classification' | 'resistance'>;
 
 /** Room of a Letter page (the lower of the two in use) for drawing, tables and notes, px as laid out. */
-const page = 765;
+const page = 725;
 const row = 15;
 const least = 300;
 const most = 470;
