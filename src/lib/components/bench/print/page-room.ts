@@ -3,9 +3,9 @@ import type { Analysis } from '$lib/engine/rules/analysis';
 type Counted = Pick<Analysis, 'notes' | 'classification' | 'resistance'>;
 
 /** Room of a Letter page (the lower of the two in use) for drawing, tables and notes, px as laid out. */
-const page = 725;
+const page = 685;
 const row = 15;
-const least = 300;
+const least = 260;
 const most = 470;
 
 /** Height of the drawing that fills a page with what stands under it, px; never too small to read. */
