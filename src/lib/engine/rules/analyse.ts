@@ -71,6 +71,10 @@ function judged(
 }
 
 function distinct(notes: readonly Note[]): Note[] {
-	const seen = new Map(notes.map((note) => [`${note.code} ${note.message}`, note]));
-	return [...seen.values()];
+	const kept: Note[] = [];
+	for (const note of notes) {
+		const same = ({ code, message }: Note) => code === note.code && message === note.message;
+		if (!kept.some(same)) kept.push(note);
+	}
+	return kept;
 }

@@ -63,11 +63,11 @@ const webs = new Set(['web', 'leftWeb', 'rightWeb']);
 /** A web follows the strain of its flanges: its ε is that of the strongest part (EN 1993-1-5, 4.3(6)). */
 function measured(flats: readonly Flat[], strengths: Strengths): SectionElements {
 	const strength = (part: string) => (webs.has(part) ? strengths.most : strengths.of(part));
-	const plates = flats.map((flat) => ({
-		...flat,
-		c: Math.hypot(flat.to.y - flat.from.y, flat.to.z - flat.from.z),
-		epsilon: epsilonOf(strength(flat.part), strengths.modulus)
-	}));
+	const plates = flats.map(({ part, type, t, from, to }): PlateElement => {
+		const [dy, dz] = [to.y - from.y, to.z - from.z];
+		const c = Math.sqrt(dy * dy + dz * dz);
+		return { part, type, c, t, epsilon: epsilonOf(strength(part), strengths.modulus), from, to };
+	});
 	return { kind: 'plates', plates };
 }
 
