@@ -29,7 +29,7 @@ export function grossProperties(parts: readonly Part[], extra: GrossExtra): Gros
 	const productYZ = withoutNoise(product!, secondMomentY! + secondMomentZ);
 	return {
 		area: area!,
-		mass: parts.reduce((sum, part) => sum + partMass(part), 0),
+		mass: massOf(parts, area!),
 		centroid,
 		secondMomentY: secondMomentY!,
 		secondMomentZ,
@@ -66,6 +66,13 @@ export function areaCentroid(loops: readonly Loop[]): Point {
 /** Rounding that is left where symmetry makes a value zero is taken as zero. */
 const withoutNoise = (value: number, scale: number): number =>
 	Math.abs(value) < 1e-14 * scale ? 0 : value;
+
+/** kg/m; where all parts weigh the same, the whole area counts at once. */
+function massOf(parts: readonly Part[], area: number): number {
+	const density = parts[0]!.material.density;
+	if (parts.every(({ material }) => material.density === density)) return area * density * 1e-6;
+	return parts.reduce((sum, part) => sum + partMass(part), 0);
+}
 
 function partMass({ region, material }: Part): number {
 	const { left, right, bottom, top } = loopBounds(region.loops);

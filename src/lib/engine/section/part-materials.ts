@@ -26,9 +26,12 @@ export function partsOf(
 	const thickest = Math.max(...shape.parts.map(({ thickness }) => thickness));
 	const parts: Part[] = [];
 	const issues: Issue[] = [];
+	const made = new Map<string, ReturnType<typeof materialOf>>();
 	for (const [index, part] of shape.parts.entries()) {
 		const { grade, path, thickness } = gradeOf(definition, part, index, shape, thickest);
-		const material = materialOf(grade, thickness, basis);
+		const name = `${typeof grade} ${typeof grade === 'object' ? path : grade} ${thickness}`;
+		const material = made.get(name) ?? materialOf(grade, thickness, basis);
+		made.set(name, material);
 		if (material.ok)
 			parts.push({ name: part.name, region: part.region, thickness, material: material.value });
 		else if (!issues.some((issue) => issue.path === path))

@@ -10,10 +10,21 @@ export const nonFinitePath = (value: unknown, path = ''): string | null => {
 	return null;
 };
 
+/** The same question without its answer's path: it is asked of every number of every answer. */
+const isFinite = (value: unknown): boolean => {
+	if (typeof value === 'number') return Number.isFinite(value);
+	if (typeof value !== 'object' || value === null) return true;
+	if (Array.isArray(value)) return value.every(isFinite);
+	for (const key in value) {
+		if (!isFinite((value as Record<string, unknown>)[key])) return false;
+	}
+	return true;
+};
+
 /** JSON of a result. Throws when a number is not finite: that is a bug of ours, never an answer. */
 export const finiteJson = (value: unknown): string => {
-	const path = nonFinitePath(value);
-	if (path !== null) throw new Error(`The answer holds a number that is not finite at ${path}`);
+	if (!isFinite(value))
+		throw new Error(`The answer holds a number that is not finite at ${nonFinitePath(value)}`);
 	return JSON.stringify(value);
 };
 
