@@ -34,7 +34,8 @@ export const codeSchema = strict('code', {
 	classAlpha: oneOf('classAlpha', ['actual-N', 'proportional']).optional(),
 	allowEffectiveClass2: z
 		.boolean({ error: must('allowEffectiveClass2', 'true or false') })
-		.optional()
+		.optional(),
+	useStressLevel: z.boolean({ error: must('useStressLevel', 'true or false') }).optional()
 }).meta({ id: 'Code', description: 'Code of practice and the choices it leaves open.' });
 
 /** The code's fields all fit what the engine takes; a difference is a compile error. */

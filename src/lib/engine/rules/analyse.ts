@@ -1,3 +1,4 @@
+import { Workings } from '../explain/working';
 import { mechanicsOf } from '../response/law-groups';
 import { squashLoad } from '../response/plastic';
 import type { Note } from '../result';
@@ -9,7 +10,7 @@ import { elementsOf, type SectionElements } from './en1993/plate-elements';
 import { en1993Outcome, type EnOutcome } from './en1993/rules';
 import { strengthIssues, strengthsOf, type Strengths } from './en1993/strengths';
 import { classNotBuilt, codeNotBuilt } from './not-built';
-import type { CodeChoice, Demand } from './result';
+import type { CodeChoice, Demand, Stiffeners } from './result';
 import { momentFigures, sectionMoments } from './section-moments';
 import { verdict } from './verdict';
 
@@ -18,6 +19,9 @@ export type { Analysis } from './analysis';
 export interface AnalyseRequest {
 	code?: Partial<CodeChoice> | undefined;
 	demands?: readonly Demand[] | undefined;
+	stiffeners?: Stiffeners | undefined;
+	/** Whether the answer carries how each figure came about. */
+	explain?: boolean | undefined;
 }
 
 /** Everything the engine says of a section under a code and demands; nothing is kept between calls. */
@@ -26,8 +30,13 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 	const mechanics = mechanicsOf(section);
 	const strengths = strengthsOf(section);
 	const moments = sectionMoments(mechanics, strengths.even);
+	const workings = request.explain ? new Workings() : null;
+	const stiffeners = request.stiffeners ?? null;
 	const outcome = judged(section, code, strengths, (elements) =>
-		en1993Outcome({ section, mechanics, moments, strengths, elements, code }, request.demands ?? [])
+		en1993Outcome(
+			{ section, mechanics, moments, strengths, elements, code, stiffeners, workings },
+			request.demands ?? []
+		)
 	);
 	const figures: AnalysisFigures = {
 		strengthBasis: section.strengthBasis,
@@ -41,7 +50,8 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 		demands: outcome.demands,
 		notes: distinct([...section.notes, ...outcome.notes])
 	};
-	return { ...figures, verdict: verdict(figures) };
+	const answer = { ...figures, verdict: verdict(figures) };
+	return workings === null ? answer : { ...answer, explain: workings.explanation() };
 }
 
 type Outcome = Pick<AnalysisFigures, 'classification' | 'resistance' | 'demands' | 'notes'>;

@@ -1,3 +1,4 @@
+import type { Explanation } from '../explain/working';
 import type { StrengthBasis } from '../material/material';
 import type { Note } from '../result';
 import type { GrossProperties } from '../section/prepared';
@@ -24,4 +25,6 @@ export interface AnalysisFigures {
 
 export interface Analysis extends AnalysisFigures {
 	verdict: Verdict;
+	/** How the figures came about, where that was asked for. */
+	explain?: Explanation;
 }

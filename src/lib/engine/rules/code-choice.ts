@@ -10,7 +10,8 @@ export const defaultCode: CodeChoice = {
 	eta: 1.2,
 	method: 'LRFD',
 	classAlpha: 'actual-N',
-	allowEffectiveClass2: true
+	allowEffectiveClass2: true,
+	useStressLevel: false
 };
 
 /** The code asked for, with defaults for what was left open. */

@@ -26,6 +26,15 @@ export interface CodeChoice {
 	method: 'LRFD' | 'ASD';
 	classAlpha: 'actual-N' | 'proportional';
 	allowEffectiveClass2: boolean;
+	/** Class 4 taken as class 3 where the stress is low enough, 5.5.2(9) of EN 1993-1-1:2005. */
+	useStressLevel: boolean;
+}
+
+/** Transverse stiffeners of a web. */
+export interface Stiffeners {
+	/** Clear distance between them, mm. */
+	spacing: number;
+	endPost: 'rigid' | 'non-rigid';
 }
 
 export type SectionClass = 1 | 2 | 3 | 4;

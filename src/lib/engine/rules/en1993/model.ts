@@ -1,6 +1,7 @@
+import type { Workings } from '../../explain/working';
 import type { Mechanics } from '../../response/law-groups';
 import type { PreparedSection } from '../../section/prepared';
-import type { CodeChoice, SectionClass } from '../result';
+import type { CodeChoice, SectionClass, Stiffeners } from '../result';
 import type { AxisSense, SectionMoments } from '../section-moments';
 import { classifySection, type ClassifiedCase } from './classify';
 import type { SectionElements } from './plate-elements';
@@ -15,6 +16,10 @@ export interface EnModel {
 	readonly strengths: Strengths;
 	readonly elements: SectionElements;
 	readonly code: CodeChoice;
+	/** Transverse stiffeners of the web; null for none between supports. */
+	readonly stiffeners: Stiffeners | null;
+	/** Collects how the figures come about; null where nobody asks. */
+	readonly workings: Workings | null;
 }
 
 export type PureCases = Readonly<Record<AxisSense | 'compression', ClassifiedCase>>;
