@@ -2,6 +2,7 @@ import type { Operation } from './operation';
 import { analyseAnswerSchema, analyseRequestSchema } from './analyse';
 import { responseAnswerSchema, responseRequestSchema } from './response';
 import { healthSchema } from './health';
+import { firmOperations } from './firm-operations';
 import { sectionOperations } from './section-operations';
 import { catalogueListSchema, shapeListSchema, shapeQuerySchema, shapeSchema } from './shapes';
 
@@ -81,7 +82,8 @@ export const operations: readonly Operation[] = [
 		alike: [503],
 		refusals: []
 	},
-	...sectionOperations
+	...sectionOperations,
+	...firmOperations
 ];
 
 /** What each status means, in a sentence. */

@@ -48,7 +48,11 @@ export const ranges = {
 	loadHeight: either(1e5),
 	/** Between stiffeners, mm. */
 	spacing: { above: 0, most: sizeLimits.most },
-	boltHoles: { least: 1, most: 100 }
+	boltHoles: { least: 1, most: 100 },
+	/** Plates of a stock, mm. */
+	stockThickness: { least: 1, most: 500 },
+	/** Steps of widths, depths and spacings, mm. */
+	stockStep: { least: 1, most: 5000 }
 } as const satisfies Record<string, Range>;
 
 const grouped = (value: number) =>

@@ -27,6 +27,8 @@ const onDrafts: Record<Action, string> = {
 	'crew.read': 'OLDCR',
 	'crew.manage': 'O',
 	'firm.manage': 'O',
+	'settings.read': 'OLDCR',
+	'settings.update': 'OL',
 	'log.read': 'O'
 };
 const letter = (role: Role) => role.charAt(0).toUpperCase();

@@ -17,6 +17,8 @@ export const actions = [
 	'crew.read',
 	'crew.manage',
 	'firm.manage',
+	'settings.read',
+	'settings.update',
 	'log.read'
 ] as const;
 export type Action = (typeof actions)[number];
@@ -71,5 +73,7 @@ export const rights: Readonly<Record<Action, Row>> = {
 	'crew.read': everyone,
 	'crew.manage': { ...nobody, owner: 'any' },
 	'firm.manage': { ...nobody, owner: 'any' },
+	'settings.read': everyone,
+	'settings.update': { ...nobody, owner: 'any', librarian: 'any' },
 	'log.read': { ...nobody, owner: 'any' }
 };

@@ -2,6 +2,7 @@ export { accounts } from './accounts';
 export { attempts } from './attempts';
 export { auditLog } from './audit-log';
 export { catalogues } from './catalogues';
+export { firmSettings } from './firm-settings';
 export { firms } from './firms';
 export { localMail } from './local-mail';
 export { memberships } from './memberships';
