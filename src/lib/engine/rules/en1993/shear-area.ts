@@ -1,126 +1,66 @@
-import type { BoxSection, ISection, RectangularHollowSection } from '../../section/definition';
-import { boxSizes } from '../../section/kinds/box';
-import { iSizes } from '../../section/kinds/i';
+import type { WorkingInput } from '../../explain/working';
 import type { PreparedSection } from '../../section/prepared';
+import { angleAreas, channelAreas, rolledIAreas, teeAreas, weldedIAreas } from './shear-area-open';
+import { barAreas, parallelPlates, roundAreas } from './shear-area-solid';
+import { boxAreas, circularHollowAreas, rectangularHollowAreas } from './shear-area-closed';
 
-/** Shear area along one axis, mm², the parts whose strength holds, and their slenderness. */
+/** A flat plate that the shear runs along: clear depth and thickness, mm. */
+export interface ShearPanel {
+	readonly part: string;
+	readonly depth: number;
+	readonly thickness: number;
+	/** What holds its long edges; a tube's wall is held at both, but its buckling is not covered. */
+	readonly support: 'both-edges' | 'one-edge' | 'tube';
+}
+
+/** Shear area along one axis, mm², and what it is made of. */
 export interface ShearArea {
 	readonly area: number;
-	readonly parts: readonly string[];
-	readonly clause: string;
-	/** Clear depth over thickness of the plate in shear; null where it cannot buckle. */
-	readonly slenderness: number | null;
-	/** The part in shear, for words. */
+	/** Share of each part's area that belongs to the shear area; parts that are left out have none. */
+	readonly shares: Readonly<Record<string, number>>;
+	/** Letter of the clause's list; null where the code names no area for this shape. */
+	readonly letter: string | null;
+	/** The area in the grammar of workings, and the numbers in it. */
+	readonly formula: string;
+	readonly inputs: readonly WorkingInput[];
+	readonly panels: readonly ShearPanel[];
+	/** The plates in shear, for words. */
 	readonly plate: string;
 }
 
+/** Null along an axis for which no safe area is known. */
 export interface ShearAreas {
-	readonly y: ShearArea;
-	readonly z: ShearArea;
+	readonly y: ShearArea | null;
+	readonly z: ShearArea | null;
 }
 
-const rule = (letter: string) => `EN 1993-1-1:2005 6.2.6(3) ${letter}`;
-
-/** Shear areas of 6.2.6(3), or null for a kind that is not built yet. */
-export function shearAreasOf(
-	{ definition, gross }: PreparedSection,
-	eta: number
-): ShearAreas | null {
+/** Shear areas of 6.2.6(3) (2022: 8.2.6(3)); η counts for the webs of I and box sections alone. */
+export function shearAreasOf(section: PreparedSection, eta: number): ShearAreas {
+	const { definition, gross } = section;
 	switch (definition.kind) {
 		case 'i':
 			return definition.fabrication === 'rolled'
-				? rolledI(definition, gross.area, eta)
-				: weldedI(definition, eta);
+				? rolledIAreas(definition, gross.area, eta)
+				: weldedIAreas(definition, eta);
+		case 'channel':
+			return channelAreas(definition, gross.area);
+		case 'tee':
+			return teeAreas(definition, gross.area);
+		case 'angle':
+			return angleAreas(definition);
 		case 'box':
-			return box(definition, gross.area, eta);
+			return boxAreas(definition, gross.area, eta);
 		case 'rectangular-hollow':
-			return rectangularHollow(definition, gross.area);
-		case 'circular-hollow': {
-			const area = (2 * gross.area) / Math.PI;
-			const tube = { area, parts: ['wall'], clause: rule('g)'), slenderness: null, plate: 'wall' };
-			return { y: tube, z: tube };
-		}
-		default:
-			return null;
+			return rectangularHollowAreas(definition, gross.area);
+		case 'circular-hollow':
+			return circularHollowAreas(gross.area);
+		case 'flat':
+			return barAreas(definition);
+		case 'round':
+			return roundAreas(gross.area);
+		case 'plates':
+			return parallelPlates(definition.plates);
+		case 'outline':
+			return { y: null, z: null };
 	}
-}
-
-const flanges = ['topFlange', 'bottomFlange'];
-
-/** A − 2btf + (tw + 2r)tf, not less than η hw tw, each flange with its own sizes. */
-function rolledI(definition: ISection, gross: number, eta: number): ShearAreas {
-	const { h, bTop, tfTop, bBottom, tfBottom, tw, r } = iSizes(definition);
-	const hw = h - tfTop - tfBottom;
-	const area = gross - bTop * tfTop - bBottom * tfBottom + ((tw + 2 * r) * (tfTop + tfBottom)) / 2;
-	return {
-		y: flangesAlong(definition),
-		z: {
-			area: Math.max(area, eta * hw * tw),
-			parts: ['web'],
-			clause: rule('a)'),
-			slenderness: hw / tw,
-			plate: 'web'
-		}
-	};
-}
-
-/** η hw tw along the web. */
-function weldedI(definition: ISection, eta: number): ShearAreas {
-	const { h, tfTop, tfBottom, tw } = iSizes(definition);
-	const hw = h - tfTop - tfBottom;
-	return {
-		y: flangesAlong(definition),
-		z: {
-			area: eta * hw * tw,
-			parts: ['web'],
-			clause: rule('d)'),
-			slenderness: hw / tw,
-			plate: 'web'
-		}
-	};
-}
-
-/** Along the flanges: the flange plates alone, A − hw tw of a welded I. Outstands do not buckle in shear. */
-function flangesAlong(definition: ISection): ShearArea {
-	const { bTop, tfTop, bBottom, tfBottom } = iSizes(definition);
-	return {
-		area: bTop * tfTop + bBottom * tfBottom,
-		parts: flanges,
-		clause: rule('e)'),
-		slenderness: null,
-		plate: 'flanges'
-	};
-}
-
-function box(definition: BoxSection, gross: number, eta: number): ShearAreas {
-	const { h, tw, tfTop, tfBottom, webGap } = boxSizes(definition);
-	const hw = h - tfTop - tfBottom;
-	return {
-		y: {
-			area: gross - 2 * hw * tw,
-			parts: flanges,
-			clause: rule('e)'),
-			slenderness: webGap / Math.min(tfTop, tfBottom),
-			plate: 'flanges'
-		},
-		z: {
-			area: 2 * eta * hw * tw,
-			parts: ['leftWeb', 'rightWeb'],
-			clause: rule('d)'),
-			slenderness: hw / tw,
-			plate: 'webs'
-		}
-	};
-}
-
-/** A h/(b + h) along the depth, A b/(b + h) along the width. */
-function rectangularHollow({ h, b, t }: RectangularHollowSection, gross: number): ShearAreas {
-	const along = (side: number, plate: string): ShearArea => ({
-		area: (gross * side) / (b + h),
-		parts: ['wall'],
-		clause: rule('f)'),
-		slenderness: (side - 2 * t) / t,
-		plate
-	});
-	return { y: along(b, 'flanges'), z: along(h, 'webs') };
 }

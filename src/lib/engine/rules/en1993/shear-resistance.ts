@@ -1,57 +1,155 @@
 import type { Note } from '../../result';
+import type { Demand } from '../result';
+import { clauseOf } from './edition';
 import type { EnModel } from './model';
-import { shearAreasOf, type ShearArea } from './shear-area';
+import { shearAreasOf, type ShearArea, type ShearPanel } from './shear-area';
+import { panelBuckling, type PanelBuckling } from './shear-buckling';
+import { flangeShare, type FlangeShare } from './shear-buckling-flange';
+import { areaNotes, bucklingNotes, outsideNote } from './shear-notes';
+import { explainShear } from './shear-workings';
 import { epsilonOf } from './strengths';
 
-/** Plastic shear resistances, kN; null with a note where shear buckling would have to be checked. */
+/** Shear along which axis. */
+export type ShearAxis = 'y' | 'z';
+
+/** Shear buckling along one axis, EN 1993-1-5 clause 5; kN. Slenderness, kτ and χw are the most slender panel's. */
+export interface ShearBuckling {
+	readonly chiW: number;
+	readonly slenderness: number;
+	readonly kTau: number;
+	readonly Vbw: number;
+	readonly Vbf: number;
+	readonly Vb: number;
+}
+
+/** Resistance to shear along one axis, kN, design. */
+export interface AxisShear {
+	/** mm² */
+	readonly area: number;
+	readonly shearArea: ShearArea;
+	/** Vpl,Rd */
+	readonly plastic: number;
+	/** Null where no plate needs a check of shear buckling. */
+	readonly buckling: ShearBuckling | null;
+	/** The lesser of Vpl,Rd and Vb,Rd. */
+	readonly resistance: number;
+}
+
+/** Null along an axis without a resistance; the notes say why. */
 export interface ShearResistances {
-	readonly y: number | null;
-	readonly z: number | null;
+	readonly y: AxisShear | null;
+	readonly z: AxisShear | null;
 	readonly notes: Note[];
 }
 
-/** Vpl,Rd = Av fy/(√3 γM0), 6.2.6, where c/t keeps to 72 ε/η; a class 4 tube has none. */
-export function shearResistances(model: EnModel, tubeHolds: boolean): ShearResistances {
+/**
+ * Shear resistances of 6.2.6 (2022: 8.2.6) with shear buckling by EN 1993-1-5 clause 5. With a demand the
+ * flanges' part counts beside its My and N; without one it is left out. A class 4 tube has none.
+ */
+export function shearResistances(
+	model: EnModel,
+	tubeHolds: boolean,
+	demand?: Demand,
+	name = ''
+): ShearResistances {
+	if (!tubeHolds) return { y: null, z: null, notes: [] };
 	const areas = shearAreasOf(model.section, model.code.eta);
-	if (areas === null || !tubeHolds) return { y: null, z: null, notes: [] };
-	const notes = (['z', 'y'] as const).flatMap((axis) => bucklingNote(model, areas[axis], axis));
-	return {
-		y: shearResistance(model, areas.y),
-		z: shearResistance(model, areas.z),
-		notes
-	};
+	const notes: Note[] = [];
+	const along = (axis: ShearAxis) =>
+		axisShear(model, axis, areas[axis], notes, demand === undefined ? null : { demand, name });
+	const [z, y] = [along('z'), along('y')];
+	return { y, z, notes: [...notes, ...areaNotes(model, areas)] };
 }
 
-function shearStrength({ section }: EnModel, { parts }: ShearArea): number {
-	const strengths = section.parts
-		.filter(({ name }) => parts.includes(name))
-		.map(({ material }) => Math.min(material.fy, material.fyc));
-	return Math.min(...strengths);
+function axisShear(
+	model: EnModel,
+	axis: ShearAxis,
+	area: ShearArea | null,
+	notes: Note[],
+	acting: { demand: Demand; name: string } | null
+): AxisShear | null {
+	const panels = area === null ? [] : panelsOf(model, area);
+	const outside = area && panels.find((panel) => isOutside(model, panel));
+	if (area === null || outside) {
+		if (outside) notes.push(outsideNote(model, outside, panelLimit(model, outside), axis));
+		return null;
+	}
+	const fy = shearStrength(model, area);
+	const plastic = (area.area * fy * 1e-3) / (Math.sqrt(3) * model.code.gammaM0);
+	const checked = panels
+		.filter(({ support }) => support === 'both-edges')
+		.map((panel) => panelBuckling(model, panel, fy));
+	const share =
+		acting && axis === 'z' && checked[0] && flangeShare(model, checked[0], acting.demand);
+	const buckling = bucklingOf(checked, share || null);
+	if (buckling) notes.push(...bucklingNotes(model, area));
+	const resistance = buckling === null ? plastic : Math.min(plastic, buckling.Vb);
+	explainShear(model, {
+		axis,
+		area,
+		fy,
+		plastic,
+		checked,
+		buckling,
+		share: share || null,
+		name: acting?.name ?? null,
+		resistance
+	});
+	return { area: area.area, shearArea: area, plastic, buckling, resistance };
 }
 
-function bucklingLimit(model: EnModel, area: ShearArea): number {
-	const strongest = Math.max(...area.parts.map((part) => model.strengths.of(part)));
-	return (72 * epsilonOf(strongest, model.strengths.modulus)) / model.code.eta;
+/** The least strength of the parts that the shear area lies in, N/mm². */
+function shearStrength({ section }: EnModel, { shares }: ShearArea): number {
+	let least = Infinity;
+	for (const { name, material } of section.parts)
+		if (shares[name] !== undefined) least = Math.min(least, material.fy, material.fyc);
+	return least;
 }
 
-const buckles = (model: EnModel, area: ShearArea): boolean =>
-	area.slenderness !== null && area.slenderness > bucklingLimit(model, area);
-
-function shearResistance(model: EnModel, area: ShearArea): number | null {
-	if (buckles(model, area)) return null;
-	return (area.area * shearStrength(model, area) * 1e-3) / (Math.sqrt(3) * model.code.gammaM0);
+/** Free plates are held as their contacts say; every other kind knows its own panels. */
+function panelsOf(
+	{ section, elements }: EnModel,
+	{ panels, shares }: ShearArea
+): readonly ShearPanel[] {
+	if (section.definition.kind !== 'plates' || elements.kind !== 'plates') return panels;
+	const known = elements.plates.filter(({ part }) => shares[part] !== undefined);
+	return known.map(({ part, type, c, t }) => ({
+		part,
+		depth: c,
+		thickness: t,
+		support: type === 'internal' ? 'both-edges' : 'one-edge'
+	}));
 }
 
-function bucklingNote(model: EnModel, area: ShearArea, axis: 'y' | 'z'): Note[] {
-	if (!buckles(model, area)) return [];
-	const over = `${plain(area.slenderness)} is over ${plain(bucklingLimit(model, area))} (72ε/η)`;
-	return [
-		{
-			code: 'shear-buckling-not-built',
-			message: `Shear buckling of the ${area.plate} would have to be checked: depth over thickness ${over}. That check is not built yet, so V${axis} has no resistance.`,
-			clause: 'EN 1993-1-1:2005 6.2.6(6)'
-		}
-	];
+/**
+ * Shear buckling coefficient of a plate with one free edge: kv 1.2 of AISC 360-22 G3 for stems and legs;
+ * EN 1993-1-5 has none. With it 31ε√kτ/η (η = 1) bounds the plates that need no check.
+ */
+const freeEdgeCoefficient = 1.2;
+
+/** Depth over thickness up to which a panel that no rule covers is sure not to buckle. */
+function panelLimit({ strengths, code }: EnModel, { part, support }: ShearPanel): number {
+	const epsilon = epsilonOf(strengths.of(part), strengths.modulus);
+	return support === 'tube'
+		? (72 * epsilon) / code.eta
+		: 31 * epsilon * Math.sqrt(freeEdgeCoefficient);
 }
 
-const plain = (value: number | null) => (value ?? 0).toFixed(1);
+const isOutside = (model: EnModel, panel: ShearPanel): boolean =>
+	panel.support !== 'both-edges' && panel.depth / panel.thickness > panelLimit(model, panel);
+
+function bucklingOf(
+	panels: readonly PanelBuckling[],
+	share: FlangeShare | null
+): ShearBuckling | null {
+	if (!panels.some(({ needed }) => needed)) return null;
+	const worst = panels.reduce((a, b) => (b.slenderness > a.slenderness ? b : a));
+	const Vbw = panels.reduce((sum, panel) => sum + panel.Vbw, 0);
+	const most = panels.reduce((sum, panel) => sum + panel.most, 0);
+	const Vbf = share?.Vbf ?? 0;
+	const { chiW, slenderness, kTau } = worst;
+	return { chiW, slenderness, kTau, Vbw, Vbf, Vb: Math.min(Vbw + Vbf, most) };
+}
+
+/** Clause of the plastic shear resistance. */
+export const shearClause = ({ code }: EnModel): string => clauseOf(code.standard, 'shear');
