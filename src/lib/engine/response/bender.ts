@@ -30,6 +30,9 @@ export interface Bender {
 	): { profiles: readonly Profile[]; turned: number; size: number };
 }
 
+/** What balancing needs of a bender: the forces of a strain plane, whatever gives them. */
+export type Forces = Pick<Bender, 'mechanics' | 'evaluate'>;
+
 /** Strain planes about an axis at `angle` radians, any transverse curvature. */
 export function bender(mechanics: Mechanics, angle: number): Bender {
 	const profiles = (curvature: number, turn: number) => {
@@ -69,7 +72,7 @@ export interface Guess {
 
 /** The plane with a given curvature that carries N (newton), free or held across the axis. */
 export function bentAtCurvature(
-	b: Bender,
+	b: Forces,
 	transverse: Transverse,
 	N: number,
 	curvature: number,
@@ -80,7 +83,7 @@ export function bentAtCurvature(
 }
 
 /** Balances N by e0, everything else held. */
-function bentAt(b: Bender, N: number, curvature: number, turn: number, guess: number): Bent {
+function bentAt(b: Forces, N: number, curvature: number, turn: number, guess: number): Bent {
 	const { squash, reach } = b.mechanics;
 	const size = Math.abs(curvature) + Math.abs(turn);
 	let forces!: PlaneForces;
@@ -107,7 +110,7 @@ const largestYieldStrain = ({ groups }: Mechanics): number =>
 	Math.max(...groups.map(({ law }) => Math.max(law.yieldTension, law.yieldCompression)));
 
 /** Balances N by e0 and the transverse moment by the transverse curvature. */
-function freelyBent(b: Bender, N: number, curvature: number, guess: Guess): Bent {
+function freelyBent(b: Forces, N: number, curvature: number, guess: Guess): Bent {
 	const scale = b.mechanics.squash * b.mechanics.reach;
 	let e0 = guess.e0;
 	let best: Bent | undefined;

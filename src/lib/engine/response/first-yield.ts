@@ -48,7 +48,6 @@ function balancedPath(
 	};
 }
 
-/** 1/mm. The use of the section is convex in the curvature, so that secants from beyond close in. */
 function yieldCurvature(
 	mechanics: Mechanics,
 	angle: number,
@@ -56,10 +55,21 @@ function yieldCurvature(
 ): number | null {
 	const excess = (curvature: number) =>
 		elasticUse(mechanics, angle, e0(curvature), curvature, turn(curvature)) - 1;
+	return curvatureAtYield(excess, mechanics.reach);
+}
+
+/**
+ * 1/mm: where the use of a section less 1 passes zero; null where it is not below zero to begin with.
+ * The use is convex in the curvature, so that secants from beyond close in.
+ */
+export function curvatureAtYield(
+	excess: (curvature: number) => number,
+	reach: number
+): number | null {
 	let low = 0;
 	let atLow = excess(0);
 	if (!(atLow < 0)) return null;
-	let high = 1e-3 / mechanics.reach;
+	let high = 1e-3 / reach;
 	let atHigh = excess(high);
 	while (atHigh < 0) {
 		[low, atLow, high] = [high, atHigh, high * 2];

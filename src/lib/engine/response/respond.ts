@@ -1,12 +1,13 @@
 import type { PreparedSection } from '../section/prepared';
-import { equilibrium } from '../tolerances';
-import { bendingStiffness, bentAtCurvature, bender, type Bender, type Bent } from './bender';
+import { bentAtCurvature, bender, type Bender, type Bent } from './bender';
+import { bentAtMoment, bentByPlane } from './bent-at';
 import { elasticPath, type ElasticPath } from './elastic-path';
 import { firstYieldOf } from './first-yield';
+import type { History } from './history/history';
+import { bendingFrom } from './history/history-bending';
 import { mechanicsOf } from './law-groups';
 import { canCarry, isWithinReach, momentLimits } from './limits';
 import { plasticMomentOf } from './plastic';
-import { risingRoot } from './rising-root';
 import { noState, stateReport } from './state-report';
 import type { BendingPath, FirstYield, ResponseState, StrainPlane } from './state';
 
@@ -41,8 +42,16 @@ export interface Bending {
 	momentAt(curvature: number): number | null;
 }
 
-/** Prepares bending of a section along a path (axis, N in kN, free or held across the axis). */
-export function bending(section: PreparedSection, path: BendingPath): Bending {
+/**
+ * Prepares bending of a section along a path (axis, N in kN, free or held across the axis); from where
+ * a history leaves it, if one is given.
+ */
+export function bending(
+	section: PreparedSection,
+	path: BendingPath,
+	history?: History | null
+): Bending {
+	if (history) return bendingFrom(history, path);
 	const mechanics = mechanicsOf(section);
 	const angle = path.axisAngle * radians;
 	const b = bender(mechanics, angle);
@@ -64,7 +73,7 @@ export function bending(section: PreparedSection, path: BendingPath): Bending {
 		atMoment: (moment) => {
 			const within = limits();
 			if (!within || !(moment > within.least && moment < within.most)) return noState;
-			const state = bentAtMoment(b, path, elastic, bent, moment * 1e6);
+			const state = bentAtMoment(b, path.transverse, elastic, bent, moment * 1e6);
 			return state ? report(state) : noState;
 		},
 		atPlane: (plane) => report(bentByPlane(b, plane)),
@@ -97,43 +106,6 @@ function balancer(b: Bender, path: BendingPath, elastic: ElasticPath) {
 		last = bent;
 		return bent;
 	};
-}
-
-/** The balanced plane whose moment about the axis is M (N·mm); undefined when there is none. */
-function bentAtMoment(
-	b: Bender,
-	path: BendingPath,
-	elastic: ElasticPath,
-	bent: (curvature: number) => Bent,
-	M: number
-): Bent | undefined {
-	const { squash, reach } = b.mechanics;
-	const atZero = elastic.moment(0);
-	const stiffness = (elastic.moment(1 / reach) - atZero) * reach;
-	let found: Bent | undefined;
-	const root = risingRoot(
-		(curvature) => {
-			const state = bent(curvature);
-			const value = state.forces.M - M;
-			if (!found || Math.abs(value) < Math.abs(found.forces.M - M)) found = state;
-			return { value, slope: bendingStiffness(state.forces, path.transverse) };
-		},
-		(M - atZero) / stiffness,
-		Math.abs(M) / stiffness + (squash * reach) / stiffness,
-		2e-15 * squash * reach
-	);
-	const balanced = Math.abs(root.value) <= equilibrium * squash * reach;
-	const reached = isWithinReach(b.mechanics, root.x);
-	return balanced && reached && found?.converged ? found : undefined;
-}
-
-function bentByPlane(b: Bender, { e0, ky, kz }: StrainPlane): Bent {
-	const [c, s] = [Math.cos(b.angle), Math.sin(b.angle)];
-	const curvature = (ky * c + kz * s) * 1e-3;
-	const turn = (kz * c - ky * s) * 1e-3;
-	const forces = b.evaluate(e0, curvature, turn);
-	const converged = Number.isFinite(forces.N + forces.M + forces.T);
-	return { e0, curvature, turn, forces, converged };
 }
 
 /** States along a path as the contract's POST /response gives them. */

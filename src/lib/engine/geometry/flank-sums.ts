@@ -1,0 +1,19 @@
+import type { Flank } from './flank';
+import { addArcAntiderivative, addLineMoments, type Moments } from './flank-moments';
+
+/**
+ * Adds the moments of all steel below a level (mm, in the frame of the flanks; `Infinity` for all of
+ * it). For bodies that are cut once: nothing is prepared.
+ */
+export function addMomentsBelow(out: Moments, flanks: readonly Flank[], level: number): void {
+	for (let i = 0; i < flanks.length; i++) {
+		const flank = flanks[i]!;
+		if (flank.low >= level) continue;
+		const to = flank.high < level ? flank.high : level;
+		if (flank.kind === 'line') addLineMoments(out, flank, flank.low, to, flank.sign);
+		else {
+			addArcAntiderivative(out, flank, to, flank.sign);
+			addArcAntiderivative(out, flank, flank.low, -flank.sign);
+		}
+	}
+}
