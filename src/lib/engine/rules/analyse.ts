@@ -5,11 +5,13 @@ import type { Note } from '../result';
 import type { PreparedSection } from '../section/prepared';
 import type { Analysis, AnalysisFigures } from './analysis';
 import { codeChoice, factorIssues } from './code-choice';
+import { isEn1993 } from './en1993/edition';
+import type { SectionElements } from './en1993/elements/element';
+import { elementsOf } from './en1993/elements/elements-of';
 import { lawIssues } from './en1993/law-cover';
-import { elementsOf, type SectionElements } from './en1993/plate-elements';
 import { en1993Outcome, type EnOutcome } from './en1993/rules';
 import { strengthIssues, strengthsOf, type Strengths } from './en1993/strengths';
-import { classNotBuilt, codeNotBuilt } from './not-built';
+import { codeNotBuilt } from './not-built';
 import type { CodeChoice, Demand, Stiffeners } from './result';
 import { momentFigures, sectionMoments } from './section-moments';
 import { verdict } from './verdict';
@@ -69,15 +71,17 @@ function judged(
 		demands: [],
 		notes
 	});
-	if (code.standard !== 'EN1993-1-1:2005') return none([codeNotBuilt(code.standard)]);
-	const elements = elementsOf(section, strengths);
-	if (elements === null) return none([classNotBuilt(section.definition.kind)]);
+	if (!isEn1993(code.standard)) return none([codeNotBuilt(code.standard)]);
+	const { elements, notes } = elementsOf(section, strengths);
+	if (elements === null) return none([...notes]);
 	const issues = [
 		...factorIssues(code),
-		...strengthIssues(section, strengths),
-		...lawIssues(section.parts)
+		...strengthIssues(section, strengths, code.standard),
+		...lawIssues(section.parts, code.standard)
 	];
-	return issues.length > 0 ? none(issues) : outcome(elements);
+	if (issues.length > 0) return none(issues);
+	const found = outcome(elements);
+	return { ...found, notes: [...notes, ...found.notes] };
 }
 
 function distinct(notes: readonly Note[]): Note[] {

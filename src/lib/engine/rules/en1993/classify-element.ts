@@ -1,5 +1,9 @@
+import type { Standard } from '../result';
 import type { ClassifiedElement, SectionClass } from '../result';
+import { clauseOf } from './edition';
+import type { AngleElement, PlateElement, TubeElement } from './elements/element';
 import {
+	angleRow,
 	internalLimits,
 	outstandLimits,
 	sameRatio,
@@ -7,17 +11,19 @@ import {
 	type ClassLimits,
 	type CompressedEnd
 } from './limits';
-import type { PlateElement, TubeElement } from './plate-elements';
 import type { StressCase } from './stress-case';
 
-/** How far along a part compression reaches and how steeply it falls; null where there is none. */
-interface Gradient {
+/** How far along a part compression reaches and how steeply it falls. */
+export interface Gradient {
+	/** Value at the more and at the less compressed end. */
+	readonly most: number;
+	readonly least: number;
 	/** Compressed share of the width. */
-	share: number;
+	readonly share: number;
 	/** Other end over the more compressed end. */
-	ratio: number;
+	readonly ratio: number;
 	/** `from` is the root, `to` the tip. */
-	end: CompressedEnd;
+	readonly end: CompressedEnd;
 }
 
 /** Greatest size of a stress case's figures over the section: what is nil beside it is nil. */
@@ -26,48 +32,94 @@ export interface StressScale {
 	readonly elastic: number;
 }
 
-const table = 'EN 1993-1-1:2005 Table 5.2';
+/** A part's class with what its limits were taken from; a gradient is null where nothing is compressed. */
+export interface JudgedElement {
+	readonly row: ClassifiedElement;
+	/** Strength behind ε, N/mm². */
+	readonly fy: number;
+	readonly plastic: Gradient | null;
+	readonly elastic: Gradient | null;
+}
 
 /**
  * Class of a flat part under a stress case. A part counts as compressed where its mid-thickness
  * is. A part without compression at either limit is in tension: class 1, no limits.
  */
 export function classifyPlate(
+	standard: Standard,
 	element: PlateElement,
 	stress: StressCase,
 	scale: StressScale
-): ClassifiedElement {
+): JudgedElement {
 	const at = (value: StressCase['plastic'], size: number) =>
 		gradientOf(value(element.from), value(element.to), sameRatio * size);
 	const plastic = at(stress.plastic, scale.plastic);
 	const elastic = at(stress.elastic, scale.elastic);
+	const { fy, epsilon } = element;
 	const share = plastic?.share ?? elastic?.share;
-	if (share === undefined) return inTension(element);
+	if (share === undefined) return { row: inTension(standard, element), fy, plastic, elastic };
 	const psi = elastic?.ratio ?? Number.NEGATIVE_INFINITY;
 	const plasticEnd = (plastic ?? elastic)?.end ?? 'tip';
 	const elasticEnd = (elastic ?? plastic)?.end ?? 'tip';
 	const limits =
 		element.type === 'internal'
-			? internalLimits(element.epsilon, share, psi)
-			: outstandLimits(element.epsilon, { alpha: share, plasticEnd, psi, elasticEnd });
-	const row = described(element, limits, stressName(share, psi));
+			? internalLimits(standard, epsilon, share, psi)
+			: outstandLimits(epsilon, { alpha: share, plasticEnd, psi, elasticEnd });
+	const row = described(standard, element, limits, stressName(share, psi));
 	row.alpha = share;
 	if (elastic) row.psi = psi;
-	return row;
+	return { row, fy, plastic, elastic };
 }
 
+type TubeStress = 'compression' | 'bending' | 'combined' | 'tension';
+
+/** Class of a round tube; in 2022 its elastic stress counts for class 3. */
 export function classifyTube(
+	standard: Standard,
 	element: TubeElement,
-	compressed: 'compression' | 'bending' | 'combined' | 'tension'
-): ClassifiedElement {
-	if (compressed === 'tension') return inTension(element);
-	return described(element, tubularLimits(element.epsilon), compressed);
+	compressed: TubeStress,
+	elastic: StressCase['elastic']
+): JudgedElement {
+	const { fy, epsilon } = element;
+	if (compressed === 'tension')
+		return { row: inTension(standard, element), fy, plastic: null, elastic: null };
+	const gradient = tubeGradient(element, elastic);
+	const limits = tubularLimits(standard, epsilon, gradient?.ratio ?? -1);
+	const row = described(standard, element, limits, compressed);
+	return { row, fy, plastic: null, elastic: gradient };
+}
+
+/** Most and least compressed fibre of a round tube. */
+function tubeGradient({ c, centre }: TubeElement, elastic: StressCase['elastic']) {
+	const { y, z } = centre;
+	const middle = elastic(centre);
+	const reach = Math.hypot(
+		elastic({ y: y + c / 2, z }) - middle,
+		elastic({ y, z: z + c / 2 }) - middle
+	);
+	return gradientOf(middle - reach, middle + reach, 0);
+}
+
+/**
+ * Class of an angle in compression as a whole, Table 5.2 sheet 3: h/t and (b + h)/(2t), the
+ * harder of the two. The row knows class 3 alone; within it the legs as outstands decide.
+ */
+export function classifyAngle(standard: Standard, element: AngleElement): JudgedElement {
+	const { longer, shorter, t, part, fy, epsilon } = element;
+	const mean = (longer + shorter) / 2;
+	const byMean = mean * angleRow.leg > longer * angleRow.mean;
+	const limit = (byMean ? angleRow.mean : angleRow.leg) * epsilon;
+	const whole = { part, type: 'angle', c: byMean ? mean : longer, t, epsilon } as const;
+	const row = described(standard, whole, [limit, limit, limit], 'compression');
+	return { row, fy, plastic: null, elastic: null };
 }
 
 function gradientOf(from: number, to: number, zero: number): Gradient | null {
 	const [most, least] = [Math.max(from, to), Math.min(from, to)];
 	if (most <= zero) return null;
 	return {
+		most,
+		least,
 		share: least >= -zero ? 1 : most / (most - least),
 		ratio: least / most,
 		end: to >= from ? 'tip' : 'root'
@@ -80,8 +132,11 @@ function stressName(share: number, psi: number): ClassifiedElement['stress'] {
 	return bending ? 'bending' : 'combined';
 }
 
+type Measured = Pick<ClassifiedElement, 'part' | 'type' | 'c' | 't' | 'epsilon'>;
+
 function described(
-	{ part, type, c, t, epsilon }: PlateElement | TubeElement,
+	standard: Standard,
+	{ part, type, c, t, epsilon }: Measured,
 	limits: ClassLimits,
 	stress: ClassifiedElement['stress']
 ): ClassifiedElement {
@@ -97,15 +152,9 @@ function described(
 		epsilon,
 		limits,
 		class: own,
-		clause: sheets[type]
+		clause: clauseOf(standard, type)
 	};
 }
-
-const sheets = {
-	internal: `${table}, sheet 1`,
-	outstand: `${table}, sheet 2`,
-	tubular: `${table}, sheet 3`
-} as const;
 
 /** Unrounded: on a limit is within it. */
 export function classWithin(slenderness: number, limits: ClassLimits): SectionClass {
@@ -114,8 +163,7 @@ export function classWithin(slenderness: number, limits: ClassLimits): SectionCl
 	return slenderness <= limits[2] ? 3 : 4;
 }
 
-function inTension(element: PlateElement | TubeElement): ClassifiedElement {
-	const { part, type, c, t, epsilon } = element;
+function inTension(standard: Standard, { part, type, c, t, epsilon }: Measured): ClassifiedElement {
 	return {
 		part,
 		type,
@@ -126,6 +174,6 @@ function inTension(element: PlateElement | TubeElement): ClassifiedElement {
 		epsilon,
 		limits: [],
 		class: 1,
-		clause: 'EN 1993-1-1:2005 5.5.2'
+		clause: clauseOf(standard, 'classification')
 	};
 }

@@ -1,13 +1,32 @@
-import type { ClassifiedElement, SectionClass } from '../result';
-import { classifyPlate, classifyTube, type StressScale } from './classify-element';
-import type { PlateElement, SectionElements } from './plate-elements';
+import type { Workings } from '../../explain/working';
+import type { CaseName } from '../../explain/keys';
+import type { ClassifiedElement, SectionClass, Standard } from '../result';
+import {
+	classifyAngle,
+	classifyPlate,
+	classifyTube,
+	type JudgedElement,
+	type StressScale
+} from './classify-element';
+import { addLimitWorkings } from './limit-workings';
+import type { PlateElement, SectionElements } from './elements/element';
 import type { Effects, StressCase } from './stress-case';
 
 /** A section classified under one stress case. */
 export interface ClassifiedCase {
 	readonly overall: SectionClass;
+	/** Empty for a solid bar. */
 	readonly elements: ClassifiedElement[];
 	readonly governing: string;
+}
+
+/** Whose limits, and under which name their workings are kept. */
+export interface Judging {
+	readonly standard: Standard;
+	/** Least modulus of the parts, N/mm². */
+	readonly modulus: number;
+	readonly caseName: CaseName;
+	readonly workings: Workings | null;
 }
 
 /**
@@ -18,24 +37,35 @@ export interface ClassifiedCase {
 export function classifySection(
 	elements: SectionElements,
 	stress: StressCase,
-	effects: Effects
+	effects: Effects,
+	judging: Judging
 ): ClassifiedCase {
-	const rows =
+	if (elements.kind === 'solid') return { overall: 1, elements: [], governing: elements.part };
+	const judged =
 		elements.kind === 'tube'
-			? [classifyTube(elements.tube, tubeStress(effects))]
-			: classifyPlates(elements.plates, stress);
-	const held = worstClass(rows) === 3 ? rows.map(heldElastically) : rows;
+			? [classifyTube(judging.standard, elements.tube, tubeStress(effects), stress.elastic)]
+			: judgedPlates(elements, stress, effects, judging.standard);
+	const held = worstClass(judged) === 3 ? judged.map(heldElastically) : judged;
 	const worst = worstRows(held);
-	const first = worst.reduce((a, b) => (isWorse(b, a) ? b : a));
-	return { overall: first.class, elements: worst, governing: first.part };
+	if (judging.workings) addLimitWorkings(judging, judging.workings, worst);
+	const rows = worst.map(({ row }) => row);
+	const first = rows.reduce((a, b) => (isWorse(b, a) ? b : a));
+	return { overall: first.class, elements: rows, governing: first.part };
 }
 
-function classifyPlates(plates: readonly PlateElement[], stress: StressCase) {
+function judgedPlates(
+	{ plates, angle }: Extract<SectionElements, { kind: 'plates' }>,
+	stress: StressCase,
+	{ N }: Effects,
+	standard: Standard
+): JudgedElement[] {
 	const scale: StressScale = {
 		plastic: greatestSize(plates, stress.plastic),
 		elastic: greatestSize(plates, stress.elastic)
 	};
-	return plates.map((plate) => classifyPlate(plate, stress, scale));
+	const judged = plates.map((plate) => classifyPlate(standard, plate, stress, scale));
+	if (angle !== null && N < 0) judged.push(classifyAngle(standard, angle));
+	return judged;
 }
 
 function greatestSize(plates: readonly PlateElement[], value: StressCase['plastic']): number {
@@ -51,20 +81,23 @@ function tubeStress({ N, My, Mz }: Effects) {
 	return N === 0 ? 'bending' : 'combined';
 }
 
-const worstClass = (rows: readonly ClassifiedElement[]) =>
-	Math.max(...rows.map((row) => row.class));
+const worstClass = (judged: readonly JudgedElement[]) =>
+	Math.max(...judged.map(({ row }) => row.class));
 
-function heldElastically(row: ClassifiedElement): ClassifiedElement {
+function heldElastically(judged: JudgedElement): JudgedElement {
+	const { row } = judged;
 	const last = row.limits[2];
-	return last !== undefined && row.slenderness > last ? { ...row, class: 4 } : row;
+	if (last === undefined || row.slenderness <= last) return judged;
+	return { ...judged, row: { ...row, class: 4 } };
 }
 
-function worstRows(rows: readonly ClassifiedElement[]): ClassifiedElement[] {
-	const kept: ClassifiedElement[] = [];
-	for (const row of rows) {
-		const at = kept.findIndex(({ part, type }) => part === row.part && type === row.type);
-		if (at < 0) kept.push(row);
-		else if (isWorse(row, kept[at]!)) kept[at] = row;
+function worstRows(judged: readonly JudgedElement[]): JudgedElement[] {
+	const kept: JudgedElement[] = [];
+	for (const each of judged) {
+		const { part, type } = each.row;
+		const at = kept.findIndex(({ row }) => row.part === part && row.type === type);
+		if (at < 0) kept.push(each);
+		else if (isWorse(each.row, kept[at]!.row)) kept[at] = each;
 	}
 	return kept;
 }

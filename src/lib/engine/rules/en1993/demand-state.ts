@@ -1,5 +1,6 @@
 import { firstYieldOf } from '../../response/first-yield';
 import { plasticMomentOf } from '../../response/plastic';
+import { sectionSymmetry } from '../../section/symmetry';
 import type { DemandState } from '../result';
 import type { DemandChecks } from './demand-checks';
 import { pathOf, type Effects } from './stress-case';
@@ -39,7 +40,7 @@ export function demandRuler(
 }
 
 function limitsAlong(model: EnModel, effects: Effects) {
-	const path = pathOf(effects, 1);
+	const path = pathOf(effects, 1, sectionSymmetry(model.section));
 	const { axisAngle } = path;
 	if (effects.N === 0 && (effects.My === 0 || effects.Mz === 0)) {
 		const { plusMy, minusMy, plusMz, minusMz } = model.moments;

@@ -2,6 +2,8 @@ import { initialModulus } from '../../material/laws';
 import type { Material } from '../../material/material';
 import type { Note } from '../../result';
 import type { Part } from '../../section/prepared';
+import type { Standard } from '../result';
+import { clauseOf } from './edition';
 
 const rounding = 1e-9;
 /** How far the first slope of a tabulated law may stand off E: digits of the table, from no standard. */
@@ -52,27 +54,27 @@ function hardens({ law, fy, fyc }: Material): boolean {
 }
 
 /** Why a stress–strain law keeps the code's class and resistances away; empty when none does. */
-export function lawIssues(parts: readonly Part[]): Note[] {
+export function lawIssues(parts: readonly Part[], standard: Standard): Note[] {
 	const names = namesOf(parts, ({ material }) => !isCovered(material));
 	if (names.length === 0) return [];
 	return [
 		{
 			code: 'law-not-covered',
 			message: `The stress–strain law of ${names.join(', ')} lies below the elastic–perfectly plastic law of E and fy, or starts with another modulus. The code's strengths do not hold for it: no class and no resistance are given.`,
-			clause: 'EN 1993-1-1:2005 5.4.3'
+			clause: clauseOf(standard, 'plasticAnalysis')
 		}
 	];
 }
 
 /** That resistances stay on fy where a law hardens beyond it. */
-export function lawNotes(parts: readonly Part[]): Note[] {
+export function lawNotes(parts: readonly Part[], standard: Standard): Note[] {
 	const names = namesOf(parts, ({ material }) => hardens(material));
 	if (names.length === 0) return [];
 	return [
 		{
 			code: 'hardening-not-counted',
 			message: `The stress–strain law of ${names.join(', ')} gives more than fy. Class and resistances are of fy alone.`,
-			clause: 'EN 1993-1-1:2005 6.2.1'
+			clause: clauseOf(standard, 'resistance')
 		}
 	];
 }

@@ -1,10 +1,11 @@
+import type { CaseName } from '../../explain/keys';
 import type { Workings } from '../../explain/working';
 import type { Mechanics } from '../../response/law-groups';
 import type { PreparedSection } from '../../section/prepared';
 import type { CodeChoice, SectionClass, Stiffeners } from '../result';
 import type { AxisSense, SectionMoments } from '../section-moments';
-import { classifySection, type ClassifiedCase } from './classify';
-import type { SectionElements } from './plate-elements';
+import { classifySection, type ClassifiedCase, type Judging } from './classify';
+import type { SectionElements } from './elements/element';
 import type { Strengths } from './strengths';
 import { elasticStress, compressedSide, uniformCompression, type Effects } from './stress-case';
 
@@ -35,21 +36,31 @@ const unit: Readonly<Record<AxisSense, Effects>> = {
 export function pureCases(model: EnModel): PureCases {
 	const bent = (sense: AxisSense) => pureBending(model, sense);
 	const squashed = { N: -1, My: 0, Mz: 0 };
+	const judging = judgingOf(model, 'compression');
 	return {
 		plusMy: bent('plusMy'),
 		minusMy: bent('minusMy'),
 		plusMz: bent('plusMz'),
 		minusMz: bent('minusMz'),
-		compression: classifySection(model.elements, uniformCompression, squashed)
+		compression: classifySection(model.elements, uniformCompression, squashed, judging)
 	};
 }
 
-function pureBending({ elements, section, moments }: EnModel, sense: AxisSense): ClassifiedCase {
+/** Under which code and name a model's case is judged. */
+export const judgingOf = ({ code, strengths, workings }: EnModel, caseName: CaseName): Judging => ({
+	standard: code.standard,
+	modulus: strengths.modulus,
+	caseName,
+	workings
+});
+
+function pureBending(model: EnModel, sense: AxisSense): ClassifiedCase {
+	const { elements, section, moments } = model;
 	const { axisAngle, plastic } = moments[sense];
 	const effects = unit[sense];
 	const elastic = elasticStress(section.gross, 0, effects, 1);
 	const block = compressedSide(section.gross, axisAngle, plastic) ?? elastic;
-	return classifySection(elements, { plastic: block, elastic }, effects);
+	return classifySection(elements, { plastic: block, elastic }, effects, judgingOf(model, sense));
 }
 
 export type PureClasses = Readonly<Record<AxisSense | 'compression', SectionClass>>;

@@ -33,7 +33,7 @@ export function strengthNotes(
 	cases: PureCases,
 	{ basis, webRefused }: { basis: Resistance['basis']; webRefused: boolean }
 ): Note[] {
-	const notes: Note[] = lawNotes(model.section.parts);
+	const notes: Note[] = lawNotes(model.section.parts, model.code.standard);
 	const bent = [cases.plusMy, cases.minusMy, cases.plusMz, cases.minusMz];
 	if (basis === 'effective-class-2')
 		notes.push({

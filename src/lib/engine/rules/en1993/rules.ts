@@ -4,6 +4,7 @@ import type { AxisSense } from '../section-moments';
 import { axialStrength } from './axial-resistance';
 import { bendingResistance, type BendingResistance } from './bending-resistance';
 import { holedParts, holeNotes, holesInTension } from './bolt-holes';
+import { classNotes } from './class-notes';
 import type { ClassifiedCase } from './classify';
 import { demandChecks } from './demand-checks';
 import { classifyDemand, effectsOf, type DemandClass } from './demand-class';
@@ -47,6 +48,7 @@ export function en1993Outcome(model: EnModel, asked: readonly Demand[]): EnOutco
 		resistance,
 		demands: judged.map(({ state }) => state),
 		notes: [
+			...classNotes(model, demands.map(effectsOf)),
 			...classFourNotes(pureClasses(cases)),
 			...strengthNotes(model, cases, { basis: resistance.basis, webRefused }),
 			...shear.notes,
@@ -69,7 +71,7 @@ function judgeDemand(
 	shear: Parameters<typeof demandChecks>[4]
 ): Judged {
 	const effects = effectsOf(demand);
-	const classed = classifyDemand(model, cases, effects);
+	const classed = classifyDemand(model, cases, effects, name);
 	const { classified, basis } = classed;
 	const used = demandChecks(model, demand, name, classified, shear);
 	const sense: AxisSense = effects.My < 0 ? 'minusMy' : 'plusMy';
@@ -101,7 +103,11 @@ function greatest(checks: readonly ResistanceCheck[], missing: readonly Note[]) 
 
 /** The demand with the worst class, the first of equals; without demands +My. */
 function standingCase(cases: PureCases, judged: readonly Judged[]): DemandClass {
-	const first = judged[0]?.classed ?? { classified: cases.plusMy, basis: '+My' as const };
+	const first = judged[0]?.classed ?? {
+		classified: cases.plusMy,
+		basis: '+My' as const,
+		caseName: 'plusMy'
+	};
 	return judged.reduce(
 		(worst, { classed }) =>
 			classed.classified.overall > worst.classified.overall ? classed : worst,

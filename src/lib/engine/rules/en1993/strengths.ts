@@ -1,7 +1,10 @@
 import type { Note } from '../../result';
 import type { Part, PreparedSection } from '../../section/prepared';
+import type { Standard } from '../result';
+import { clauseOf, editionName } from './edition';
 
-const modulusOfCode = 210_000;
+/** N/mm², EN 1993-1-1 3.2.6. */
+export const modulusOfCode = 210_000;
 const strongestSteel = 460;
 /** EN 1993-1-5, 4.3(6): recommended limit of flange over web strength in a hybrid girder. */
 const hybridLimit = 2;
@@ -43,21 +46,25 @@ export function epsilonOf(fy: number, modulus: number): number {
 }
 
 /** Why EN 1993-1-1 may not be used for these materials; empty when it may. */
-export function strengthIssues({ parts }: PreparedSection, strengths: Strengths): Note[] {
+export function strengthIssues(
+	{ parts }: PreparedSection,
+	strengths: Strengths,
+	standard: Standard
+): Note[] {
 	const notes: Note[] = [];
 	const moduli = parts.map(({ material }) => material.E);
 	if (strengths.most > strongestSteel)
 		notes.push({
 			code: 'strength-out-of-range',
-			message: `EN 1993-1-1 covers steels up to fy ${strongestSteel}; this section has ${strengths.most}. No class and no resistance are given.`,
-			clause: 'EN 1993-1-1:2005 3.2'
+			message: `The rules of ${editionName(standard)} are used here for steels up to fy ${strongestSteel}; this section has ${strengths.most}. No class and no resistance are given.`,
+			clause: clauseOf(standard, 'material')
 		});
 	if (Math.min(...moduli) < 190_000 || Math.max(...moduli) > 220_000 || !allSame(moduli))
 		notes.push({
 			code: 'modulus-out-of-range',
 			message:
 				'EN 1993-1-1 is for structural steel with one modulus near 210 000 N/mm². No class and no resistance are given.',
-			clause: 'EN 1993-1-1:2005 3.2.6'
+			clause: clauseOf(standard, 'modulus')
 		});
 	if (strengths.most > hybridLimit * strengths.least)
 		notes.push({
@@ -69,7 +76,7 @@ export function strengthIssues({ parts }: PreparedSection, strengths: Strengths)
 		notes.push({
 			code: 'ductility-out-of-range',
 			message: `fu is less than ${leastHardening} fy in a part, too little for the ductility that EN 1993-1-1 asks for. No class and no resistance are given.`,
-			clause: 'EN 1993-1-1:2005 3.2.2'
+			clause: clauseOf(standard, 'ductility')
 		});
 	return notes;
 }

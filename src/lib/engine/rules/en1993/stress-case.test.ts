@@ -1,15 +1,19 @@
 import { describe, expect, it } from 'vitest';
 import type { ISection, SectionDefinition } from '../../section/definition';
-import { prepareSection } from '../../section/prepare';
-import { analyse } from '../analyse';
 import type { CodeChoice, Demand } from '../result';
+import { classifyDemand, effectsOf } from './demand-class';
+import { pureCases } from './model';
+import { testModel } from './test-model';
 
 function standing(definition: SectionDefinition, demand: Demand, code: Partial<CodeChoice> = {}) {
-	const section = prepareSection(definition);
-	if (!section.ok) throw new Error(section.error.map(({ message }) => message).join(' '));
-	const { classification } = analyse(section.value, { demands: [demand], code });
-	if (!classification) throw new Error('not classified');
-	return classification;
+	const model = testModel(definition, code);
+	const { classified, basis } = classifyDemand(
+		model,
+		pureCases(model),
+		effectsOf(demand),
+		'tested'
+	);
+	return { ...classified, basis };
 }
 
 const part = (definition: SectionDefinition, demand: Demand, name: string, code = {}) => {

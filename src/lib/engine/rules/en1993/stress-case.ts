@@ -4,6 +4,7 @@ import type { Mechanics } from '../../response/law-groups';
 import { plasticMomentOf, type PlasticState } from '../../response/plastic';
 import type { BendingPath } from '../../response/state';
 import type { GrossProperties } from '../../section/prepared';
+import type { Symmetry } from '../../section/symmetry';
 import { proportionalBlock } from './proportional-block';
 
 /** Design effects, kN and kNm, signs of the contract. */
@@ -29,6 +30,7 @@ export interface StressSource {
 	readonly gammaM0: number;
 	readonly classAlpha: 'actual-N' | 'proportional';
 	readonly hybrid: boolean;
+	readonly symmetry: Symmetry;
 }
 
 const uniform = (sign: number): StressCase => ({ plastic: () => sign, elastic: () => sign });
@@ -40,17 +42,22 @@ export const uniformTension: StressCase = uniform(-1);
 export function stressCase(source: StressSource, effects: Effects): StressCase {
 	const size = Math.hypot(effects.My, effects.Mz);
 	if (size === 0) return effects.N < 0 ? uniformCompression : uniformTension;
-	const path = pathOf(effects, source.gammaM0);
+	const path = pathOf(effects, source.gammaM0, source.symmetry);
 	return source.classAlpha === 'proportional' && effects.N !== 0
 		? proportionalCase(source, effects, path, size)
 		: actualCase(source, effects, path, size);
 }
 
-/** The axis that the moment turns about; a section symmetric about z bends straight about y. */
-export function pathOf({ N, My, Mz }: Effects, gammaM0: number): BendingPath {
+/**
+ * The axis that the moment turns about, with no moment across it. A section bends straight about an
+ * axis that its steel is even about, and without N also about the one across that.
+ */
+export function pathOf({ N, My, Mz }: Effects, gammaM0: number, symmetry: Symmetry): BendingPath {
 	const axisAngle = Mz === 0 ? (My < 0 ? 180 : 0) : (Math.atan2(Mz, My) * 180) / Math.PI;
-	const transverse = Mz === 0 || (My === 0 && N === 0) ? 'curvature-zero' : 'moment-zero';
-	return { axisAngle, transverse, N: N * gammaM0 };
+	const { leftRight, topBottom } = symmetry;
+	const free = N === 0 && (leftRight || topBottom);
+	const straight = (Mz === 0 && (leftRight || free)) || (My === 0 && (topBottom || free));
+	return { axisAngle, transverse: straight ? 'curvature-zero' : 'moment-zero', N: N * gammaM0 };
 }
 
 /**
@@ -99,17 +106,26 @@ function caseFrom(
 	};
 }
 
-/** −N/A + My z/Iy − Mz y/Iz of a section with principal axes y and z. */
+/** Share of the lesser second moment below which Iyz is rounding. */
+const noProduct = 1e-9;
+
+/**
+ * Elastic stress, compression positive, of N (kN) and moments (kNm) times `grown` on the gross
+ * section: with its product of inertia where y and z are not its principal axes.
+ */
 export function elasticStress(
-	{ area, centroid, secondMomentY, secondMomentZ }: GrossProperties,
+	{ area, centroid, secondMomentY: Iy, secondMomentZ: Iz, productYZ }: GrossProperties,
 	N: number,
 	{ My, Mz }: Effects,
 	grown: number
 ): StressCase['elastic'] {
 	const direct = (-N * 1e3) / area;
-	const perZ = (grown * My * 1e6) / secondMomentY;
-	const perY = (-grown * Mz * 1e6) / secondMomentZ;
-	return ({ y, z }) => direct + perZ * (z - centroid.z) + perY * (y - centroid.y);
+	const { y: yc, z: zc } = centroid;
+	const Iyz = Math.abs(productYZ) <= noProduct * Math.min(Iy, Iz) ? 0 : productYZ;
+	const size = (grown * 1e6) / (1 - (Iyz / Iy) * (Iyz / Iz));
+	const perZ = size * (My / Iy + ((Mz / Iy) * Iyz) / Iz);
+	const perY = -size * (Mz / Iz + ((My / Iz) * Iyz) / Iy);
+	return ({ y, z }) => direct + perZ * (z - zc) + perY * (y - yc);
 }
 
 /** Signed distance from the neutral axis towards the side that positive bending compresses. */

@@ -1,13 +1,13 @@
 import { describe, expect, it } from 'vitest';
-import type { SectionDefinition } from '../../section/definition';
-import { prepareSection } from '../../section/prepare';
-import { elementsOf } from './plate-elements';
-import { strengthsOf } from './strengths';
+import type { SectionDefinition } from '../../../section/definition';
+import { prepareSection } from '../../../section/prepare';
+import { elementsOf } from './elements-of';
+import { strengthsOf } from '../strengths';
 
 function plates(definition: SectionDefinition) {
 	const section = prepareSection(definition);
 	if (!section.ok) throw new Error(section.error.map(({ message }) => message).join(' '));
-	const elements = elementsOf(section.value, strengthsOf(section.value));
+	const { elements } = elementsOf(section.value, strengthsOf(section.value));
 	return elements?.kind === 'plates' ? elements.plates : [];
 }
 
