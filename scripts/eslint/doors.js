@@ -1,6 +1,6 @@
 import path from 'node:path';
 import { root } from '../lib/paths.js';
-import { doors, importedFile, mayUsePackage, roomOf } from './rooms.js';
+import { doors, importedFile, mayUsePackage, packagesFor, roomOf } from './rooms.js';
 
 /**
  * What is wrong with an import, or null.
@@ -13,7 +13,7 @@ export const wrongImport = (importer, source) => {
 	if (room === null || !door) return null;
 	const file = importedFile(source, importer);
 	if (file === null)
-		return mayUsePackage(door.packages, source)
+		return mayUsePackage(packagesFor(importer, door), source)
 			? null
 			: `${room} may not use the package '${source}'.`;
 	const other = roomOf(file);

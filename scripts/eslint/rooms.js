@@ -24,6 +24,23 @@ export const doors = {
 	}
 };
 
+/**
+ * Folders that may use packages their room may not.
+ * @type {Readonly<Record<string, readonly string[]>>}
+ */
+const packagesWithin = { 'src/lib/engine/geometry/mesh/': ['delaunator'] };
+
+/**
+ * Packages a file may use: its room's, or its folder's own.
+ * @param {string} file from the top of the clone
+ * @param {Doors} doorsOfRoom
+ * @returns {Doors['packages']}
+ */
+export const packagesFor = (file, { packages }) => {
+	const folder = Object.keys(packagesWithin).find((name) => file.startsWith(name));
+	return folder === undefined ? packages : (packagesWithin[folder] ?? packages);
+};
+
 const isServerFile = (/** @type {string} */ file) =>
 	/(^|\/)\+server\.ts$|\.server(\.ts)?$/.test(file);
 

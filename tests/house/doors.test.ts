@@ -21,6 +21,13 @@ test('the engine and the units use no packages, the drawing only d3', () => {
 	expect(wrongImport('src/lib/drawing/axis.ts', 'layercake')).toContain('layercake');
 });
 
+test('only the mesh of the engine uses the triangulation package', () => {
+	expect(wrongImport('src/lib/engine/geometry/mesh/triangulation.ts', 'delaunator')).toBeNull();
+	expect(wrongImport('src/lib/engine/geometry/mesh/triangulation.ts', 'zod')).toContain('zod');
+	for (const file of ['geometry/loops.ts', 'section/torsion/numerical.ts'])
+		expect(wrongImport(`src/lib/engine/${file}`, 'delaunator')).toContain('delaunator');
+});
+
 test('a page keeps out of the server, a server route out of the components', () => {
 	const queries = '$lib/server/queries/people';
 	expect(wrongImport('src/routes/bench/+page.svelte', queries)).toContain('server');
