@@ -2,12 +2,12 @@ import { describe, expect, it } from 'vitest';
 import { internalBuckling } from '../../src/lib/engine/rules/en1993/effective/buckling-factor';
 import { effectiveMoment } from '../../src/lib/engine/rules/en1993/effective/effective-moment';
 import { figure, workedExample } from './en1993-example';
-import { enModel } from './en1993-model';
+import { testModel } from '../../src/lib/engine/rules/en1993/test-model';
 
 describe('effective sections of EN 1993-1-5 against published examples', () => {
 	const ef02 = workedExample('EF02');
 	const of = (name: string) => figure(ef02.inputs, name);
-	const girder = enModel({
+	const girder = testModel({
 		kind: 'i',
 		fabrication: 'welded',
 		h: of('hw') + 2 * of('tf'),
