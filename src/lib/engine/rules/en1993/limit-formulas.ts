@@ -51,7 +51,8 @@ function internalFormulas(standard: Standard, { epsilon, alpha, psi }: LimitInpu
 	const { plastic, bending, compression, beyond, divisor } = internalTable(standard);
 	const branch = plasticBranch(alpha.value);
 	const byAlpha = (row: (typeof plastic)[0]): LimitFormula => {
-		if (branch === 'bending') return { formula: `${row.bending}·ε`, inputs: [epsilon] };
+		if (branch === 'bending' || branch === 'compression')
+			return { formula: `${row[branch]}·ε`, inputs: [epsilon] };
 		const low = branch === 'low';
 		const formula = low ? `${row.low}·ε/α` : `${row.high}·ε/(${row.factor}·α − 1)`;
 		return { formula, inputs: [epsilon, alpha] };

@@ -10,9 +10,10 @@ export const sameRatio = 1e-9;
 /** ψ below this is taken as this: the class 3 limits only grow further, without end. */
 export const leastPsi = -3;
 
-/** A limit of class 1 or 2: in bending alone, low/α up to α 0.5, high/(factor α − 1) above. */
+/** A limit of class 1 or 2: in bending alone, all compressed, low/α up to α 0.5, high/(factor α − 1) above. */
 interface PlasticRow {
 	readonly bending: number;
+	readonly compression: number;
 	readonly low: number;
 	readonly high: number;
 	readonly factor: number;
@@ -32,8 +33,8 @@ interface InternalTable {
 /** EN 1993-1-1:2005 Table 5.2, sheet 1. */
 const first: InternalTable = {
 	plastic: [
-		{ bending: 72, low: 36, high: 396, factor: 13 },
-		{ bending: 83, low: 41.5, high: 456, factor: 13 }
+		{ bending: 72, compression: 33, low: 36, high: 396, factor: 13 },
+		{ bending: 83, compression: 38, low: 41.5, high: 456, factor: 13 }
 	],
 	bending: 124,
 	compression: 42,
@@ -44,8 +45,8 @@ const first: InternalTable = {
 /** EN 1993-1-1:2022 Table 7.3, sheet 1, from memory. */
 const later: InternalTable = {
 	plastic: [
-		{ bending: 72, low: 36, high: 126, factor: 5.5 },
-		{ bending: 83, low: 41.5, high: 188, factor: 6.53 }
+		{ bending: 72, compression: 28, low: 36, high: 126, factor: 5.5 },
+		{ bending: 83, compression: 34, low: 41.5, high: 188, factor: 6.53 }
 	],
 	bending: 121,
 	compression: 38,
@@ -57,11 +58,12 @@ export const internalTable = (standard: Standard): InternalTable =>
 	isLater(standard) ? later : first;
 
 /** The branch of a row that α or ψ falls on; each has its own formula. */
-export type PlasticBranch = 'bending' | 'low' | 'high';
+export type PlasticBranch = 'bending' | 'compression' | 'low' | 'high';
 export type ElasticBranch = 'bending' | 'over' | 'beyond';
 
 export function plasticBranch(alpha: number): PlasticBranch {
 	if (Math.abs(alpha - 0.5) <= sameRatio) return 'bending';
+	if (alpha >= 1 - sameRatio) return 'compression';
 	return alpha > 0.5 ? 'high' : 'low';
 }
 
@@ -90,10 +92,17 @@ export function internalLimits(
 	];
 }
 
-function plasticLimit({ bending, low, high, factor }: PlasticRow, alpha: number): number {
+function plasticLimit(row: PlasticRow, alpha: number): number {
 	const branch = plasticBranch(alpha);
-	if (branch === 'bending') return bending;
-	return branch === 'high' ? high / (factor * Math.min(alpha, 1) - 1) : low / alpha;
+	switch (branch) {
+		case 'bending':
+		case 'compression':
+			return row[branch];
+		case 'low':
+			return row.low / alpha;
+		case 'high':
+			return row.high / (row.factor * alpha - 1);
+	}
 }
 
 function elasticInternalLimit(standard: Standard, table: InternalTable, psi: number): number {
