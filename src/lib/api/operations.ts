@@ -1,7 +1,9 @@
 import type { Operation } from './operation';
 import { analyseAnswerSchema, analyseRequestSchema } from './analyse';
+import { interactionAnswerSchema, interactionRequestSchema } from './interaction';
 import { responseAnswerSchema, responseRequestSchema } from './response';
 import { healthSchema } from './health';
+import { unlockAnswerSchema, unlockRequestSchema } from './unlock';
 import { firmOperations } from './firm-operations';
 import { sectionOperations } from './section-operations';
 import { catalogueListSchema, shapeListSchema, shapeQuerySchema, shapeSchema } from './shapes';
@@ -30,6 +32,28 @@ export const operations: readonly Operation[] = [
 			'States of the section at imposed curvatures, curvature ratios, moments or strain planes, at constant N, about any axis. A state that cannot exist has converged false and null figures. Needs no account.',
 		body: responseRequestSchema,
 		answer: responseAnswerSchema,
+		refusals: compute
+	},
+	{
+		id: 'interaction',
+		method: 'post',
+		path: '/api/v1/interaction',
+		title: 'Trace an interaction curve',
+		description:
+			'The closed loop of forces at first yield or at full plastic, in the plane N-My, N-Mz or My-Mz; the moment not in the plane is held at zero, so that the neutral axis of an unsymmetric section turns. Needs no account.',
+		body: interactionRequestSchema,
+		answer: interactionAnswerSchema,
+		refusals: compute
+	},
+	{
+		id: 'unlock',
+		method: 'post',
+		path: '/api/v1/unlock',
+		title: 'Find what would unlock more',
+		description:
+			'Changes in stock steps with the least added steel after which the demands are met or, where they are, more of the strength may be counted. One change, or two where no single one does; each verified by a full analysis. Grades and welds stay. Needs no account.',
+		body: unlockRequestSchema,
+		answer: unlockAnswerSchema,
 		refusals: compute
 	},
 	{

@@ -1,0 +1,39 @@
+import { setImmediate as nextTurn } from 'node:timers/promises';
+import { fail, ok, type Result } from '../../../engine/result';
+import type { Refusal } from '../refusal';
+
+/** Longest that other requests wait for a turn, ms. */
+const turn = 25;
+/** Longest work on one search, ms. */
+const mostWork = 10_000;
+
+const clientGone: Refusal = {
+	status: 499,
+	code: 'client_gone',
+	message: 'The caller did not wait for the answer.'
+};
+
+const tooMuchWork: Refusal = {
+	status: 422,
+	code: 'too_much_work',
+	message: `This search takes more than ${mostWork / 1000} s. Give fewer demands or a shorter stock.`
+};
+
+/** Runs a search that can pause to its end, letting other requests in between. */
+export const searchInTurns = async <T>(
+	search: Generator<unknown, T>,
+	signal?: AbortSignal
+): Promise<Result<T, Refusal>> => {
+	let [started, worked] = [performance.now(), 0];
+	for (;;) {
+		const { done, value } = search.next();
+		if (done) return ok(value);
+		const now = performance.now();
+		if (now - started < turn) continue;
+		worked += now - started;
+		if (worked > mostWork) return fail(tooMuchWork);
+		await nextTurn();
+		if (signal?.aborted) return fail(clientGone);
+		started = performance.now();
+	}
+};
