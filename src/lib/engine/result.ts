@@ -8,6 +8,16 @@ export const fail = <E>(error: E): Result<never, E> => ({ ok: false, error });
 export interface Issue {
 	path: string;
 	message: string;
+	/** A change that has been tried and solves it. */
+	mend?: Mend;
+}
+
+/** A mend of plates: each plate named goes to a new centre, mm from the definition's origin. */
+export interface Mend {
+	words: string;
+	/** Path of the plate that moves, or the first of those that move together. */
+	path: string;
+	changes: readonly { plate: string; y: number; z: number }[];
 }
 
 /** Why a figure is absent or must be read with care. */

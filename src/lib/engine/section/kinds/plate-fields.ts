@@ -43,17 +43,18 @@ function onePlateIssues(plate: Plate, i: number, names: readonly string[]): Issu
 	return issues;
 }
 
-/** Joins between plates that do not touch. */
+/** Joins between plates that do not touch, each with its place in the list. */
 export function joinIssues(
 	{ plates, joins = [] }: PlatesSection,
 	touching: readonly (readonly [number, number])[]
-): Issue[] {
+): (Issue & { join: number })[] {
 	const pairs = new Set(touching.map(([i, j]) => pairKey(plates[i]!.name, plates[j]!.name)));
 	return joins.flatMap(({ a, b }, i) =>
 		pairs.has(pairKey(a, b))
 			? []
 			: [
 					{
+						join: i,
 						path: `joins.${i}`,
 						message: `Plates “${a}” and “${b}” are to be joined but do not touch.`
 					}

@@ -14,12 +14,6 @@ export const leastRigidity = { edge: 1.83, between: 3.66 } as const;
 /** Up to this c/t a plate needs no stiff support: an outstand of it is of class 1 in any steel up to 700 N/mm². */
 export const stocky = 5;
 
-/** What stands on a run at a hold: whether it comes back to the run elsewhere (a closed cell), and the plates of it. */
-export interface Branch {
-	readonly closed: boolean;
-	readonly plates: readonly number[];
-}
-
 /** Neighbours of every run: runs that are welded to it in whatever way. */
 export function neighboursOf({ runs, runOf }: Runs, contacts: readonly Contact[]): Set<number>[] {
 	const neighbours = runs.map(() => new Set<number>());
@@ -32,30 +26,33 @@ export function neighboursOf({ runs, runOf }: Runs, contacts: readonly Contact[]
 	return neighbours;
 }
 
-/** Everything that hangs together with a hold once the run itself is taken away. */
-export function branchOf(
+/**
+ * Runs that hang together with a hold once the run itself is taken away; null when they come back to
+ * the run at another hold and so close a cell.
+ */
+function openBranch(
 	runs: Runs,
 	neighbours: readonly ReadonlySet<number>[],
-	across: readonly Hold[],
 	run: number,
-	hold: Hold
-): Branch {
-	const roots = new Set(hold.by.map((plate) => runs.runOf[plate]!));
-	const others = new Set(
-		across.filter((one) => one !== hold).flatMap(({ by }) => by.map((plate) => runs.runOf[plate]!))
-	);
-	const reached = new Set(roots);
-	const waiting = [...roots];
-	for (let at = waiting.pop(); at !== undefined; at = waiting.pop())
-		for (const next of neighbours[at]!) {
-			if (next === run || reached.has(next)) continue;
-			reached.add(next);
-			waiting.push(next);
-		}
-	return {
-		closed: [...others].some((other) => reached.has(other)),
-		plates: [...reached].flatMap((one) => runs.runs[one]!.pieces.map(({ plate }) => plate))
+	hold: Hold,
+	holds: readonly Hold[]
+): number[] | null {
+	const seen = new Uint8Array(runs.runs.length);
+	const other = new Uint8Array(runs.runs.length);
+	for (const one of holds)
+		if (one !== hold) for (const plate of one.by) other[runs.runOf[plate]!] = 1;
+	const reached: number[] = [];
+	const reach = (next: number) => {
+		if (next === run || seen[next]) return;
+		seen[next] = 1;
+		reached.push(next);
 	};
+	for (const plate of hold.by) reach(runs.runOf[plate]!);
+	for (let k = 0; k < reached.length; k++) {
+		if (other[reached[k]!]) return null;
+		neighbours[reached[k]!]!.forEach(reach);
+	}
+	return reached;
 }
 
 /** Second moment of plates about the mid-line of a strip, mm⁴. */
@@ -91,19 +88,22 @@ export function weighedHolds(
 	const wall = runs.runs[run]!;
 	return holds.map((hold, i) => {
 		if (hold.kind === 'lap') return { ...hold, stiff: true, stiffener: false };
-		const branch = branchOf(runs, neighbours, holds, run, hold);
+		const branch = openBranch(runs, neighbours, run, hold, holds);
 		const between = i > 0 && i < holds.length - 1;
 		const clear = widestBeside(wall, holds, i);
 		const t = leastThickness(strips, wall);
 		const factor = between ? leastRigidity.between : leastRigidity.edge;
 		const about = strips[wall.pieces[0]!.plate]!;
 		const stiff =
-			branch.closed ||
+			branch === null ||
 			clear <= stocky * t ||
-			secondMomentAbout(strips, about, branch.plates) >= factor * t ** 3 * clear;
-		return { ...hold, stiff, stiffener: between && !branch.closed };
+			secondMomentAbout(strips, about, platesOf(runs, branch)) >= factor * t ** 3 * clear;
+		return { ...hold, stiff, stiffener: between && branch !== null };
 	});
 }
+
+const platesOf = ({ runs }: Runs, list: readonly number[]): number[] =>
+	list.flatMap((run) => runs[run]!.pieces.map(({ plate }) => plate));
 
 const leastThickness = (strips: readonly Strip[], { pieces }: Run): number =>
 	Math.min(...pieces.map(({ plate }) => 2 * strips[plate]!.halfThickness));
