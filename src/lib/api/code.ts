@@ -35,7 +35,8 @@ export const codeSchema = strict('code', {
 	allowEffectiveClass2: z
 		.boolean({ error: must('allowEffectiveClass2', 'true or false') })
 		.optional(),
-	useStressLevel: z.boolean({ error: must('useStressLevel', 'true or false') }).optional()
+	useStressLevel: z.boolean({ error: must('useStressLevel', 'true or false') }).optional(),
+	ltbCurves: oneOf('ltbCurves', ['general', 'rolled-or-equivalent']).optional()
 }).meta({ id: 'Code', description: 'Code of practice and the choices it leaves open.' });
 
 /** The code's fields all fit what the engine takes; a difference is a compile error. */

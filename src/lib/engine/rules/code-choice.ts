@@ -11,7 +11,8 @@ export const defaultCode: CodeChoice = {
 	method: 'LRFD',
 	classAlpha: 'actual-N',
 	allowEffectiveClass2: true,
-	useStressLevel: false
+	useStressLevel: false,
+	ltbCurves: 'general'
 };
 
 /** The code asked for, with defaults for what was left open. */

@@ -28,6 +28,8 @@ export interface CodeChoice {
 	allowEffectiveClass2: boolean;
 	/** Class 4 taken as class 3 where the stress is low enough, 5.5.2(9) of EN 1993-1-1:2005. */
 	useStressLevel: boolean;
+	/** Buckling curves of lateral–torsional buckling: 6.3.2.2, or 6.3.2.3 for rolled I and their like. */
+	ltbCurves: 'general' | 'rolled-or-equivalent';
 }
 
 /** Transverse stiffeners of a web. */

@@ -1,3 +1,4 @@
+import { workingKey } from '../../explain/keys';
 import type { Note } from '../../result';
 import { boxSizes } from '../../section/kinds/box';
 import { iSizes } from '../../section/kinds/i';
@@ -21,24 +22,64 @@ export interface Counted {
 	readonly topCompressed: boolean;
 }
 
+/** Buckling of the compression flange into the web as a check: hw/tw against its limit. */
+export interface FlangeInducedBuckling {
+	readonly value: number;
+	readonly limit: number;
+	readonly clause: string;
+	/** The compression flange. */
+	readonly part: 'topFlange' | 'bottomFlange';
+}
+
+const clause = 'EN 1993-1-5 8(1)';
+
 /**
  * Buckling of the compression flange into the web, EN 1993-1-5 8(1): hw/tw up to
  * k (E/fyf) √(Aw/Afc), k 0.3 with plastic rotation (class 1), 0.4 with the plastic moment (class 2,
- * or a web taken as class 2), 0.55 elastic. A note where it is exceeded in a welded I or box.
+ * or a web taken as class 2), 0.55 elastic. Afc is the whole flange, which is on the safe side of its
+ * effective area. Null for sections other than a welded I or box; girders curved in elevation (8(2)) are
+ * not covered.
  */
-export function flangeInducedBuckling(model: EnModel, counted: Counted): Note[] {
+export function flangeInducedBucklingCheck(
+	model: EnModel,
+	counted: Counted,
+	name: string | null = null
+): FlangeInducedBuckling | null {
 	const welded = weldedSection(model.section);
-	if (welded === null) return [];
+	if (welded === null) return null;
 	const { hw, tw, webArea } = welded;
 	const part = counted.topCompressed ? 'topFlange' : 'bottomFlange';
-	const { modulus, of } = model.strengths;
-	const limit = factor(counted) * (modulus / of(part)) * Math.sqrt(webArea / welded[part]);
-	if (hw / tw <= limit) return [];
+	const [E, fyf] = [model.strengths.modulus, model.strengths.of(part)];
+	const [k, flangeArea] = [factor(counted), welded[part]];
+	const value = hw / tw;
+	const limit = k * (E / fyf) * Math.sqrt(webArea / flangeArea);
+	if (name !== null)
+		model.workings?.add(workingKey.check(name, 'flange-induced buckling'), () => ({
+			title: 'Limit of the web’s slenderness against flange-induced buckling',
+			clause,
+			edition: 'EN 1993-1-5',
+			formula: 'λ_lim = k·E/fyf·√(A_w/A_fc)',
+			inputs: [
+				{ symbol: 'k', value: k, unit: '', from: '0.3 class 1, 0.4 plastic moment, 0.55 elastic' },
+				{ symbol: 'E', value: E, unit: 'N/mm²' },
+				{ symbol: 'fyf', value: fyf, unit: 'N/mm²', from: `strength of the part ${part}` },
+				{ symbol: 'A_w', value: webArea, unit: 'mm²' },
+				{ symbol: 'A_fc', value: flangeArea, unit: 'mm²', from: 'compression flange' }
+			],
+			result: { value: limit, unit: '' }
+		}));
+	return { value, limit, clause, part };
+}
+
+/** A note where the limit is exceeded. */
+export function flangeInducedBuckling(model: EnModel, counted: Counted): Note[] {
+	const found = flangeInducedBucklingCheck(model, counted);
+	if (found === null || found.value <= found.limit) return [];
 	return [
 		{
 			code: 'flange-induced-buckling-not-checked',
-			message: `The compression flange may buckle into the web: hw/tw ${(hw / tw).toFixed(1)} is over ${limit.toFixed(1)}. That check is not built beyond this limit.`,
-			clause: 'EN 1993-1-5 8(1)'
+			message: `The compression flange may buckle into the web: hw/tw ${found.value.toFixed(1)} is over ${found.limit.toFixed(1)}. That check is not built beyond this limit.`,
+			clause
 		}
 	];
 }
