@@ -1,4 +1,4 @@
-import { outstandBuckling, type CompressedEnd } from '../limits';
+import { outstandBuckling, sameRatio, type CompressedEnd } from '../limits';
 
 /** ψ below this is taken as this: Tables 4.1 and 4.2 of EN 1993-1-5 go no further. */
 export const leastRatio = -3;
@@ -10,10 +10,13 @@ export const leastRatio = -3;
  */
 export function internalBuckling(psi: number): number {
 	if (psi >= 0) return 8.2 / (1.05 + Math.min(psi, 1));
-	if (psi >= -1) return 7.81 - 6.29 * psi + 9.78 * psi * psi;
+	if (isFirstBranch(psi)) return 7.81 - 6.29 * psi + 9.78 * psi * psi;
 	const gap = 1 - Math.max(psi, leastRatio);
 	return 5.98 * gap * gap;
 }
+
+/** Whether the branch above ψ = −1 holds; −1 itself, which rounding may miss, belongs to it. */
+export const isFirstBranch = (psi: number): boolean => psi >= -1 - sameRatio;
 
 export const bucklingFactor = (
 	type: 'internal' | 'outstand',

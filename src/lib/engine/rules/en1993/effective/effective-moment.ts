@@ -1,11 +1,12 @@
 import type { AxisSense } from '../../section-moments';
 import type { EnModel } from '../model';
 import { effectiveFrom, reducedSection, type EffectiveSection } from './effective-section';
-import { hybridWorking, momentWorking } from './resistance-workings';
+import { grossWorking, hybridWorking, momentWorking } from './resistance-workings';
 import type { StressUse } from './element-width';
 import { firstFibre } from './first-fibre';
 import { hybridMoment, isHybridGirder, type HybridMoment } from './hybrid-moment';
-import type { Reduced } from './reduce';
+import type { MajorSense } from './flange-moments';
+import { wholeOf, type Reduced } from './reduce';
 import type { EffectiveBasis } from './stress-field';
 
 /** Bending resistance of the effective section. */
@@ -17,6 +18,8 @@ export interface EffectiveMoment {
 	readonly governing: 'compression' | 'tension';
 	/** Moment over stress at the governing fibre, mm³; null for a hybrid whose web yields early. */
 	readonly modulus: number | null;
+	/** Taking plates out moved the axis so that more would come out than for the gross section: its moment is given. */
+	readonly asGross: boolean;
 	readonly effective: EffectiveSection;
 }
 
@@ -29,8 +32,8 @@ export const basisOf: Readonly<Record<AxisSense, EffectiveBasis>> = {
 
 /**
  * Weff fy/γM0 at the first fibre of what remains that reaches its own strength, EN 1993-1-1 6.2.5(2)
- * with EN 1993-1-5 4.4. A hybrid I or box bent about y: the webs may yield early, 4.3(6). Null for a
- * round tube.
+ * with EN 1993-1-5 4.4; never more than the gross section gives the same way. A hybrid I or box bent about y: the
+ * webs may yield early, 4.3(6). Null for a round tube.
  */
 export function effectiveMoment(
 	model: EnModel,
@@ -49,33 +52,55 @@ export function effectiveMoment(
 		converged: rest.value,
 		governing: first.governing,
 		modulus: first.modulus,
+		asGross: first.asGross,
 		effective: effectiveFrom(model, basis, reduced, use)
 	};
 }
 
-interface Strength extends Pick<EffectiveMoment, 'value' | 'governing' | 'modulus'> {
+interface Strength extends Pick<EffectiveMoment, 'value' | 'governing' | 'modulus' | 'asGross'> {
 	readonly hybrid: HybridMoment | null;
 }
 
 function strengthOf(model: EnModel, sense: AxisSense, reduced: Reduced): Strength {
+	const own = ownStrength(model, sense, reduced);
+	const gross = grossMoment(model, sense, own) / model.code.gammaM0;
+	return own.value <= gross ? own : { ...own, value: gross, asGross: true };
+}
+
+function ownStrength(model: EnModel, sense: AxisSense, reduced: Reduced): Strength {
 	const scale = 1e-6 / model.code.gammaM0;
-	if ((sense === 'plusMy' || sense === 'minusMy') && isHybridGirder(model)) {
+	if (isMajor(sense) && isHybridGirder(model)) {
 		const hybrid = hybridMoment(model, sense, reduced);
-		return { value: hybrid.moment * scale, governing: hybrid.side, modulus: null, hybrid };
+		const value = hybrid.moment * scale;
+		return { value, governing: hybrid.side, modulus: null, asGross: false, hybrid };
 	}
 	const { moment, side, modulus } = firstFibre(model, basisOf[sense], reduced);
-	return { value: moment * scale, governing: side, modulus, hybrid: null };
+	return { value: moment * scale, governing: side, modulus, asGross: false, hybrid: null };
+}
+
+const isMajor = (sense: AxisSense): sense is MajorSense =>
+	sense === 'plusMy' || sense === 'minusMy';
+
+/** kNm, without γM0. Only where the pulled side governs can the reduced section give more. */
+function grossMoment(model: EnModel, sense: AxisSense, { governing, hybrid }: Strength): number {
+	if (governing === 'compression') return Infinity;
+	if (hybrid === null || !isMajor(sense)) return model.moments[sense].firstYield ?? Infinity;
+	return hybridMoment(model, sense, wholeOf(model.section.gross)).moment * 1e-6;
 }
 
 function explain(
 	model: EnModel,
 	basis: EffectiveBasis,
 	reduced: Reduced,
-	{ hybrid, value }: Strength,
+	{ hybrid, value, asGross }: Strength,
 	use?: StressUse
 ): void {
 	const { workings, code } = model;
 	if (workings === null || use) return;
+	if (asGross) {
+		grossWorking(workings, basis, value, code.gammaM0);
+		return;
+	}
 	if (hybrid) hybridWorking(workings, basis, hybrid, value, code.gammaM0);
 	else momentWorking(workings, basis, firstFibre(model, basis, reduced), value, code.gammaM0);
 }

@@ -73,12 +73,13 @@ function addShifts(
 		);
 		const sum = strips.map((_, i) => `A${i + 1}·${axis}${i + 1}`).join(' + ');
 		const figure = axis === 'y' ? 'centroidShiftY' : 'centroidShiftZ';
+		const shift = axis === 'y' ? centroidShiftY : centroidShiftZ;
 		add(
 			figure,
 			`Shift of the centroid along ${axis}`,
-			strips.length === 0 ? `e_${axis} = 0` : `e_${axis} = −(${sum})/A_eff`,
+			shift === 0 ? `e_${axis} = 0` : `e_${axis} = −(${sum})/A_eff`,
 			[...areas(strips), ...levers, input('A_eff', area, 'mm²', 'effective area')],
-			axis === 'y' ? centroidShiftY : centroidShiftZ,
+			shift,
 			'mm'
 		);
 	}

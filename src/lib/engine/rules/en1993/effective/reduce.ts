@@ -13,6 +13,13 @@ export interface Reduced {
 	readonly remaining: Remaining;
 }
 
+/** The gross section, nothing taken out. */
+export const wholeOf = (gross: GrossProperties): Reduced => ({
+	widths: [],
+	strips: [],
+	remaining: remainingOf(gross, [])
+});
+
 export interface ReduceSource {
 	readonly gross: GrossProperties;
 	readonly plates: readonly PlateElement[];

@@ -25,13 +25,19 @@ export function remainingOf(gross: GrossProperties, strips: readonly Strip[]): R
 		secondZ -= strip.ownZ + strip.area * y * y;
 		product -= strip.ownProduct + strip.area * y * z;
 	}
-	const [shiftY, shiftZ] = [firstZ / left, firstY / left];
+	const size = Math.sqrt((secondMomentY + secondMomentZ) / area);
+	const shiftY = withoutNoise(firstZ / left, size);
+	const shiftZ = withoutNoise(firstY / left, size);
 	return {
 		area: left,
 		y: centroid.y + shiftY,
 		z: centroid.z + shiftZ,
 		secondY: secondY - left * shiftZ * shiftZ,
 		secondZ: secondZ - left * shiftY * shiftY,
-		product: product - left * shiftY * shiftZ
+		product: withoutNoise(product - left * shiftY * shiftZ, secondMomentY + secondMomentZ)
 	};
 }
+
+/** What symmetry makes zero is zero: rounding beside the scale is taken out. */
+const withoutNoise = (value: number, scale: number): number =>
+	Math.abs(value) < 1e-14 * scale ? 0 : value;

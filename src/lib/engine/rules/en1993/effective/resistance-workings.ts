@@ -41,6 +41,22 @@ export function hybridWorking(
 	);
 }
 
+/** The same where the gross section gives less than the reduced one. */
+export function grossWorking(
+	workings: Workings,
+	basis: EffectiveBasis,
+	value: number,
+	gammaM0: number
+): void {
+	const inputs = [
+		input('M_el', value * gammaM0, 'kNm', 'elastic moment of the gross section, not exceeded'),
+		input('γM0', gammaM0, '')
+	];
+	workings.add(workingKey.effective(basis, 'moment'), () =>
+		moment('EN 1993-1-5 4.4', 'M_c,Rd = M_el/γM0', inputs, value)
+	);
+}
+
 const moment = (
 	clause: string,
 	formula: string,

@@ -1,6 +1,6 @@
 import { workingKey } from '../../../explain/keys';
 import type { Working, WorkingInput, Workings } from '../../../explain/working';
-import { leastRatio } from './buckling-factor';
+import { isFirstBranch, leastRatio } from './buckling-factor';
 import type { ElementWidth } from './element-width';
 import { internalLimit, outstandLimit } from './reduction';
 import { clause, edition, input } from './working-parts';
@@ -89,7 +89,7 @@ function stressRatio({ psi, most, least }: ElementWidth): [string, WorkingInput[
 function factorFormula({ element, psi, end }: ElementWidth): string {
 	if (element.type === 'internal') {
 		if (psi >= 0) return 'k_σ = 8.2/(1.05 + ψ)';
-		return psi >= -1
+		return isFirstBranch(psi)
 			? 'k_σ = 7.81 − 6.29·ψ + 9.78·ψ²'
 			: `k_σ = 5.98·(1 − ${atLeast(psi, leastRatio)})²`;
 	}
