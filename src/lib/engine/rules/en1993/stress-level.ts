@@ -68,13 +68,14 @@ function raisedRows(
 	}
 }
 
-/** Class 3 where the raised limit is met, else 4; a part in tension stays as it is. */
+/** Class 3 where the raised limit is met, else 4; tubes go by ε squared. A part in tension has no limits. */
 function raise(row: ClassifiedElement, fyd: number, most: number): ClassifiedElement {
 	const last = row.limits[2];
 	if (last === undefined || most <= 0) return { ...row, limits: [], class: 1 };
 	const factor = Math.sqrt(fyd / most);
-	const limits = row.limits.map((limit) => limit * factor);
-	const within = row.slenderness <= last * factor;
+	const onLimits = row.type === 'tubular' ? fyd / most : factor;
+	const limits = row.limits.map((limit) => limit * onLimits);
+	const within = row.slenderness <= last * onLimits;
 	return { ...row, epsilon: row.epsilon * factor, limits, class: within ? 3 : 4 };
 }
 
