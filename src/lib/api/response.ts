@@ -1,7 +1,7 @@
 import { strengthBasisSchema } from './code';
 import { must } from './describe';
 import { envelopeFields } from './envelope';
-import { listOf, oneOf, strict, within } from './fields';
+import { listOf, oneOf, strict, wholeWithin, within } from './fields';
 import { lawSchema } from './grade';
 import { limits } from './limits';
 import { ranges } from './ranges';
@@ -30,6 +30,25 @@ const atSchema = (title: string, most: number) =>
 		error: `${title} takes exactly one of curvature, moment, curvatureRatio, strainPlanes.`
 	});
 
+const unloadSchema = strict('unloadFrom', {
+	...atFields(1),
+	N: within('Axial force N', 'kN', ranges.force).optional()
+}).refine((from) => Object.keys(from).filter((field) => field !== 'N').length === 1, {
+	error: 'unloadFrom takes exactly one of curvature, moment, curvatureRatio, strainPlanes.'
+});
+
+const cycleSchema = strict('cycle', {
+	moments: listOf('moments', within('A moment', 'kNm', ranges.moment), limits.states).optional(),
+	curvatures: listOf(
+		'curvatures',
+		within('A curvature', '1/m', ranges.curvature),
+		limits.states
+	).optional(),
+	pointsPerLeg: wholeWithin('pointsPerLeg', { least: 1, most: limits.states }).optional()
+}).refine(({ moments, curvatures }) => (moments === undefined) !== (curvatures === undefined), {
+	error: 'cycle takes exactly one of moments and curvatures.'
+});
+
 export const responseRequestSchema = z
 	.object(
 		{
@@ -38,18 +57,29 @@ export const responseRequestSchema = z
 			axisAngle: within('axisAngle', 'degrees', ranges.angle).optional(),
 			transverse: oneOf('transverse', ['curvature-zero', 'moment-zero']).optional(),
 			N: within('Axial force N', 'kN', ranges.force).optional(),
-			at: atSchema('at', limits.states).meta({
+			at: atSchema('at', limits.states).optional().meta({
 				id: 'At',
 				description:
-					'Exactly one of the four; curvatureRatio is curvature over that at first yield.'
+					'Exactly one of the four; curvatureRatio is curvature over that at first yield. May be left out where a cycle is asked for.'
 			}),
 			law: lawSchema.optional().meta({ description: 'Takes the place of every part’s own law.' }),
 			residual: oneOf('residual', ['none', 'rolled', 'welded']).optional(),
-			unloadFrom: atSchema('unloadFrom', 1).optional()
+			unloadFrom: unloadSchema.optional().meta({
+				description:
+					'Loaded to this state under its own N (the request’s, when absent), then released to N and at: the states are what is left.'
+			}),
+			cycle: cycleSchema.optional().meta({
+				description:
+					'Reversals, one after the other from rest: each leg answers with pointsPerLeg states (20 when absent), the last at the reversal. unloadFrom and at go on from where the cycle ends.'
+			})
 		},
-		{ error: must('The request', 'an object with section or shapeId, and at') }
+		{ error: must('The request', 'an object with section or shapeId, and at or cycle') }
 	)
 	.refine(namesOneTarget, targetMissing)
+	.refine(({ at, cycle }) => at !== undefined || cycle !== undefined, {
+		path: ['at'],
+		error: must('at', 'an object with one of curvature, moment, curvatureRatio, strainPlanes')
+	})
 	.meta({ id: 'ResponseRequest' });
 
 export type ResponseRequest = z.infer<typeof responseRequestSchema>;
@@ -111,6 +141,10 @@ export const responseAnswerSchema = z
 	.object({
 		...envelopeFields,
 		states: z.array(stateSchema),
+		legs: z
+			.array(z.object({ states: z.array(stateSchema) }))
+			.optional()
+			.meta({ description: 'One a reversal of the cycle.' }),
 		firstYield: z.object({ curvature: figure('1/m'), moment: figure('kNm') }),
 		plasticMoment: figure('kNm')
 	})

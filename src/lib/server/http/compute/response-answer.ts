@@ -4,6 +4,7 @@ import {
 	type ResponseRequest
 } from '../../../api/response';
 import { fail, ok, type Note, type Result } from '../../../engine/result';
+import { historyOf, type History } from '../../../engine/response/history/history';
 import type { Imposed } from '../../../engine/response/respond';
 import type { BendingPath } from '../../../engine/response/state';
 import { noState } from '../../../engine/response/state-report';
@@ -12,30 +13,18 @@ import { prepareSection } from '../../../engine/section/prepare';
 import { contractVersion, engineVersion } from '../../../engine/version';
 import { parsed } from '../parse';
 import { invalid, type Refusal } from '../refusal';
+import { bentInTurns, type Bent } from './bent-in-turns';
+import { historyNotes } from './history-notes';
 import { ignoredFields } from './ignored-fields';
 import { withLaw } from './replaced-law';
-import { respondInTurns } from './states-in-turns';
 import { placed, subjectOf, type FindShape, type Subject } from './subject';
 import { hasUnbuiltLaw, unbuiltLawNote, withoutUnbuiltLaws } from './unbuilt-laws';
-import { workIssues } from './work-limit';
+import { usualPointsPerLeg, workIssues } from './work-limit';
 
 const known = Object.keys(responseRequestSchema.shape);
 
-const unloadNote: Note = {
-	code: 'unloading_not_built',
-	message:
-		'Unloading is not built yet: no state is given. Leave unloadFrom out to bend the section.'
-};
-const residualNote: Note = {
-	code: 'residual_not_built',
-	message:
-		'Residual stress is not built yet: no state is given. Send residual "none" or leave it out.'
-};
-
 /** Why no state can be given, if so. */
 const unbuiltNotes = (request: ResponseRequest, subject: Subject): Note[] => [
-	...(request.unloadFrom ? [unloadNote] : []),
-	...(request.residual && request.residual !== 'none' ? [residualNote] : []),
 	...(request.law
 		? request.law.type === 'ramberg-osgood'
 			? [unbuiltLawNote]
@@ -45,13 +34,13 @@ const unbuiltNotes = (request: ResponseRequest, subject: Subject): Note[] => [
 			: [])
 ];
 
-/** The schema has made sure that exactly one of the four is there. */
+/** The schema has made sure that one of the four at most is there. */
 const imposedOf = ({
 	curvature,
 	curvatureRatio,
 	moment,
 	strainPlanes = []
-}: ResponseRequest['at']): Imposed =>
+}: NonNullable<ResponseRequest['at']> = {}): Imposed =>
 	curvature
 		? { curvature }
 		: curvatureRatio
@@ -70,11 +59,24 @@ const pathOf = ({
 	N
 });
 
-const noAnswer = (at: ResponseRequest['at']) => ({
-	states: Object.values(at).flatMap((list) => list.map(() => noState)),
-	firstYield: { curvature: null, moment: null },
-	plasticMoment: null
-});
+const noAnswer = ({ at = {}, cycle }: ResponseRequest) => {
+	const points = cycle?.pointsPerLeg ?? usualPointsPerLeg;
+	const reversals = cycle?.moments ?? cycle?.curvatures;
+	const leg = () => ({ states: Array.from({ length: points }, () => noState) });
+	return {
+		states: Object.values(at).flatMap((list) => list.map(() => noState)),
+		...(reversals ? { legs: reversals.map(leg) } : {}),
+		firstYield: { curvature: null, moment: null },
+		plasticMoment: null
+	};
+};
+
+/** The section with what it has been through, where the request asks for that; a note where it has no answer. */
+const historyFor = (
+	{ residual = 'none', unloadFrom, cycle }: ResponseRequest,
+	section: PreparedSection
+): Result<History | null, Note> =>
+	residual === 'none' && !unloadFrom && !cycle ? ok(null) : historyOf(section, residual);
 
 /** The prepared section with the law that the request asks for, or what is wrong with it. */
 const preparedFor = (
@@ -104,20 +106,35 @@ export const responseAnswer = async (
 	if (!subject.ok) return subject;
 	const section = preparedFor(request.value, subject.value);
 	if (!section.ok) return section;
-	const { at } = request.value;
 	const unbuilt = unbuiltNotes(request.value, subject.value);
-	const tooMuch = workIssues(at, section.value);
+	const tooMuch = workIssues(request.value, section.value);
 	if (tooMuch.length > 0) return fail(invalid(tooMuch));
 	const response =
 		unbuilt.length > 0
-			? ok(noAnswer(at))
-			: await respondInTurns(section.value, pathOf(request.value), imposedOf(at), signal);
+			? ok({ ...noAnswer(request.value), notes: unbuilt })
+			: await bentAnswer(request.value, section.value, signal);
 	if (!response.ok) return response;
+	const { notes, ...figures } = response.value;
 	return ok({
 		contract: contractVersion,
 		engineVersion,
 		strengthBasis: section.value.strengthBasis,
-		...response.value,
-		notes: [...subject.value.notes, ...ignoredFields(body, known), ...unbuilt]
+		...figures,
+		notes: [...subject.value.notes, ...ignoredFields(body, known), ...notes]
 	});
+};
+
+const bentAnswer = async (
+	request: ResponseRequest,
+	section: PreparedSection,
+	signal: AbortSignal | undefined
+): Promise<Result<Bent, Refusal>> => {
+	const history = historyFor(request, section);
+	if (!history.ok) return ok({ ...noAnswer(request), notes: [history.error] });
+	const asked = { ...request, path: pathOf(request), at: imposedOf(request.at) };
+	const bent = await bentInTurns(section, asked, history.value, signal);
+	if (!bent.ok || !history.value) return bent;
+	const { firstYield, notes } = bent.value;
+	const more = historyNotes(request, history.value, firstYield.curvature);
+	return ok({ ...bent.value, notes: [...more, ...notes] });
 };

@@ -10,17 +10,45 @@ export const edgesOf = ({ parts }: PreparedSection): number =>
 		0
 	);
 
+/** States per reversal of a cycle when the request does not say. */
+export const usualPointsPerLeg = 20;
+
+type Asked = Pick<ResponseRequest, 'at' | 'cycle'>;
+
+/** How many states are asked for, by the field that asks for them. */
+const countsOf = ({
+	at = {},
+	cycle
+}: Asked): { path: string; search: boolean; count: number }[] => {
+	const points = cycle?.pointsPerLeg ?? usualPointsPerLeg;
+	return [
+		...Object.entries(at).map(([form, { length }]) => ({
+			...{ path: `at.${form}`, search: form === 'moment', count: length }
+		})),
+		...(cycle
+			? [
+					{
+						path: 'cycle',
+						search: cycle.moments !== undefined,
+						count: (cycle.moments ?? cycle.curvatures ?? []).length * points
+					}
+				]
+			: [])
+	];
+};
+
 /**
  * What is wrong when a section of very many edges is asked for more states than are computed in
  * about two seconds: a moment takes a search, and counts several times as much as a curvature.
  */
-export const workIssues = (at: ResponseRequest['at'], section: PreparedSection): Issue[] => {
+export const workIssues = (asked: Asked, section: PreparedSection): Issue[] => {
 	const edges = edgesOf(section);
-	return Object.entries(at).flatMap(([form, asked]) => {
-		const work = form === 'moment' ? limits.momentWork : limits.work;
+	return countsOf(asked).flatMap(({ path, search, count }) => {
+		const work = search ? limits.momentWork : limits.work;
 		const most = Math.min(limits.states, Math.floor(work / edges));
-		if (asked.length <= most) return [];
-		const message = `at.${form} may hold at most ${most} entries for a section of ${edges} edges, not ${asked.length}.`;
-		return [{ path: `at.${form}`, message }];
+		if (count <= most) return [];
+		const what = path === 'cycle' ? 'states in all' : 'entries';
+		const message = `${path} may hold at most ${most} ${what} for a section of ${edges} edges, not ${count}.`;
+		return [{ path, message }];
 	});
 };
