@@ -1,6 +1,7 @@
 import { fail, ok, type Result } from '../engine/result';
 import type { AnalyseAnswer, analyseRequestSchema } from './analyse';
 import { errorSchema, type ApiError } from './error';
+import type { InteractionAnswer, interactionRequestSchema } from './interaction';
 import type { ResponseAnswer, responseRequestSchema } from './response';
 import type { z } from './zod';
 
@@ -66,3 +67,8 @@ export const postResponse = (
 	request: z.input<typeof responseRequestSchema>,
 	options?: CallOptions
 ) => post<ResponseAnswer>('/api/v1/response', request, options);
+
+export const postInteraction = (
+	request: z.input<typeof interactionRequestSchema>,
+	options?: CallOptions
+) => post<InteractionAnswer>('/api/v1/interaction', request, options);

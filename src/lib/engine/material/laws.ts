@@ -103,7 +103,7 @@ function unknownLaw(type: never): Result<LawSide, string> {
 export function piecewiseLaw(tension: LawSide, compression: LawSide): StressStrainLaw {
 	const up = sideSegments(tension);
 	const down = sideSegments(compression);
-	const joined = up.slopes[0] === down.slopes[0];
+	const joined = sameSlope(up.slopes[0]!, down.slopes[0]!);
 	return {
 		kinks: [...down.kinks.map((k) => -k).reverse(), ...(joined ? [] : [0]), ...up.kinks],
 		offsets: [...down.offsets.map((o) => -o).reverse(), ...up.offsets.slice(joined ? 1 : 0)],
@@ -113,6 +113,9 @@ export function piecewiseLaw(tension: LawSide, compression: LawSide): StressStra
 	};
 }
 
+/** Slopes that differ by rounding only. */
+const sameSlope = (a: number, b: number): boolean => Math.abs(a - b) <= 1e-12 * Math.abs(b);
+
 function sideSegments({ points, beyond }: LawSide) {
 	const kinks: number[] = [];
 	const offsets: number[] = [];
@@ -121,7 +124,7 @@ function sideSegments({ points, beyond }: LawSide) {
 	for (const [nextStrain, nextStress] of points) {
 		const slope = (nextStress - stress) / (nextStrain - strain);
 		const before = slopes.at(-1);
-		if (before === undefined || Math.abs(slope - before) > 1e-12 * Math.abs(before)) {
+		if (before === undefined || !sameSlope(slope, before)) {
 			if (before !== undefined) kinks.push(strain);
 			slopes.push(slope);
 			offsets.push(stress - slope * strain);

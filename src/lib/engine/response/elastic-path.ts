@@ -10,7 +10,8 @@ export interface ElasticPath {
 	moment: (curvature: number) => number;
 }
 
-interface Stiffness {
+/** Strain plane to forces, symmetric: rows N, M, T; columns e0, κ, τ. N, N·mm, N·mm². */
+export interface Stiffness {
 	NN: number;
 	NM: number;
 	NT: number;
@@ -20,7 +21,7 @@ interface Stiffness {
 }
 
 /** Elastic stiffness about the gross centroid in the frame of the axis, each body with its own E. */
-function elasticStiffness(mechanics: Mechanics, angle: number): Stiffness {
+export function elasticStiffness(mechanics: Mechanics, angle: number): Stiffness {
 	const sum: Stiffness = { NN: 0, NM: 0, NT: 0, MM: 0, MT: 0, TT: 0 };
 	mechanics.profiles(angle).forEach(({ total }, i) => {
 		const E = mechanics.groups[i]!.modulus;

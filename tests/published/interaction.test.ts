@@ -1,0 +1,330 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import {
+	interactionCurve,
+	type InteractionPoint,
+	type InteractionRequest
+} from '../../src/lib/engine/response/interaction';
+import { interactionWith } from '../../src/lib/engine/response/interaction-factors';
+import {
+	circle,
+	part,
+	rectangle,
+	sectionOf,
+	steel
+} from '../../src/lib/engine/response/test-sections';
+import type { Part, PreparedSection } from '../../src/lib/engine/section/prepared';
+
+const curve = (section: PreparedSection, request: InteractionRequest) => {
+	const answer = interactionCurve(section, request);
+	if (!answer.ok) throw new Error(answer.error.message);
+	return answer.value.points;
+};
+
+const [fy, b, h] = [250, 40, 120];
+const bar = sectionOf(part('bar', rectangle(30, -70, b, h), steel(fy)));
+const squash = (fy * b * h) / 1e3;
+const plasticY = (fy * b * h ** 2) / 4e6;
+const plasticZ = (fy * h * b ** 2) / 4e6;
+
+describe('rectangle (closed forms, any text on plastic design)', () => {
+	it('full plastic under N: m = 1 − n² about either axis', () => {
+		for (const { N, My } of curve(bar, { limit: 'plastic', plane: 'N-My' }))
+			expect(Math.abs(My) / plasticY).toBeCloseTo(1 - (N / squash) ** 2, 12);
+		for (const { N, Mz } of curve(bar, { limit: 'plastic', plane: 'N-Mz' }))
+			expect(Math.abs(Mz) / plasticZ).toBeCloseTo(1 - (N / squash) ** 2, 12);
+	});
+
+	it('first yield: the stresses add up to fy, |n| + |my| + |mz| = 1', () => {
+		const [firstY, firstZ] = [plasticY / 1.5, plasticZ / 1.5];
+		for (const plane of ['N-My', 'N-Mz', 'My-Mz'] as const)
+			for (const { N, My, Mz } of curve(bar, { limit: 'first-yield', plane }))
+				expect(Math.abs(N) / squash + Math.abs(My) / firstY + Math.abs(Mz) / firstZ).toBeCloseTo(
+					1,
+					12
+				);
+		for (const { My, Mz } of curve(bar, { limit: 'first-yield', plane: 'My-Mz', N: 500 }))
+			expect(500 / squash + Math.abs(My) / firstY + Math.abs(Mz) / firstZ).toBeCloseTo(1, 12);
+	});
+
+	it('full plastic about both axes: my + ¾ mz² = 1 while the neutral axis leaves by the sides', () => {
+		// neutral axis z = t·(h/2)·y/(b/2): my = 1 − t²/3, mz = 2t/3 for t ≤ 1
+		for (const { My, Mz } of curve(bar, { limit: 'plastic', plane: 'My-Mz', points: 120 })) {
+			const [my, mz] = [Math.abs(My) / plasticY, Math.abs(Mz) / plasticZ];
+			const sum = mz <= 2 / 3 ? my + 0.75 * mz ** 2 : mz + 0.75 * my ** 2;
+			expect(sum).toBeCloseTo(1, 11);
+		}
+	});
+
+	it('unequal strengths: N and M from where the neutral axis lies', () => {
+		const fyc = 180;
+		const section = sectionOf(part('bar', rectangle(0, 0, b, h), steel(fy, { fyc })));
+		for (const { N, My } of curve(section, { limit: 'plastic', plane: 'N-My' })) {
+			const stretched = (N * 1e3 + fyc * b * h) / ((fy + fyc) * b);
+			const moment = ((fy + fyc) * b * stretched * (h - stretched)) / 2e6;
+			expect(Math.abs(My) / plasticY).toBeCloseTo(moment / plasticY, 11);
+		}
+	});
+});
+
+describe('circles (closed forms)', () => {
+	it('solid: m = sin³α at n = 1 − (2α − sin 2α)/π', () => {
+		const round = sectionOf(part('bar', { loops: [circle({ y: 5, z: 9 }, 40)] }, steel(fy)));
+		const whole = (fy * Math.PI * 1600) / 1e3;
+		for (const { N, My } of curve(round, { limit: 'plastic', plane: 'N-My' })) {
+			const alpha = Math.asin(Math.min(1, Math.cbrt(Math.abs(My) / ((fy * 4 * 40 ** 3) / 3e6))));
+			const n = 1 - (2 * alpha - Math.sin(2 * alpha)) / Math.PI;
+			expect(Math.abs(N) / whole).toBeCloseTo(n, 7);
+		}
+	});
+
+	it('thin tube: m = cos(πn/2)', () => {
+		const walls = [circle({ y: 0, z: 0 }, 100), circle({ y: 0, z: 0 }, 99.999, true)];
+		const tube = sectionOf(part('wall', { loops: walls }, steel(fy)));
+		const area = Math.PI * (100 ** 2 - 99.999 ** 2);
+		const plastic = (fy * 4 * (100 ** 3 - 99.999 ** 3)) / 3e6;
+		for (const { N, Mz } of curve(tube, { limit: 'plastic', plane: 'N-Mz' }))
+			expect(Math.abs(Mz) / plastic).toBeCloseTo(
+				Math.cos((Math.PI * N * 1e3) / (2 * fy * area)),
+				4
+			);
+	});
+
+	it('bends alike about every axis under N', () => {
+		const tube = sectionOf(
+			part(
+				'wall',
+				{ loops: [circle({ y: 0, z: 0 }, 60), circle({ y: 0, z: 0 }, 50, true)] },
+				steel(fy)
+			)
+		);
+		for (const limit of ['plastic', 'first-yield'] as const) {
+			const sizes = curve(tube, { limit, plane: 'My-Mz', N: 300 }).map(({ My, Mz }) =>
+				Math.hypot(My, Mz)
+			);
+			for (const size of sizes) expect(size / sizes[0]!).toBeCloseTo(1, 11);
+		}
+	});
+});
+
+/** Lopsided hybrid sections of rectangles, with unequal strengths in both senses. */
+interface Box {
+	left: number;
+	bottom: number;
+	width: number;
+	height: number;
+	fy: number;
+	fyc: number;
+}
+const size = fc.double({ min: 8, max: 120, noNaN: true });
+const strength = fc.double({ min: 180, max: 700, noNaN: true });
+const boxes: fc.Arbitrary<Box[]> = fc
+	.tuple(size, size, size, size, size, size, fc.array(strength, { minLength: 6, maxLength: 6 }))
+	.map(([w, hw, fw, ft, bw, bt, s]) => [
+		{ left: 0, bottom: 0, width: w / 8, height: 4 * hw, fy: s[0]!, fyc: s[1]! },
+		{ left: -fw / 3, bottom: 4 * hw, width: fw, height: ft / 4, fy: s[2]!, fyc: s[3]! },
+		{ left: 0, bottom: -bt / 4, width: bw, height: bt / 4, fy: s[4]!, fyc: s[5]! }
+	]);
+const partsOf = (list: readonly Box[]): Part[] =>
+	list.map(({ left, bottom, width, height, ...s }, i) =>
+		part(`p${i}`, rectangle(left, bottom, width, height), steel(s.fy, { fyc: s.fyc }))
+	);
+const requests = fc.record({
+	limit: fc.constantFrom('first-yield' as const, 'plastic' as const),
+	plane: fc.constantFrom('N-My' as const, 'N-Mz' as const, 'My-Mz' as const)
+});
+
+const scales = (points: readonly InteractionPoint[]) => {
+	const most = (of: (p: InteractionPoint) => number) =>
+		Math.max(...points.map((p) => Math.abs(of(p)))) || 1;
+	return { N: most((p) => p.N), My: most((p) => p.My), Mz: most((p) => p.Mz) };
+};
+
+describe('random hybrid sections', () => {
+	it('have convex curves', () => {
+		fc.assert(
+			fc.property(boxes, requests, (list, asked) => {
+				const points = curve(sectionOf(...partsOf(list)), { ...asked, points: 60 });
+				const s = scales(points);
+				const flat = points.map(({ N, My, Mz }) =>
+					asked.plane === 'N-My'
+						? [N / s.N, My / s.My]
+						: asked.plane === 'N-Mz'
+							? [N / s.N, Mz / s.Mz]
+							: [My / s.My, Mz / s.Mz]
+				);
+				const around = [...flat, flat[1]!];
+				for (let i = 2; i < around.length; i++) {
+					const [p, q, r] = [around[i - 2]!, around[i - 1]!, around[i]!];
+					const turn = (q[0]! - p[0]!) * (r[1]! - q[1]!) - (q[1]! - p[1]!) * (r[0]! - q[0]!);
+					expect(turn).toBeGreaterThan(-1e-11);
+				}
+			}),
+			{ numRuns: 40, interruptAfterTimeLimit: 3000 }
+		);
+	});
+
+	it('meet their curves when a demand on them grows in proportion by 1', () => {
+		fc.assert(
+			fc.property(boxes, requests, (list, asked) => {
+				const section = sectionOf(...partsOf(list));
+				for (const point of curve(section, { ...asked, points: 12 })) {
+					const factors = interactionWith(section, point);
+					const factor = asked.limit === 'plastic' ? factors.plastic : factors.firstYield;
+					expect(factor).toBeCloseTo(1, 8);
+					const half = interactionWith(section, {
+						N: 2 * point.N,
+						My: 2 * point.My,
+						Mz: 2 * point.Mz
+					});
+					expect(asked.limit === 'plastic' ? half.plastic : half.firstYield).toBeCloseTo(0.5, 8);
+				}
+			}),
+			{ numRuns: 8, interruptAfterTimeLimit: 3000 }
+		);
+	});
+
+	it('are turned, mirrored and scaled with their curves', () => {
+		const turns = fc.double({ min: -180, max: 180, noNaN: true });
+		fc.assert(
+			fc.property(boxes, requests, turns, (list, asked, degrees) => {
+				const parts = partsOf(list);
+				const points = curve(sectionOf(...parts), { ...asked, points: 12 });
+				const of = (section: PreparedSection, p: InteractionPoint) => {
+					const factors = interactionWith(section, p);
+					return asked.limit === 'plastic' ? factors.plastic : factors.firstYield;
+				};
+				const [c, s] = [Math.cos((degrees * Math.PI) / 180), Math.sin((degrees * Math.PI) / 180)];
+				const turned = mapped(parts, (y, z) => [c * y - s * z, s * y + c * z]);
+				const mirrored = mapped(parts, (y, z) => [-y, z], true);
+				const scaled = mapped(parts, (y, z) => [1e-3 * y, 1e-3 * z]);
+				for (const { N, My, Mz } of points) {
+					expect(of(turned, { N, My: c * My - s * Mz, Mz: s * My + c * Mz })).toBeCloseTo(1, 8);
+					expect(of(mirrored, { N, My, Mz: -Mz })).toBeCloseTo(1, 8);
+					expect(of(scaled, { N: N * 1e-6, My: My * 1e-9, Mz: Mz * 1e-9 })).toBeCloseTo(1, 8);
+				}
+			}),
+			{ numRuns: 4, interruptAfterTimeLimit: 3000 }
+		);
+	});
+
+	it('reach first yield where Navier’s stress meets a strength', () => {
+		fc.assert(
+			fc.property(boxes, requests, (list, { plane }) => {
+				const section = sectionOf(...partsOf(list));
+				for (const point of curve(section, { limit: 'first-yield', plane, points: 24 }))
+					expect(navierUse(list, section, point)).toBeCloseTo(1, 10);
+			}),
+			{ numRuns: 40, interruptAfterTimeLimit: 3000 }
+		);
+	});
+
+	it('lie on the plastic surface of independent cells: no block does more work, one does as much', () => {
+		fc.assert(
+			fc.property(boxes, requests, (list, { plane }) => {
+				const section = sectionOf(...partsOf(list));
+				const points = curve(section, { limit: 'plastic', plane, points: 241 });
+				const s = scales(points);
+				for (let i = 20; i < 240; i += 73) {
+					const [p, before, after] = [points[i]!, points[i - 1]!, points[i + 1]!];
+					const left = leastSpareWork(list, section, plane, p, before, after);
+					const size =
+						Math.abs(left.normal[0] * s.N) +
+						Math.abs(left.normal[1] * s.My) +
+						Math.abs(left.normal[2] * s.Mz);
+					expect(Math.abs(left.spare) / size).toBeLessThan(3e-3);
+				}
+			}),
+			{ numRuns: 4, interruptAfterTimeLimit: 3000 }
+		);
+	});
+});
+
+function mapped(
+	parts: readonly Part[],
+	map: (y: number, z: number) => [number, number],
+	mirror = false
+): PreparedSection {
+	const point = ({ y, z }: { y: number; z: number }) => {
+		const [my, mz] = map(y, z);
+		return { y: my, z: mz };
+	};
+	return sectionOf(
+		...parts.map((p) => {
+			const loops = p.region.loops.map((loop) => {
+				const edges = loop.map((edge) => {
+					if (edge.kind === 'arc') throw new Error('rectangles only');
+					const [from, to] = [point(edge.from), point(edge.to)];
+					return mirror
+						? ({ kind: 'line', from: to, to: from } as const)
+						: ({ kind: 'line', from, to } as const);
+				});
+				return mirror ? edges.reverse() : edges;
+			});
+			return { ...p, region: { loops } };
+		})
+	);
+}
+
+/** Greatest stress over strength by σ = N/A + bending about both axes with the product of inertia. */
+function navierUse(list: readonly Box[], { gross }: PreparedSection, p: InteractionPoint): number {
+	const { area, centroid, secondMomentY: Iy, secondMomentZ: Iz, productYZ: Iyz } = gross;
+	const [My, Mz] = [p.My * 1e6, p.Mz * 1e6];
+	const determinant = Iy * Iz - Iyz * Iyz;
+	// My = Iy·ky − Iyz·kz, Mz = Iz·kz − Iyz·ky (times E)
+	const ky = (My * Iz + Mz * Iyz) / determinant;
+	const kz = (Mz * Iy + My * Iyz) / determinant;
+	let use = 0;
+	for (const { left, bottom, width, height, ...s } of list)
+		for (const y of [left, left + width])
+			for (const z of [bottom, bottom + height]) {
+				const stress = (p.N * 1e3) / area - ky * (z - centroid.z) + kz * (y - centroid.y);
+				use = Math.max(use, stress / s.fy, -stress / s.fyc);
+			}
+	return use;
+}
+
+/** Work of all cells at their strength less that of the point, for the point's normal and the best strain across. */
+function leastSpareWork(
+	list: readonly Box[],
+	{ gross: { centroid } }: PreparedSection,
+	plane: 'N-My' | 'N-Mz' | 'My-Mz',
+	p: InteractionPoint,
+	before: InteractionPoint,
+	after: InteractionPoint
+) {
+	const n = 40;
+	const cells = list.flatMap((box) =>
+		Array.from({ length: n * n }, (_, i) => ({
+			y: box.left + (((i % n) + 0.5) / n) * box.width - centroid.y,
+			z: box.bottom + ((Math.floor(i / n) + 0.5) / n) * box.height - centroid.z,
+			area: (box.width * box.height) / (n * n),
+			fy: box.fy,
+			fyc: box.fyc
+		}))
+	);
+	const work = (e0: number, ky: number, kz: number) =>
+		cells.reduce((sum, { y, z, area, ...s }) => {
+			const strain = e0 - ky * z * 1e-3 + kz * y * 1e-3;
+			return sum + (area / 1e3) * (strain > 0 ? s.fy * strain : -s.fyc * strain);
+		}, 0);
+	const normalOf = (free: number): [number, number, number] => {
+		if (plane === 'N-My') return [after.My - before.My, before.N - after.N, free];
+		if (plane === 'N-Mz') return [after.Mz - before.Mz, free, before.N - after.N];
+		return [free, after.Mz - before.Mz, before.My - after.My];
+	};
+	const spare = (free: number) => {
+		const [a, y, z] = normalOf(free);
+		return work(a, y, z) - (a * p.N + y * p.My + z * p.Mz);
+	};
+	const fixed = normalOf(0).map(Math.abs) as [number, number, number];
+	const range = 20 * (10 * fixed[0] + fixed[1] + fixed[2]);
+	let [low, high] = [-range, range];
+	while (high - low > 1e-8 * range) {
+		const [x1, x2] = [low + 0.382 * (high - low), high - 0.382 * (high - low)];
+		if (spare(x1) < spare(x2)) high = x2;
+		else low = x1;
+	}
+	const free = (low + high) / 2;
+	return { spare: spare(free), normal: normalOf(free) };
+}
