@@ -37,4 +37,21 @@ describe('engine jobs', () => {
 		);
 		expect(!job.ok && job.error[0]?.path).toBe('b');
 	});
+
+	it('gives up a search for what unlocks more when cancelled', async () => {
+		const girder: SectionDefinition = {
+			...{ kind: 'i', fabrication: 'welded', grade: 'S355' },
+			...{ h: 940, b: 400, tw: 14, tf: 20, weldLeg: 8 }
+		};
+		const thicknesses = [14, 16, 20, 25, 30, 40];
+		const request = {
+			girder: { definition: girder, stiffeners: null },
+			stock: { thicknesses, widthStep: 10, depthStep: 25, stiffenerStep: 250 },
+			code: {},
+			demands: [{ name: 'A', My: 20_000 }],
+			strengthBasis: 'product-standard' as const
+		};
+		const stop = () => Promise.resolve(false);
+		expect(await engineHandlers.unlock(request, { progress: () => {}, goOn: stop })).toBeNull();
+	});
 });

@@ -4,6 +4,7 @@ import type { ResponseState } from '$lib/engine/response/state';
 import { noState } from '$lib/engine/response/state-report';
 import { analyse } from '$lib/engine/rules/analyse';
 import { prepareSection } from '$lib/engine/section/prepare';
+import { unlocking, type Unlocking } from '$lib/engine/unlock/unlock';
 import type { EngineJobs } from './engine-jobs';
 import type { JobContext, JobHandlers } from './protocol';
 
@@ -33,6 +34,25 @@ async function statesInBatches(steps: readonly Step[], { progress, goOn }: JobCo
 	return states;
 }
 
+/** Milliseconds of a search between two pauses. */
+const searchTurn = 12;
+
+/** A search that can pause, to its end; null when cancelled. */
+async function searched(
+	search: Generator<number, Unlocking | null>,
+	{ progress, goOn }: JobContext
+): Promise<Unlocking | null> {
+	let paused = performance.now();
+	for (;;) {
+		const step = search.next();
+		if (step.done) return step.value;
+		if (performance.now() - paused < searchTurn) continue;
+		progress(step.value);
+		if (!(await goOn())) return null;
+		paused = performance.now();
+	}
+}
+
 /** The engine's jobs as the worker does them. */
 export const engineHandlers: JobHandlers<EngineJobs> = {
 	analyse: ({ definition, strengthBasis, request }) => {
@@ -45,5 +65,6 @@ export const engineHandlers: JobHandlers<EngineJobs> = {
 		const bent = bending(section.value, path);
 		const states = await statesInBatches(stepsOf(bent, at), context);
 		return ok({ states, firstYield: bent.firstYield, plasticMoment: bent.plasticMoment });
-	}
+	},
+	unlock: (request, context) => searched(unlocking(request), context)
 };

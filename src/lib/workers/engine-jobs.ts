@@ -5,6 +5,7 @@ import type { AnalyseRequest } from '$lib/engine/rules/analyse';
 import type { Analysis } from '$lib/engine/rules/analysis';
 import type { StrengthBasis } from '$lib/engine/material/material';
 import type { SectionDefinition } from '$lib/engine/section/definition';
+import type { Unlocking, UnlockRequest } from '$lib/engine/unlock/unlock';
 import { jobsOver, type Jobs } from './jobs';
 
 interface About {
@@ -23,6 +24,8 @@ export type EngineJobs = {
 		payload: About & { path: BendingPath; at: Imposed };
 		value: Result<Response, Issue[]>;
 	};
+	/** Changes that unlock more; reports progress, may be cancelled; null when it was, or cannot be built. */
+	unlock: { payload: UnlockRequest; value: Unlocking | null };
 };
 
 let shared: Jobs<EngineJobs> | undefined;
