@@ -1,3 +1,4 @@
+import type { Note } from '../../../result';
 import type { AxisSense } from '../../section-moments';
 import type { EnModel } from '../model';
 import { effectiveFrom, reducedSection, type EffectiveSection } from './effective-section';
@@ -47,15 +48,25 @@ export function effectiveMoment(
 	const first = strengthOf(model, sense, once);
 	const rest = atRest === null || atRest === once ? first : strengthOf(model, sense, atRest);
 	explain(model, basis, once, first, use);
+	const effective = effectiveFrom(model, basis, reduced, use);
 	return {
 		value: first.value,
 		converged: rest.value,
 		governing: first.governing,
 		modulus: first.modulus,
 		asGross: first.asGross,
-		effective: effectiveFrom(model, basis, reduced, use)
+		effective: first.asGross
+			? { ...effective, notes: [...effective.notes, asGrossNote] }
+			: effective
 	};
 }
+
+const asGrossNote: Note = {
+	code: 'effective-moment-as-gross',
+	message:
+		'Reducing the compressed side brings the neutral axis nearer to the pulled side that governs; no more than the elastic moment of the gross section is counted.',
+	clause: 'EN 1993-1-5 4.4'
+};
 
 interface Strength extends Pick<EffectiveMoment, 'value' | 'governing' | 'modulus' | 'asGross'> {
 	readonly hybrid: HybridMoment | null;

@@ -50,7 +50,7 @@ export function effectiveFrom(
 		notes: [
 			...(atRest === null ? [notAtRest] : []),
 			...(use ? [stressLevelUsed] : []),
-			...(isSkew(section.gross.productYZ, figures) ? [noMomentAcross] : [])
+			...(isSkew(basis, figures) ? [noMomentAcross] : [])
 		]
 	};
 }
@@ -77,9 +77,11 @@ export function reducedSection(
 /** Product of inertia beyond rounding, as a share of Iy + Iz. */
 const leastProduct = 1e-9;
 
-function isSkew(gross: number, { productYZ, secondMomentY, secondMomentZ }: EffectiveProperties) {
-	const least = leastProduct * (secondMomentY + secondMomentZ);
-	return Math.abs(productYZ) > least && Math.abs(gross) <= least;
+function isSkew(
+	basis: EffectiveBasis,
+	{ productYZ, secondMomentY, secondMomentZ }: EffectiveProperties
+): boolean {
+	return basis !== 'N' && Math.abs(productYZ) > leastProduct * (secondMomentY + secondMomentZ);
 }
 
 const notAtRest: Note = {
@@ -99,6 +101,6 @@ const stressLevelUsed: Note = {
 const noMomentAcross: Note = {
 	code: 'effective-section-skew',
 	message:
-		'The effective section has no axis of symmetry left: its stresses are those of a moment about the asked axis alone, with no moment across it.',
+		'The effective section has no axis of symmetry: its stresses are those of a moment about the asked axis alone, with no moment across it.',
 	clause: 'EN 1993-1-5 4.4(3)'
 };
