@@ -9,6 +9,7 @@ import { mendedIssues } from '../plates/mends';
 import { placedPlates, type PlacedPlates } from '../plates/placing';
 import { placingIssues } from '../plates/placing-issues';
 import type { ShapeResult } from '../shape';
+import { platesTorsion } from '../torsion/plates';
 import { plateIssues } from './plate-fields';
 
 /** Free plates: rectangles placed and turned freely, joined where they touch. */
@@ -27,7 +28,7 @@ export function platesShape(definition: PlatesSection): ShapeResult {
 			...(plate.grade === undefined ? {} : { grade: plate.grade })
 		})),
 		contours: mergedLoops(arrangementOf(rings, placed.tolerance)),
-		torsion: { torsionConstant: null, warpingConstant: null, shearCentre: null },
+		torsion: platesTorsion(definition, placed),
 		oneThickness: false,
 		notes: definition.tied ? tiedNotes(placed) : []
 	});

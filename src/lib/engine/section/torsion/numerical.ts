@@ -10,6 +10,7 @@ import type { Note } from '../../result';
 import { contact } from '../../tolerances';
 import type { PreparedSection } from '../prepared';
 import type { TorsionFigures } from '../shape';
+import { mergedPlates } from './merged-plates';
 import { torsionBelow } from './stress-function';
 import { warpingFigures, warpingFunction } from './warping-function';
 
@@ -37,8 +38,8 @@ export type NumericalTorsionOutcome = NumericalTorsion | { readonly notes: reado
 const attempts = [
 	{ coarser: 1, mostPoints: 1200 },
 	{ coarser: 1.6, mostPoints: 1200 },
-	{ coarser: 2.6, mostPoints: 2000 },
-	{ coarser: 4, mostPoints: 6000 }
+	{ coarser: 2.6, mostPoints: 1600 },
+	{ coarser: 4, mostPoints: 2500 }
 ] as const;
 
 /**
@@ -49,6 +50,8 @@ const attempts = [
  */
 export function numericalTorsion(section: PreparedSection): NumericalTorsionOutcome {
 	const { contours, bounds, gross } = section;
+	const merged = mergedPlates(section.definition);
+	if (merged.unjoined) return { notes: merged.notes };
 	const scale = Math.hypot(bounds.right - bounds.left, bounds.top - bounds.bottom);
 	const frame = frameAt(gross.centroid, (gross.principalAngle * Math.PI) / 180);
 	const mesh = meshOf(cutLoops(placedLoops(contours, frame, scale), contact.ofSize));
@@ -68,7 +71,7 @@ export function numericalTorsion(section: PreparedSection): NumericalTorsionOutc
 			torsionShare: (above - below) / (above + below)
 		},
 		nodes: mesh.y.length,
-		notes: notesOf(section, whole)
+		notes: [...merged.notes, ...notesOf(section, whole)]
 	};
 }
 
