@@ -64,7 +64,7 @@ export function effectiveMoment(
 const asGrossNote: Note = {
 	code: 'effective-moment-as-gross',
 	message:
-		'Reducing the compressed side brings the neutral axis nearer to the pulled side that governs; no more than the elastic moment of the gross section is counted.',
+		'The section without its removed strips would give more than the whole one, because its neutral axis or its extreme fibre moves: no more than the elastic moment of the gross section is counted.',
 	clause: 'EN 1993-1-5 4.4'
 };
 
@@ -74,6 +74,7 @@ interface Strength extends Pick<EffectiveMoment, 'value' | 'governing' | 'modulu
 
 function strengthOf(model: EnModel, sense: AxisSense, reduced: Reduced): Strength {
 	const own = ownStrength(model, sense, reduced);
+	if (reduced.strips.length === 0) return own;
 	const gross = grossMoment(model, sense, own) / model.code.gammaM0;
 	return own.value <= gross ? own : { ...own, value: gross, asGross: true };
 }
@@ -92,10 +93,10 @@ function ownStrength(model: EnModel, sense: AxisSense, reduced: Reduced): Streng
 const isMajor = (sense: AxisSense): sense is MajorSense =>
 	sense === 'plusMy' || sense === 'minusMy';
 
-/** kNm, without γM0. Only where the pulled side governs can the reduced section give more. */
+/** kNm, without γM0. The axis of a hybrid girder moves away from its compressed flange: it gives less there. */
 function grossMoment(model: EnModel, sense: AxisSense, { governing, hybrid }: Strength): number {
-	if (governing === 'compression') return Infinity;
 	if (hybrid === null || !isMajor(sense)) return model.moments[sense].firstYield ?? Infinity;
+	if (governing === 'compression') return Infinity;
 	return hybridMoment(model, sense, wholeOf(model.section.gross)).moment * 1e-6;
 }
 
