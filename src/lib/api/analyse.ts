@@ -7,6 +7,7 @@ import { grossSchema } from './gross';
 import { limits } from './limits';
 import { stiffenersSchema } from './stiffeners';
 import { namesOneTarget, targetFields, targetMissing } from './target';
+import { torsionSchema } from './torsion';
 import { z } from './zod';
 
 export const analyseRequestSchema = z
@@ -16,6 +17,10 @@ export const analyseRequestSchema = z
 			code: codeSchema.optional(),
 			demand: demandSchema.optional(),
 			demands: listOf('demands', demandSchema, limits.demands).optional(),
+			numericalTorsion: z
+				.boolean({ error: must('numericalTorsion', 'true or false') })
+				.optional()
+				.meta({ description: 'Solve torsion numerically too; outlines and plates always are.' }),
 			stiffeners: stiffenersSchema.optional()
 		},
 		{ error: must('The request', 'an object with section or shapeId') }
@@ -81,18 +86,64 @@ const classificationSchema = z.object({
 	})
 });
 
+const point = z.object({ y: z.number(), z: z.number() });
+
+const removedSchema = z.object({
+	part: z.string(),
+	element: z.string(),
+	from: z.number().meta({
+		'x-unit': 'mm',
+		description:
+			'Along the plate from the origin: z of an upright plate, y of a level one, otherwise from the end of its element.'
+	}),
+	to: z.number().meta({ 'x-unit': 'mm' }),
+	corners: z.array(point).readonly()
+});
+
+const effectiveElementSchema = z.object({
+	element: z.string(),
+	part: z.string(),
+	psi: z.number(),
+	kSigma: z.number(),
+	slenderness: z.number(),
+	rho: z.number(),
+	width: z.number(),
+	compressedWidth: z.number(),
+	effective: z.number(),
+	edges: z.array(z.number()).readonly()
+});
+
 const effectiveFields = {
 	area: z.number(),
+	centroid: point,
 	secondMomentY: z.number(),
+	secondMomentZ: z.number(),
+	productYZ: z.number(),
 	elasticModulusYTop: z.number(),
 	elasticModulusYBottom: z.number(),
-	centroidShiftZ: z.number(),
-	removed: z.array(z.object({ part: z.string(), from: z.number(), to: z.number() }))
+	elasticModulusZLeft: z.number(),
+	elasticModulusZRight: z.number(),
+	centroidShiftY: z.number().meta({ 'x-unit': 'mm', description: 'Effective minus gross.' }),
+	centroidShiftZ: z.number().meta({ 'x-unit': 'mm', description: 'Effective minus gross.' }),
+	removed: z.array(removedSchema).readonly(),
+	elements: z.array(effectiveElementSchema).readonly()
 };
+
+const effectiveCase = z.object({ ...effectiveFields, converged: z.object(effectiveFields) });
+
 const effectiveSchema = z.object({
 	basis: z.enum(['+My', '−My', 'Mz', 'N']),
 	...effectiveFields,
-	converged: z.object(effectiveFields)
+	converged: z.object(effectiveFields),
+	byCase: z
+		.object({
+			'+My': effectiveCase.optional(),
+			'−My': effectiveCase.optional(),
+			'+Mz': effectiveCase.optional(),
+			'−Mz': effectiveCase.optional(),
+			N: effectiveCase.optional()
+		})
+		.meta({ description: 'Every pure case that is class 4.' })
 });
 
 const checkSchema = z.object({
@@ -124,6 +175,48 @@ const resistanceSchema = z.object({
 		.object({ governing: z.string(), value: z.number() })
 		.nullable()
 		.meta({ description: 'Null when a check that applies is missing.' })
+});
+
+const limitedBy = z.enum([
+	'section',
+	'shear',
+	'web-shear',
+	'lateral-torsional',
+	'flange-induced-buckling'
+]);
+
+const reducedSchema = z.object({
+	MyVRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	MzVRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	MyNRd: z.number().optional().meta({ 'x-unit': 'kNm', description: 'By the code’s formula.' }),
+	MyNRdExact: z.number().optional().meta({
+		'x-unit': 'kNm',
+		description: 'The exact plastic block under the same N.'
+	}),
+	MzNRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	MzNRdExact: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	MNRd: z.number().optional().meta({
+		'x-unit': 'kNm',
+		description: 'Plastic block along the moment’s own direction beside N.'
+	}),
+	MNVRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	NVRd: z.number().optional().meta({ 'x-unit': 'kN' }),
+	alpha: z.number().optional(),
+	beta: z.number().optional(),
+	deltaMy: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	deltaMz: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	MbRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	Mcr: z.number().optional().meta({ 'x-unit': 'kNm' }),
+	lambdaLT: z.number().optional(),
+	chiLT: z.number().optional(),
+	VbRd: z.number().optional().meta({ 'x-unit': 'kN' })
+});
+
+const elasticSchema = z.object({
+	value: z.number().meta({ description: '(σ/fyd)² + 3(τ/fyd)², for information' }),
+	part: z.string(),
+	sigma: z.number().meta({ 'x-unit': 'N/mm²' }),
+	tau: z.number().meta({ 'x-unit': 'N/mm²' })
 });
 
 const rulerFields = {
@@ -171,11 +264,43 @@ const demandStateSchema = z.object({
 	moment: z.number().meta({ 'x-unit': 'kNm' }),
 	countableBasis: resistanceBasis.nullable(),
 	countableForce: figure('kN').meta({ 'x-unit': 'kN', description: 'A size; where N acts alone.' }),
+	limitedBy: limitedBy.nullable(),
+	together: z.enum(['alone', 'sum', 'curve', 'fibre']).nullable(),
+	besideShear: z.boolean(),
+	reduced: reducedSchema.meta({ description: 'Resistances beside this demand’s own N and V.' }),
+	elastic: elasticSchema.nullable(),
 	withheld: z
 		.array(z.string())
 		.meta({ description: 'Codes of the missing checks for which nothing is counted.' }),
 	utilisation: figure(''),
 	missing: z.array(noteSchema).meta({ description: 'Checks that apply and are not built.' })
+});
+
+const workingSchema = z.object({
+	title: z.string(),
+	clause: z.string(),
+	edition: z.string(),
+	formula: z.string(),
+	inputs: z
+		.array(
+			z.object({
+				symbol: z.string(),
+				value: z.number(),
+				unit: z.string(),
+				from: z.string().optional()
+			})
+		)
+		.readonly(),
+	result: z.object({ value: z.number(), unit: z.string() }),
+	notes: z.array(z.string()).readonly().optional()
+});
+
+/** `?explain=1` asks for the workings. */
+export const analyseQuerySchema = z.object({
+	explain: z
+		.enum(['0', '1'])
+		.optional()
+		.meta({ description: '1: the answer carries `explain`, how each figure came about.' })
 });
 
 /** The code and its choices, defaults filled in. */
@@ -187,7 +312,9 @@ const codeChosen = z.object({
 	eta: z.number(),
 	method: z.enum(['LRFD', 'ASD']),
 	classAlpha: z.enum(['actual-N', 'proportional']),
-	allowEffectiveClass2: z.boolean()
+	allowEffectiveClass2: z.boolean(),
+	useStressLevel: z.boolean(),
+	ltbCurves: z.enum(['general', 'rolled-or-equivalent'])
 });
 
 export const analyseAnswerSchema = z
@@ -195,6 +322,7 @@ export const analyseAnswerSchema = z
 		...envelopeFields,
 		code: codeChosen,
 		gross: grossSchema,
+		torsion: torsionSchema,
 		moment: momentSchema,
 		squashLoad: figure('kN'),
 		classification: classificationSchema.nullable(),
@@ -203,6 +331,10 @@ export const analyseAnswerSchema = z
 		demands: z
 			.array(demandStateSchema)
 			.meta({ description: 'One for each demand, in their order.' }),
+		explain: z
+			.record(z.string(), workingSchema)
+			.optional()
+			.meta({ description: 'With ?explain=1: how each figure came about, by its place.' }),
 		verdict: verdictSchema.nullable().meta({ description: 'The same in plain words.' })
 	})
 	.meta({ id: 'AnalyseAnswer' });

@@ -1,3 +1,5 @@
+import { grossWorkings } from '../explain/gross-workings';
+import { momentWorkings } from '../explain/moment-workings';
 import { Workings } from '../explain/working';
 import { mechanicsOf } from '../response/law-groups';
 import { squashLoad } from '../response/plastic';
@@ -13,7 +15,7 @@ import { en1993Outcome, type EnOutcome } from './en1993/rules';
 import { strengthIssues, strengthsOf, type Strengths } from './en1993/strengths';
 import { codeNotBuilt } from './not-built';
 import type { CodeChoice, Demand, Stiffeners } from './result';
-import { momentFigures, sectionMoments } from './section-moments';
+import { momentFigures, resistingMoments, sectionMoments } from './section-moments';
 import { verdict } from './verdict';
 
 export type { Analysis } from './analysis';
@@ -36,7 +38,16 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 	const stiffeners = request.stiffeners ?? null;
 	const outcome = judged(section, code, strengths, (elements) =>
 		en1993Outcome(
-			{ section, mechanics, moments, strengths, elements, code, stiffeners, workings },
+			{
+				section,
+				mechanics,
+				moments: resistingMoments(mechanics, section, moments),
+				strengths,
+				elements,
+				code,
+				stiffeners,
+				workings
+			},
 			request.demands ?? []
 		)
 	);
@@ -47,16 +58,23 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 		moment: momentFigures(section, moments),
 		squashLoad: strengths.even ? mechanics.squash * 1e-3 : squashLoad(section),
 		classification: outcome.classification,
-		effective: null,
+		effective: outcome.effective,
 		resistance: outcome.resistance,
 		demands: outcome.demands,
 		notes: distinct([...section.notes, ...outcome.notes])
 	};
 	const answer = { ...figures, verdict: verdict(figures) };
+	if (workings) {
+		grossWorkings(workings, section);
+		momentWorkings(workings, section, figures.moment, figures.squashLoad);
+	}
 	return workings === null ? answer : { ...answer, explain: workings.explanation() };
 }
 
-type Outcome = Pick<AnalysisFigures, 'classification' | 'resistance' | 'demands' | 'notes'>;
+type Outcome = Pick<
+	AnalysisFigures,
+	'classification' | 'effective' | 'resistance' | 'demands' | 'notes'
+>;
 
 /** The code's outcome, or nulls with the reason where its rules do not reach. */
 function judged(
@@ -67,6 +85,7 @@ function judged(
 ): Outcome {
 	const none = (notes: Note[]): Outcome => ({
 		classification: null,
+		effective: null,
 		resistance: null,
 		demands: [],
 		notes

@@ -2,6 +2,7 @@ import type { Explanation } from '../explain/working';
 import type { StrengthBasis } from '../material/material';
 import type { Note } from '../result';
 import type { GrossProperties } from '../section/prepared';
+import type { EffectiveAnswer } from './effective-answer';
 import type { Classification, CodeChoice, DemandState, Resistance } from './result';
 import type { MomentFigures } from './section-moments';
 import type { Verdict } from './verdict';
@@ -16,7 +17,8 @@ export interface AnalysisFigures {
 	/** kN */
 	squashLoad: number;
 	classification: Classification | null;
-	effective: null;
+	/** Of the case that the classification stands on; null where nothing is class 4. */
+	effective: EffectiveAnswer | null;
 	resistance: Resistance | null;
 	/** One for each demand, in their order; empty where no rule covers the section. */
 	demands: DemandState[];

@@ -91,9 +91,58 @@ export interface Resistance {
 	NtRd: number | null;
 	VyRd: number | null;
 	VzRd: number | null;
+	/** Of the demand that is answered for: the one that uses most, or misses a check. */
+	VbRd?: number;
+	MbRd?: number;
+	MyVRd?: number;
+	MyNRd?: number;
+	MzNRd?: number;
 	checks: ResistanceCheck[];
 	/** Null when a check that applies is missing. */
 	utilisation: { governing: string; value: number } | null;
+}
+
+/** Resistances beside a demand's own N and V; kN, kNm, mm. What does not apply is absent. */
+export interface ReducedFigures {
+	MyVRd?: number;
+	MzVRd?: number;
+	/** Beside N by the code, and of the exact plastic block. */
+	MyNRd?: number;
+	MyNRdExact?: number;
+	MzNRd?: number;
+	MzNRdExact?: number;
+	/** Of the plastic block along the demand's own direction beside N. */
+	MNRd?: number;
+	/** Beside N and high shear. */
+	MNVRd?: number;
+	NVRd?: number;
+	/** Exponents of the biaxial curve. */
+	alpha?: number;
+	beta?: number;
+	/** Moments that N adds about a shifted effective centroid. */
+	deltaMy?: number;
+	deltaMz?: number;
+	/** Lateral–torsional buckling. */
+	MbRd?: number;
+	Mcr?: number;
+	lambdaLT?: number;
+	chiLT?: number;
+	/** Shear buckling along z with the flanges' share. */
+	VbRd?: number;
+}
+
+/** What the countable moment ends at. */
+export type LimitedBy =
+	'section' | 'shear' | 'web-shear' | 'lateral-torsional' | 'flange-induced-buckling';
+
+/** Elastic check by von Mises, 6.2.1(5): for information. */
+export interface ElasticUse {
+	/** √((σ/fyd)² + 3(τ/fyd)²) squared, as the code writes it: at most 1. */
+	readonly value: number;
+	readonly part: string;
+	/** N/mm² */
+	readonly sigma: number;
+	readonly tau: number;
 }
 
 /** One demand with its class and its place on the ruler of its own moment, N held; kNm. */
@@ -116,6 +165,14 @@ export interface DemandState {
 	countableForce: number | null;
 	/** Codes of the missing checks for which nothing is counted. */
 	withheld: string[];
+	limitedBy: LimitedBy | null;
+	/** How N and moments were put together: one alone, a sum, a curve or block, or fibre stresses. */
+	together: 'alone' | 'sum' | 'curve' | 'fibre' | null;
+	/** Shear acts and lowers the moment. */
+	besideShear: boolean;
+	reduced: ReducedFigures;
+	/** Null where the shear stress has no formula. */
+	elastic: ElasticUse | null;
 	/** Under the demand's N, without γM0. */
 	firstYield: number | null;
 	fullPlastic: number | null;

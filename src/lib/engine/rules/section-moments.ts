@@ -53,6 +53,47 @@ export function sectionMoments(mechanics: Mechanics, even: boolean): SectionMome
 	};
 }
 
+/**
+ * The same limits as a resistance takes them: a moment about one axis with no moment across it. A
+ * section that bends straight keeps its figures; an angle turns its neutral axis and bears less.
+ */
+export function resistingMoments(
+	mechanics: Mechanics,
+	{ gross }: PreparedSection,
+	moments: SectionMoments
+): SectionMoments {
+	const straight = bendsStraight(gross);
+	const own = (sense: AxisSense): BendingLimits => {
+		const limits = moments[sense];
+		if (straight && leavesNoMomentAcross(limits)) return limits;
+		const { axisAngle } = limits;
+		const path = { axisAngle, transverse: 'moment-zero', N: 0 } as const;
+		return {
+			axisAngle,
+			plastic: plasticMomentOf(mechanics, path),
+			firstYield: firstYieldOf(mechanics, path).moment
+		};
+	};
+	return {
+		plusMy: own('plusMy'),
+		minusMy: own('minusMy'),
+		plusMz: own('plusMz'),
+		minusMz: own('minusMz')
+	};
+}
+
+/** Share of a moment below which the moment across it is rounding. */
+const nothingAcross = 1e-9;
+
+const bendsStraight = ({ secondMomentY, secondMomentZ, productYZ }: PreparedSection['gross']) =>
+	Math.abs(productYZ) <= nothingAcross * Math.min(secondMomentY, secondMomentZ);
+
+function leavesNoMomentAcross({ axisAngle, plastic: { My, Mz } }: BendingLimits): boolean {
+	if (My === null || Mz === null) return true;
+	const [along, across] = axisAngle % 180 === 0 ? [My, Mz] : [Mz, My];
+	return Math.abs(across) <= nothingAcross * Math.abs(along);
+}
+
 export function momentFigures(
 	{ gross: { centroid } }: PreparedSection,
 	{ plusMy, minusMy, plusMz, minusMz }: SectionMoments

@@ -3,12 +3,10 @@ const uncheckedWords: Readonly<Record<string, string>> = {
 	'member-buckling-not-checked': 'member buckling',
 	'shear-buckling-not-built': 'shear buckling',
 	'shear-not-checked': 'shear buckling',
-	'm-v-not-built': 'bending with high shear',
-	'flange-induced-buckling-not-checked': 'flange-induced buckling',
 	'net-section-not-checked': 'net section at bolt holes',
-	'tension-flange-holes-not-built': 'bolt holes in bending',
-	'resistance-missing': 'bolt holes in tension',
-	'class-4-not-built': 'effective widths',
+	'resistance-missing': 'bolt holes',
+	'shear-lag': 'shear lag',
+	'class-4-not-built': 'class 4 of this shape',
 	'class-not-built': 'class and resistance',
 	'code-not-built': 'class and resistance'
 };

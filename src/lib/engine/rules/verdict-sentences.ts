@@ -14,7 +14,7 @@ export function countSentence(view: VerdictView): VerdictToken[] {
 	if (view.axial) return forceSentence(view);
 	const { countable } = view.ruler;
 	if (countable === null) return [words(nothingCounted(view, `Class ${view.class}`, 'No moment'))];
-	if (countable === 0) return [words(`Class ${view.class}. N leaves no moment to count.`)];
+	if (countable === 0) return [words(`Class ${view.class}. ${nothingLeft(view)}`)];
 	const head =
 		view.basis === 'effective-class-2' ? 'Class 3, web as Class 2' : `Class ${view.class}`;
 	return [words(`${head}. Count `), moment(countable), ...countedAs(view)];
@@ -29,23 +29,67 @@ function forceSentence(view: VerdictView): VerdictToken[] {
 
 function nothingCounted(view: VerdictView, head: string, what: string): string {
 	const { withheld } = view;
-	if (view.class === 4 || withheld.length === 0) return `${head}. Nothing may be counted yet.`;
+	if (withheld.length === 0) return `${head}. Nothing may be counted yet.`;
 	const all = [withheld.slice(0, -1).join(', '), withheld.at(-1)].filter(Boolean).join(' and ');
 	const are = withheld.length > 1 || all.startsWith('bolt holes') ? 'are' : 'is';
 	return `${head}. ${what} may be counted: ${all} ${are} not checked.`;
 }
 
-function countedAs({ N, biaxial, basis, gammaM0 }: VerdictView): VerdictToken[] {
+/** Why a moment of zero is all that passes. */
+function nothingLeft({ limitedBy }: VerdictView): string {
+	switch (limitedBy) {
+		case 'flange-induced-buckling':
+			return 'Nothing may be counted: the compression flange may buckle into the web.';
+		case 'shear':
+			return 'No moment may be counted: the shear is more than the section resists.';
+		default:
+			return 'N leaves no moment to count.';
+	}
+}
+
+function countedAs(view: VerdictView): VerdictToken[] {
+	const { N, biaxial, besideShear, limitedBy, gammaM0 } = view;
 	const over = gammaM0 === 1 ? '' : ` over γM0 ${gammaM0.toFixed(2)}`;
-	if (N !== 0) return [words(' beside '), force(N), words(', by the linear sum.')];
-	if (biaxial) return [words(' about this axis, by the linear sum.')];
+	const beside =
+		N === 0
+			? [words(besideShear ? ' beside the shear' : '')]
+			: [words(' beside '), force(N), words(besideShear ? ' and the shear' : '')];
+	const about = biaxial && N === 0 ? ' about this axis' : '';
+	return [...beside, words(`${about}${limitWords(limitedBy) ?? countedBy(view, over)}.`)].filter(
+		(token) => !('text' in token) || token.text !== ''
+	);
+}
+
+function limitWords(limitedBy: VerdictView['limitedBy']): string | null {
+	switch (limitedBy) {
+		case 'lateral-torsional':
+			return ', limited by lateral–torsional buckling';
+		case 'web-shear':
+			return ', limited by the web that buckles in shear';
+		case 'shear':
+			return ', limited by the shear that the flanges help to carry';
+		default:
+			return null;
+	}
+}
+
+function countedBy({ N, biaxial, together, besideShear, basis, gammaM0 }: VerdictView, over: string): string {
+	if (N !== 0 || biaxial) {
+		if (together === 'fibre') return ', up to first yield';
+		return together === 'sum' ? ', by the linear sum' : ', by the plastic interaction';
+	}
+	if (besideShear) return '';
 	switch (basis) {
 		case 'plastic':
-			return [words(`, the full plastic block${over}.`)];
+			return `, the full plastic block${over}`;
 		case 'effective-class-2':
-			return [words(`, the plastic block of the effective section${over}.`)];
+			return `, the plastic block of the effective section${over}`;
+		case 'effective':
+			return `, on the effective section${over}`;
+		case 'interpolated':
+			return `, between first yield and the full block${over}`;
 		default:
-			return [words(gammaM0 === 1 ? ', up to first yield.' : `, first yield${over}.`)];
+			return gammaM0 === 1 ? ', up to first yield' : `, first yield${over}`;
 	}
 }
 
@@ -80,9 +124,9 @@ function decidingPart({ class: overall, element }: VerdictView): VerdictToken[] 
 	];
 }
 
-function beyond({ N, biaxial, axial, basis, gammaM0, ruler }: VerdictView): VerdictToken[] {
-	if (axial) return [];
-	const { firstYield, fullPlastic, countable } = ruler;
+function beyond(view: VerdictView): VerdictToken[] {
+	if (view.axial) return [];
+	const { firstYield, fullPlastic, countable } = view.ruler;
 	if (firstYield === null || fullPlastic === null) return [];
 	if (countable === null)
 		return [
@@ -90,15 +134,21 @@ function beyond({ N, biaxial, axial, basis, gammaM0, ruler }: VerdictView): Verd
 			moment(firstYield),
 			words(' at first yield nor anything beyond is to be counted.')
 		];
-	const reserve = fullPlastic - firstYield;
-	if (N !== 0 || biaxial || gammaM0 !== 1 || basis === 'effective-class-2') {
+	if (!isPlain(view)) {
 		const left = fullPlastic - countable;
 		return left > 0
 			? [words(' The last '), moment(left), words(' of the full block are not to be counted.')]
 			: [];
 	}
-	const may = basis === 'plastic' ? 'may be counted' : 'are not to be counted';
-	return [words(' The '), moment(reserve), words(` beyond first yield ${may}.`)];
+	const may = view.basis === 'plastic' ? 'may be counted' : 'are not to be counted';
+	return [words(' The '), moment(fullPlastic - firstYield), words(` beyond first yield ${may}.`)];
+}
+
+/** Whether what counts ends just at first yield or at the full block. */
+function isPlain({ N, biaxial, besideShear, limitedBy, basis, gammaM0 }: VerdictView): boolean {
+	if (N !== 0 || biaxial || besideShear || gammaM0 !== 1) return false;
+	if (limitedBy !== null && limitedBy !== 'section') return false;
+	return basis === 'plastic' || basis === 'elastic';
 }
 
 function partWords({ part }: ClassifiedElement): string {

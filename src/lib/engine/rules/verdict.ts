@@ -55,6 +55,10 @@ export interface VerdictView {
 	axial: boolean;
 	/** kN, a size, of N alone. */
 	countableForce: number | null;
+	/** How N and moments were put together; null without a demand. */
+	together: DemandState['together'];
+	besideShear: boolean;
+	limitedBy: DemandState['limitedBy'];
 	/** Checks, in words, for want of which nothing is counted. */
 	withheld: readonly string[];
 	basis: Resistance['basis'] | null;
@@ -110,6 +114,9 @@ function demandView(state: DemandState, { gammaM0 }: CodeChoice): VerdictView {
 		biaxial: axisAngle % 90 !== 0,
 		axial: state.N !== 0 && demand === 0,
 		countableForce: state.countableForce,
+		together: state.together,
+		besideShear: state.besideShear,
+		limitedBy: state.limitedBy,
 		withheld: uncheckedNames(state.withheld),
 		basis: state.countableBasis,
 		gammaM0,
@@ -128,12 +135,19 @@ function plainView(figures: AnalysisFigures): VerdictView | null {
 		biaxial: false,
 		axial: false,
 		countableForce: null,
+		together: null,
+		besideShear: false,
+		limitedBy: plainCountable(figures, 1) === 0 ? 'flange-induced-buckling' : null,
 		withheld: [],
-		basis: resistance.MyRd === null ? null : resistance.basis,
+		basis: plainCountable(figures, resistance.MyRd) === null ? null : resistance.basis,
 		gammaM0: figures.code.gammaM0,
-		ruler: { ...bareRuler(figures), countable: resistance.MyRd }
+		ruler: { ...bareRuler(figures), countable: plainCountable(figures, resistance.MyRd) }
 	};
 }
+
+/** A girder whose flange may buckle into the web counts nothing. */
+const plainCountable = ({ notes }: AnalysisFigures, MyRd: number | null): number | null =>
+	notes.some(({ code }) => code === 'flange-induced-buckling') ? 0 : MyRd;
 
 const governingElement = (
 	elements: readonly ClassifiedElement[],
@@ -165,7 +179,7 @@ function statusOf(figures: AnalysisFigures, named: DemandState | undefined): Ver
 const isMemberCheck = ({ code }: Note): boolean =>
 	code === 'ltb-not-checked' || code === 'member-buckling-not-checked';
 
-/** Effective widths are missed only where the section stands in class 4. */
+/** A missing class 4 matters only where the section stands in it. */
 function notChecked({ notes }: AnalysisFigures, standing: SectionClass | null): string[] {
 	const codes = notes.map(({ code }) => code);
 	return uncheckedNames(codes.filter((code) => code !== 'class-4-not-built' || standing === 4));

@@ -1,26 +1,64 @@
-import { regionMoments } from '../../geometry/moments';
+import type { Working } from '../../explain/working';
+import type { ClassifiedCase } from './classify';
+import { holedParts, netSection } from './bolt-holes';
+import { axialStrength } from './axial-strength';
+import { compressionWorking, tensionWorking } from './axial-workings';
+import { effectiveAxial, type EffectiveAxial } from './effective/effective-axial';
+import type { EffectiveSection } from './effective/effective-section';
 import type { EnModel } from './model';
 
-/**
- * Yield resistance of the whole section under N at the gross centroid, kN, without γM0: every part
- * at its own strength where the resultant of those forces lies at that centroid, otherwise (and
- * where parts may not yield beyond their own strain: `plastic` false) the weakest strength everywhere.
- */
-export function axialStrength(model: EnModel, plastic: boolean): number {
-	const { mechanics, strengths, section } = model;
-	if (!strengths.hybrid) return section.gross.area * strengths.least * 1e-3;
-	const together = plastic && isCentred(model);
-	return (together ? mechanics.squash : section.gross.area * strengths.least) * 1e-3;
+/** kN, design; null where none may be counted. */
+export interface AxialResistance {
+	readonly value: number | null;
+	readonly effective: EffectiveSection | null;
+	/** Effective minus gross centroid, mm: N at the gross centroid then bends the section. */
+	readonly shiftY: number;
+	readonly shiftZ: number;
+	readonly gap: 'holes' | 'slender' | null;
+	readonly working: (() => Working) | null;
 }
 
-/** The plastic forces of a hybrid balance about its gross centroid. */
-function isCentred({ section, mechanics }: EnModel): boolean {
-	let [aboutY, aboutZ] = [0, 0];
-	for (const { region, material } of section.parts) {
-		const { firstY, firstZ } = regionMoments(region, section.gross.centroid);
-		const strength = Math.min(material.fy, material.fyc);
-		aboutY += strength * firstY;
-		aboutZ += strength * firstZ;
+const plain = { effective: null, shiftY: 0, shiftZ: 0, gap: null, working: null };
+
+/** Resistance to N of that sign for a section of that class: 6.2.3 in tension, 6.2.4 in compression. */
+export const axialResistance = (
+	model: EnModel,
+	N: number,
+	classified: ClassifiedCase,
+	slender?: () => EffectiveAxial | null
+): AxialResistance =>
+	N > 0 ? tensionResistance(model) : compressionResistance(model, classified, slender);
+
+/** Compression 6.2.4: A fy/γM0, class 4 Aeff fy/γM0; holes filled by fasteners are not deducted. */
+export function compressionResistance(
+	model: EnModel,
+	{ overall }: ClassifiedCase,
+	slender: () => EffectiveAxial | null = () => effectiveAxial(model)
+): AxialResistance {
+	if (overall < 4) {
+		const value = axialStrength(model, overall <= 2) / model.code.gammaM0;
+		return { ...plain, value, working: () => compressionWorking(model, overall <= 2, value) };
 	}
-	return Math.hypot(aboutY, aboutZ) <= 1e-9 * mechanics.squash * mechanics.reach;
+	const found = slender();
+	if (found === null) return { ...plain, value: null, gap: 'slender' };
+	const { value, shiftY, shiftZ, effective } = found;
+	return {
+		value,
+		effective,
+		shiftY,
+		shiftZ,
+		gap: null,
+		working: () => compressionWorking(model, false, value, effective)
+	};
+}
+
+/** Tension 6.2.3: the lesser of A fy/γM0 and, with bolt holes, 0.9 Anet fu/γM2. */
+export function tensionResistance(model: EnModel): AxialResistance {
+	const gross = axialStrength(model, true) / model.code.gammaM0;
+	if (holedParts(model.section).length === 0)
+		return { ...plain, value: gross, working: () => tensionWorking(model, null, gross) };
+	const net = netSection(model);
+	if (net === null) return { ...plain, value: null, gap: 'holes' };
+	const value = Math.min(gross, net.value);
+	return { ...plain, value, working: () => tensionWorking(model, net, value) };
 }

@@ -1,89 +1,83 @@
 import type { Note } from '../../result';
-import type { Demand, Resistance } from '../result';
+import type { AxisSense } from '../section-moments';
+import type { BendingResistance } from './bending-resistance';
+import { clauseOf } from './edition';
+import type { JudgedDemand } from './judged-demand';
 import { lawNotes } from './law-cover';
-import type { EnModel, PureCases, PureClasses } from './model';
+import type { EnModel, PureCases } from './model';
 
-const caseWords: Readonly<Record<keyof PureClasses, string>> = {
-	plusMy: 'bending with the bottom in tension',
-	minusMy: 'bending with the top in tension',
-	plusMz: 'bending with the right in tension',
-	minusMz: 'bending with the left in tension',
-	compression: 'pure compression'
-};
+type Bent = Readonly<Record<AxisSense, BendingResistance>>;
 
-/** Which pure cases are class 4, for which effective widths would be needed. */
-export function classFourNotes(classes: PureClasses): Note[] {
-	const slender = (Object.keys(caseWords) as (keyof PureClasses)[]).filter(
-		(name) => classes[name] === 4
-	);
-	if (slender.length === 0) return [];
-	const list = slender.map((name) => caseWords[name]).join(', ');
-	return [
-		{
-			code: 'class-4-not-built',
-			message: `The section is class 4 in ${list}. Effective widths are not built yet, so it has no resistance there.`,
-			clause: 'EN 1993-1-5 4.4'
-		}
-	];
-}
-
-/** How class 3 and hybrid figures were taken. */
+/** How class 3, class 4 and hybrid figures were taken. */
 export function strengthNotes(
 	model: EnModel,
 	cases: PureCases,
-	{ basis, webRefused }: { basis: Resistance['basis']; webRefused: boolean }
+	bent: Bent,
+	judged: readonly JudgedDemand[]
 ): Note[] {
-	const notes: Note[] = lawNotes(model.section.parts, model.code.standard);
-	const bent = [cases.plusMy, cases.minusMy, cases.plusMz, cases.minusMz];
-	if (basis === 'effective-class-2')
+	const { standard } = model.code;
+	const notes: Note[] = lawNotes(model.section.parts, standard);
+	const bases = [
+		...Object.values(bent).map(({ basis, value }) => (value === null ? null : basis)),
+		...judged.map(({ state }) => state.countableBasis)
+	];
+	if (bases.includes('effective-class-2'))
 		notes.push({
 			code: 'effective-class-2',
 			message:
 				'The class 3 web is taken as an effective class 2 web: only 20 εtw beside the compression flange and beside the plastic neutral axis is counted of its compressed part.',
-			clause: 'EN 1993-1-1:2005 6.2.2.4'
+			clause: clauseOf(standard, 'effectiveClassTwo')
 		});
-	if (webRefused) notes.push(webNotTaken(model));
-	if (model.strengths.hybrid && bent.some(({ overall }) => overall === 3))
+	if (bases.includes('interpolated'))
+		notes.push({
+			code: 'interpolated-modulus',
+			message:
+				'A class 3 moment is interpolated between the elastic and the plastic modulus by the slenderness of its parts.',
+			clause: clauseOf(standard, 'interpolated')
+		});
+	if (Object.values(bent).some(({ effective }) => effective !== null))
+		notes.push({
+			code: 'effective-section',
+			message:
+				'Class 4: the moment is of the effective section found in one pass (flange from the gross section, then the web), as the code’s examples do; the converged section is given beside it. Longitudinal stiffeners are not covered.',
+			clause: 'EN 1993-1-5 4.4(3)'
+		});
+	if (model.elements.kind === 'tube' && Object.values(cases).some(({ overall }) => overall === 4))
+		notes.push({
+			code: 'class-4-not-built',
+			message:
+				'The round tube is class 4 in some case: it is a shell for EN 1993-1-6, which is not built, so it has no resistance there.',
+			clause: 'EN 1993-1-6'
+		});
+	if (bent.plusMy.webRefused || bent.minusMy.webRefused) notes.push(webNotTaken(model));
+	return [...notes, ...hybridNotes(model, cases)];
+}
+
+function webNotTaken({ code }: EnModel): Note {
+	return {
+		code: 'effective-class-2-not-used',
+		message:
+			'The class 3 web is not taken as an effective class 2 web: the plastic neutral axis of that section would not lie in the clear web. First yield counts, which is on the safe side.',
+		clause: clauseOf(code.standard, 'effectiveClassTwo')
+	};
+}
+
+function hybridNotes({ strengths, code }: EnModel, cases: PureCases): Note[] {
+	if (!strengths.hybrid) return [];
+	const bent = [cases.plusMy, cases.minusMy, cases.plusMz, cases.minusMz];
+	const notes: Note[] = [];
+	if (bent.some(({ overall }) => overall === 3))
 		notes.push({
 			code: 'hybrid-first-yield',
 			message:
 				'Parts of different strength: class 3 moments end where the first fibre of any part yields, which is on the safe side.',
 			clause: 'EN 1993-1-5 4.3(6)'
 		});
-	if (model.strengths.hybrid)
-		notes.push({
-			code: 'axial-at-centroid',
-			message:
-				'N acts at the gross centroid. Where parts of different strength do not balance about it, or the section is class 3, axial resistances take the weakest strength.',
-			clause: 'EN 1993-1-1:2005 6.2.4'
-		});
+	notes.push({
+		code: 'axial-at-centroid',
+		message:
+			'N acts at the gross centroid. Where parts of different strength do not balance about it, or the section is class 3 or 4, axial resistances take the weakest strength.',
+		clause: clauseOf(code.standard, 'compression')
+	});
 	return notes;
-}
-
-function webNotTaken({ section: { definition } }: EnModel): Note {
-	const why =
-		definition.kind === 'rectangular-hollow'
-			? 'that is not built for rectangular hollow sections'
-			: 'the plastic neutral axis of that section would not lie in the clear web';
-	return {
-		code: 'effective-class-2-not-used',
-		message: `The class 3 web is not taken as an effective class 2 web: ${why}. First yield counts, which is on the safe side.`,
-		clause: 'EN 1993-1-1:2005 6.2.2.4'
-	};
-}
-
-/** Several effects together are checked by the linear sum only. */
-export function interactionNotes(demands: readonly Demand[]): Note[] {
-	const together = demands.some(
-		({ N, My, Mz }) => [N, My, Mz].filter((effect) => (effect ?? 0) !== 0).length > 1
-	);
-	if (!together) return [];
-	return [
-		{
-			code: 'linear-sum-only',
-			message:
-				'Axial force and moments that act together are checked by the linear sum only, which is on the safe side.',
-			clause: 'EN 1993-1-1:2005 6.2.1(7)'
-		}
-	];
 }

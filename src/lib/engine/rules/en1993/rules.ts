@@ -1,113 +1,82 @@
+import { workingKey } from '../../explain/keys';
 import type { Note } from '../../result';
-import type { Classification, Demand, DemandState, Resistance, ResistanceCheck } from '../result';
+import { effectiveAnswer, type EffectiveAnswer } from '../effective-answer';
+import type { Classification, Demand, DemandState, Resistance } from '../result';
 import type { AxisSense } from '../section-moments';
-import { axialStrength } from './axial-resistance';
-import { bendingResistance, type BendingResistance } from './bending-resistance';
-import { holedParts, holeNotes, holesInTension } from './bolt-holes';
+import { compressionResistance, tensionResistance } from './axial-resistance';
+import type { BendingResistance } from './bending-resistance';
+import { holeNotes } from './bolt-holes';
 import { classNotes } from './class-notes';
-import type { ClassifiedCase } from './classify';
-import { demandChecks } from './demand-checks';
-import { classifyDemand, effectsOf, type DemandClass } from './demand-class';
+import { effectsOf, type DemandClass } from './demand-class';
 import { demandNames } from './demand-names';
-import { demandRuler } from './demand-state';
-import { flangeInducedBuckling } from './flange-induced-buckling';
+import type { EffectiveSection } from './effective/effective-section';
+import { contextOf, type EnContext } from './en-context';
+import { flangeNotes } from './flange-checks';
+import { greatest, judgeDemand, type JudgedDemand } from './judged-demand';
 import { isUnbent, stabilityNotes } from './member-stability';
 import { pureCases, pureClasses, type EnModel, type PureCases } from './model';
 import { withoutNegligible } from './negligible-effects';
-import { classFourNotes, interactionNotes, strengthNotes } from './notes';
-import { shearResistances } from './shear-resistance';
+import { strengthNotes } from './notes';
+import { shearLagNotes } from './shear-lag';
+import { shearResistances, type ShearResistances } from './shear-resistance';
 
-/** Class, resistances and demands by EN 1993-1-1:2005, with what is missing. */
+/** Class, resistances and demands by EN 1993-1-1, with what is missing. */
 export interface EnOutcome {
 	readonly classification: Classification;
+	readonly effective: EffectiveAnswer | null;
 	readonly resistance: Resistance;
 	readonly demands: DemandState[];
 	readonly notes: Note[];
 }
 
-interface Judged {
-	readonly state: DemandState;
-	readonly classed: DemandClass;
-	readonly checks: ResistanceCheck[];
-}
+type Bent = Readonly<Record<AxisSense, BendingResistance>>;
 
 /** All that the code says of a section and its demands. */
 export function en1993Outcome(model: EnModel, asked: readonly Demand[]): EnOutcome {
 	const cases = pureCases(model);
+	const context = contextOf(model, cases);
 	const tubeHolds = model.elements.kind !== 'tube' || cases.compression.overall < 4;
 	const shear = shearResistances(model, tubeHolds);
 	const names = demandNames(asked);
 	const demands = asked.map((demand) => withoutNegligible(model, demand));
-	const judged = demands.map((demand, i) => judgeDemand(model, cases, demand, names[i]!, shear));
+	const judged = demands.map((demand, i) =>
+		judgeDemand(context, demand, names[i]!, shear, tubeHolds)
+	);
 	const standing = standingCase(cases, judged);
-	const bent = bentBothWays(model, cases);
-	const resistance = resistanceOf(model, cases, bent, standing, shear, judged);
-	const webRefused = bent.plus.webRefused || bent.minus.webRefused;
+	const bent = bentAllWays(context);
+	const axial = context.axial(-1, cases.compression);
+	const resistance = resistanceOf(context, bent, standing, shear, judged);
+	const slender = [...Object.values(bent), axial].flatMap(({ effective }) => effective ?? []);
+	const unbent = demands.length === 0 || demands.some(isUnbent);
 	return {
 		classification: classificationOf(model, cases, standing),
+		effective: effectiveAnswer(slender, standingEffective(bent, axial.effective, standing)),
 		resistance,
 		demands: judged.map(({ state }) => state),
 		notes: [
 			...classNotes(model, demands.map(effectsOf)),
-			...classFourNotes(pureClasses(cases)),
-			...strengthNotes(model, cases, { basis: resistance.basis, webRefused }),
+			...strengthNotes(model, cases, bent, judged),
+			...slender.flatMap(({ notes }) => notes),
 			...shear.notes,
-			...holeNotes(model.section),
-			...interactionNotes(demands),
-			...judged.flatMap(({ state }) => state.missing),
-			...(demands.length === 0 || demands.some(isUnbent)
-				? flangeNotes(model, cases, bent.plus)
-				: []),
-			...stabilityNotes(model.section, demands)
+			...holeNotes(model),
+			...judged.flatMap(({ state, notes }) => [...notes, ...state.missing]),
+			...(unbent ? flangeNotes(model, cases, bent.plusMy) : []),
+			...shearLagNotes(model),
+			...stabilityNotes(model.section, demands, isHeld(demands, judged))
 		]
 	};
 }
 
-function judgeDemand(
-	model: EnModel,
-	cases: PureCases,
-	demand: Demand,
-	name: string,
-	shear: Parameters<typeof demandChecks>[4]
-): Judged {
-	const effects = effectsOf(demand);
-	const classed = classifyDemand(model, cases, effects, name);
-	const { classified, basis } = classed;
-	const used = demandChecks(model, demand, name, classified, shear);
-	const sense: AxisSense = effects.My < 0 ? 'minusMy' : 'plusMy';
-	const onlyMy = effects.N === 0 && effects.Mz === 0 && model.code.allowEffectiveClass2;
-	const alone = bendingResistance(model, sense, classified, onlyMy);
-	const holed = holesInTension(model.section, sense);
-	const ruler = demandRuler(model, effects, used, holed ? null : alone.value);
-	const state: DemandState = {
-		demand: name,
-		class: classified.overall,
-		governing: classified.governing,
-		basis,
-		elements: classified.elements,
-		N: effects.N,
-		...ruler,
-		countableBasis: ruler.countable === null ? null : alone.basis,
-		withheld: used.withheld,
-		utilisation: greatest(used.checks, used.missing)?.value ?? null,
-		missing: used.missing
-	};
-	return { state, classed, checks: used.checks };
-}
-
-function greatest(checks: readonly ResistanceCheck[], missing: readonly Note[]) {
-	if (missing.length > 0 || checks.length === 0) return null;
-	const worst = checks.reduce((a, b) => (b.utilisation > a.utilisation ? b : a));
-	return { governing: worst.name, value: worst.utilisation };
-}
+/** Whether a demand's lateral–torsional buckling has been checked. */
+const isHeld =
+	(demands: readonly Demand[], judged: readonly JudgedDemand[]) =>
+	(demand: Demand): boolean =>
+		judged[demands.indexOf(demand)]?.state.reduced.MbRd !== undefined;
 
 /** The demand with the worst class, the first of equals; without demands +My. */
-function standingCase(cases: PureCases, judged: readonly Judged[]): DemandClass {
-	const first = judged[0]?.classed ?? {
-		classified: cases.plusMy,
-		basis: '+My' as const,
-		caseName: 'plusMy'
-	};
+function standingCase(cases: PureCases, judged: readonly JudgedDemand[]): DemandClass {
+	const plain: DemandClass = { classified: cases.plusMy, basis: '+My', caseName: 'plusMy' };
+	const first = judged[0]?.classed ?? plain;
 	return judged.reduce(
 		(worst, { classed }) =>
 			classed.classified.overall > worst.classified.overall ? classed : worst,
@@ -125,52 +94,91 @@ function classificationOf(
 	return { standard: code.standard, overall, basis, elements, governing, byCase };
 }
 
-function bentOneWay(model: EnModel, cases: PureCases, sense: AxisSense): BendingResistance {
-	const found = bendingResistance(model, sense, cases[sense]);
-	return holesInTension(model.section, sense) ? { ...found, value: null } : found;
-}
-
-const bentBothWays = (model: EnModel, cases: PureCases) => ({
-	plus: bentOneWay(model, cases, 'plusMy'),
-	minus: bentOneWay(model, cases, 'minusMy')
+const bentAllWays = ({ bending, cases }: EnContext): Bent => ({
+	plusMy: bending('plusMy', cases.plusMy),
+	minusMy: bending('minusMy', cases.minusMy),
+	plusMz: bending('plusMz', cases.plusMz),
+	minusMz: bending('minusMz', cases.minusMz)
 });
 
-/** Without a demanded moment the section is judged for bending with the bottom in tension. */
-const flangeNotes = (model: EnModel, { plusMy }: PureCases, { basis }: BendingResistance) =>
-	flangeInducedBuckling(model, { overall: plusMy.overall, basis, topCompressed: true });
+/** The effective section of the pure case that the class stands on. */
+function standingEffective(
+	bent: Bent,
+	axial: EffectiveSection | null,
+	{ basis, caseName }: DemandClass
+): EffectiveSection | null {
+	if (basis === 'N') return axial;
+	if (caseName in bent) return bent[caseName as AxisSense].effective;
+	return bent.plusMy.effective ?? axial;
+}
 
 function resistanceOf(
-	model: EnModel,
-	cases: PureCases,
-	{ plus, minus }: ReturnType<typeof bentBothWays>,
+	{ model, cases }: EnContext,
+	bent: Bent,
 	standing: DemandClass,
-	shear: { y: number | null; z: number | null },
-	judged: readonly Judged[]
+	shear: ShearResistances,
+	judged: readonly JudgedDemand[]
 ): Resistance {
-	const sideways = (sense: AxisSense) => bentOneWay(model, cases, sense).value;
+	const [compression, tension] = [
+		compressionResistance(model, cases.compression),
+		tensionResistance(model)
+	];
+	const weak = weaker(bent.plusMz, bent.minusMz);
+	explain(model, {
+		MyRd: bent.plusMy,
+		MyRdNegative: bent.minusMy,
+		MzRd: weak,
+		NRd: compression,
+		NtRd: tension
+	});
+	const checks = judged.flatMap((one) => one.checks);
+	const own = standing.caseName in bent ? bent[standing.caseName as AxisSense] : bent.plusMy;
 	return {
 		standard: model.code.standard,
-		basis: (standing.basis === '−My' ? minus : plus).basis,
-		MyRd: plus.value,
-		MyRdNegative: minus.value,
-		MzRd: lesser(sideways('plusMz'), sideways('minusMz')),
-		NRd: compressionResistance(model, cases.compression),
-		NtRd: tensionResistance(model),
-		VyRd: shear.y,
-		VzRd: shear.z,
-		checks: judged.flatMap(({ checks }) => checks),
+		basis: own.basis,
+		MyRd: bent.plusMy.value,
+		MyRdNegative: bent.minusMy.value,
+		MzRd: weak.value,
+		NRd: compression.value,
+		NtRd: tension.value,
+		VyRd: shear.y?.resistance ?? null,
+		VzRd: shear.z?.resistance ?? null,
+		...ofPressing(judged),
+		checks,
 		utilisation: greatest(
-			judged.flatMap(({ checks }) => checks),
+			checks,
 			judged.flatMap(({ state }) => state.missing)
 		)
 	};
 }
 
-const lesser = (a: number | null, b: number | null) =>
-	a === null || b === null ? null : Math.min(a, b);
+/** The lesser of both senses; without a figure where one has none. */
+function weaker(a: BendingResistance, b: BendingResistance): BendingResistance {
+	if (a.value === null) return a;
+	return b.value === null || b.value < a.value ? b : a;
+}
 
-const compressionResistance = (model: EnModel, { overall }: ClassifiedCase) =>
-	overall === 4 ? null : axialStrength(model, overall <= 2) / model.code.gammaM0;
+interface Figure {
+	readonly value: number | null;
+	readonly working: BendingResistance['working'];
+}
 
-const tensionResistance = (model: EnModel) =>
-	holedParts(model.section).length > 0 ? null : axialStrength(model, true) / model.code.gammaM0;
+function explain({ workings }: EnModel, figures: Readonly<Record<string, Figure>>): void {
+	if (workings === null) return;
+	for (const [name, { value, working }] of Object.entries(figures))
+		if (value !== null && working !== null) workings.add(workingKey.resistance(name), working);
+}
+
+/** The contract's figures beside N and V: of the demand that uses most, or misses a check. */
+function ofPressing(
+	judged: readonly JudgedDemand[]
+): Pick<Resistance, 'MyVRd' | 'MyNRd' | 'MzNRd' | 'VbRd' | 'MbRd'> {
+	const press = ({ state }: JudgedDemand) =>
+		state.utilisation ?? (state.missing.length > 0 ? Infinity : -1);
+	const [first, ...rest] = judged;
+	if (!first) return {};
+	const most = rest.reduce((a, b) => (press(b) > press(a) ? b : a), first);
+	const { MyVRd, MyNRd, MzNRd, VbRd, MbRd } = most.state.reduced;
+	const given = Object.entries({ MyVRd, MyNRd, MzNRd, VbRd, MbRd });
+	return Object.fromEntries(given.filter(([, value]) => value !== undefined));
+}

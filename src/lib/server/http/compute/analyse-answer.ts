@@ -4,51 +4,26 @@ import {
 	type AnalyseRequest
 } from '../../../api/analyse';
 import { codeChoiceOf } from '../../../api/code';
-import { fail, ok, type Note, type Result } from '../../../engine/result';
+import { fail, ok, type Result } from '../../../engine/result';
 import { analyse } from '../../../engine/rules/analyse';
-import type { Analysis } from '../../../engine/rules/analysis';
 import { prepareSection } from '../../../engine/section/prepare';
 import { contractVersion, engineVersion } from '../../../engine/version';
 import { parsed } from '../parse';
 import { invalid, type Refusal } from '../refusal';
 import { ignoredFields } from './ignored-fields';
+import { sectionWithTorsion } from './section-torsion';
 import { placed, subjectOf, type FindShape } from './subject';
-import { hasUnbuiltLaw, unbuiltLawNote, withoutUnbuiltLaws } from './unbuilt-laws';
 
 const known = Object.keys(analyseRequestSchema.shape);
 
-const stiffenersNote: Note = {
-	code: 'stiffeners_not_used',
-	message: 'Transverse stiffeners are not used yet: shear is judged as if there were none.'
-};
-
-const engineRequest = ({ code, demand, demands = [] }: AnalyseRequest) => ({
+const engineRequest = (
+	{ code, demand, demands = [], stiffeners }: AnalyseRequest,
+	query: URLSearchParams | undefined
+) => ({
 	code: codeChoiceOf(code ?? {}),
-	demands: demand ? [demand, ...demands] : demands
-});
-
-const nothing = null;
-
-/** Without a law the figures of strength stand on nothing: none is given. */
-const withoutStrength = (analysis: Analysis) => ({
-	...analysis,
-	moment: {
-		firstYieldY: nothing,
-		firstYieldZ: nothing,
-		plasticY: nothing,
-		plasticZ: nothing,
-		plasticNeutralAxisZ: nothing,
-		plasticNeutralAxisY: nothing,
-		shapeFactorY: nothing,
-		shapeFactorZ: nothing
-	},
-	squashLoad: nothing,
-	classification: nothing,
-	effective: nothing,
-	resistance: nothing,
-	demands: [],
-	verdict: nothing,
-	notes: [unbuiltLawNote, ...analysis.notes]
+	demands: demand ? [demand, ...demands] : demands,
+	stiffeners,
+	explain: query?.get('explain') === '1'
 });
 
 /**
@@ -57,26 +32,25 @@ const withoutStrength = (analysis: Analysis) => ({
  */
 export const analyseAnswer = async (
 	body: unknown,
-	findShape: FindShape
+	findShape: FindShape,
+	_signal?: AbortSignal,
+	query?: URLSearchParams
 ): Promise<Result<AnalyseAnswer, Refusal>> => {
 	const request = parsed(analyseRequestSchema, body);
 	if (!request.ok) return request;
 	const subject = await subjectOf(request.value, findShape);
 	if (!subject.ok) return subject;
 	const { definition, notes, at } = subject.value;
-	const unbuilt = hasUnbuiltLaw(definition);
-	const section = prepareSection(
-		unbuilt ? withoutUnbuiltLaws(definition) : definition,
-		request.value.code?.strengthBasis
-	);
+	const section = prepareSection(definition, request.value.code?.strengthBasis);
 	if (!section.ok) return fail(invalid(placed(section.error, at)));
-	const analysis = analyse(section.value, engineRequest(request.value));
-	const { notes: own, ...figures } = unbuilt ? withoutStrength(analysis) : analysis;
-	const more = request.value.stiffeners ? [stiffenersNote] : [];
+	const solved = sectionWithTorsion(section.value, request.value.numericalTorsion === true);
+	const analysis = analyse(solved, engineRequest(request.value, query));
+	const { notes: own, ...figures } = analysis;
 	return ok({
 		contract: contractVersion,
 		engineVersion,
 		...figures,
-		notes: [...notes, ...ignoredFields(body, known), ...more, ...own]
+		torsion: solved.torsion,
+		notes: [...notes, ...ignoredFields(body, known), ...own]
 	});
 };

@@ -11,7 +11,8 @@ import type { FindShape } from './subject';
 type Compute = (
 	body: unknown,
 	findShape: FindShape,
-	signal?: AbortSignal
+	signal?: AbortSignal,
+	query?: URLSearchParams
 ) => Promise<Result<unknown, Refusal>>;
 
 /** A stateless compute route: rate, body, figures, answer. */
@@ -21,6 +22,11 @@ export const computeRoute = (compute: Compute) => (event: RequestEvent) =>
 		if (limited) return limited;
 		const body = await jsonBody(event.request);
 		if (!body.ok) return refused(body.error);
-		const result = await compute(body.value, shapeDefinition, event.request.signal);
+		const result = await compute(
+			body.value,
+			shapeDefinition,
+			event.request.signal,
+			event.url.searchParams
+		);
 		return result.ok ? answer(result.value) : refused(result.error);
 	});

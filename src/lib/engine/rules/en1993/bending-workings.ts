@@ -1,0 +1,249 @@
+import { workingKey } from '../../explain/keys';
+import type { Working, WorkingInput } from '../../explain/working';
+import type { AxisSense } from '../section-moments';
+import type { PulledPart } from './bolt-holes';
+import { clauseOf, editionName } from './edition';
+import type { EffectiveSection } from './effective/effective-section';
+import type { Interpolation, Row } from './interpolated-modulus';
+import type { EnModel } from './model';
+
+const axisOf = (sense: AxisSense) => (sense === 'plusMy' || sense === 'minusMy' ? 'Y' : 'Z');
+
+const bendingTitle: Readonly<Record<AxisSense, string>> = {
+	plusMy: 'Moment resistance, bottom in tension',
+	minusMy: 'Moment resistance, top in tension',
+	plusMz: 'Moment resistance, right in tension',
+	minusMz: 'Moment resistance, left in tension'
+};
+
+/** Same to this share: two ways to one figure. */
+const same = 1e-10;
+
+const factor = ({ code }: EnModel): WorkingInput => ({
+	symbol: 'γM0',
+	value: code.gammaM0,
+	unit: '',
+	from: 'partial factor of the code chosen'
+});
+
+const strength = (fy: number): WorkingInput => ({
+	symbol: 'fy',
+	value: fy,
+	unit: 'N/mm²',
+	from: 'grade at its thickness'
+});
+
+function described(
+	model: EnModel,
+	sense: AxisSense,
+	formula: string,
+	inputs: readonly WorkingInput[],
+	value: number
+): Working {
+	const { standard } = model.code;
+	return {
+		title: bendingTitle[sense],
+		clause: clauseOf(standard, 'bending'),
+		edition: editionName(standard),
+		formula,
+		inputs: [...inputs, factor(model)],
+		result: { value, unit: 'kNm' }
+	};
+}
+
+/** W_pl fy/γM0, or the block of parts of several strengths over γM0. */
+export function plasticMomentWorking(model: EnModel, sense: AxisSense, value: number): Working {
+	const { section, strengths, code, moments } = model;
+	const axis = axisOf(sense);
+	const W = section.gross[axis === 'Y' ? 'plasticModulusY' : 'plasticModulusZ'];
+	const byModulus = (W * strengths.least * 1e-6) / code.gammaM0;
+	if (!strengths.hybrid && Math.abs(byModulus / value - 1) <= same)
+		return described(
+			model,
+			sense,
+			'M_c,Rd = W_pl·fy/γM0·10^-6',
+			[
+				{ symbol: 'W_pl', value: W, unit: 'mm³', from: workingKey.gross(`plasticModulus${axis}`) },
+				strength(strengths.least)
+			],
+			value
+		);
+	return described(
+		model,
+		sense,
+		'M_c,Rd = M_pl/γM0',
+		[
+			{
+				symbol: 'M_pl',
+				value: moments[sense].plastic.moment ?? 0,
+				unit: 'kNm',
+				from: blockFrom(sense)
+			}
+		],
+		value
+	);
+}
+
+/** W_el,min fy/γM0, or first yield of any fibre over γM0. */
+export function elasticMomentWorking(model: EnModel, sense: AxisSense, value: number): Working {
+	const { section, strengths, code, moments } = model;
+	const { gross } = section;
+	const axis = axisOf(sense);
+	const sides = axis === 'Y' ? (['Top', 'Bottom'] as const) : (['Left', 'Right'] as const);
+	const W = sides.map(
+		(side) => (gross as unknown as Record<string, number>)[`elasticModulus${axis}${side}`]!
+	);
+	const byModulus = (Math.min(...W) * strengths.least * 1e-6) / code.gammaM0;
+	if (!strengths.hybrid && Math.abs(byModulus / value - 1) <= same)
+		return described(
+			model,
+			sense,
+			`M_c,Rd = min(W_${sides[0].toLowerCase()}, W_${sides[1].toLowerCase()})·fy/γM0·10^-6`,
+			[
+				...sides.map((side, i) => ({
+					symbol: `W_${side.toLowerCase()}`,
+					value: W[i]!,
+					unit: 'mm³',
+					from: workingKey.gross(`elasticModulus${axis}${side}`)
+				})),
+				strength(strengths.least)
+			],
+			value
+		);
+	const first = moments[sense].firstYield ?? 0;
+	return described(
+		model,
+		sense,
+		'M_c,Rd = M_el/γM0',
+		[
+			{
+				symbol: 'M_el',
+				value: first,
+				unit: 'kNm',
+				from: `first yield of any fibre, ${yieldFrom(sense)}`
+			}
+		],
+		value
+	);
+}
+
+const blockFrom = (sense: AxisSense) =>
+	sense === 'plusMy' || sense === 'plusMz'
+		? workingKey.moment(`plastic${axisOf(sense)}`)
+		: 'plastic block turned round';
+
+const yieldFrom = (sense: AxisSense) => workingKey.moment(`firstYield${axisOf(sense)}`);
+
+/** Annex B of the 2022 edition: (M_pl − (M_pl − M_el) β_ep)/γM0. */
+export function interpolatedMomentWorking(
+	model: EnModel,
+	sense: AxisSense,
+	{ beta, rows }: Interpolation,
+	value: number
+): Working {
+	const { plastic, firstYield } = model.moments[sense];
+	const shares = rows.map(shareFormula).join(', ');
+	return {
+		...described(
+			model,
+			sense,
+			`M_c,Rd = (M_pl − (M_pl − M_el)·min(max(${shares}, 0), 1))/γM0`,
+			[
+				{ symbol: 'M_pl', value: plastic.moment ?? 0, unit: 'kNm', from: blockFrom(sense) },
+				{ symbol: 'M_el', value: firstYield ?? 0, unit: 'kNm', from: yieldFrom(sense) },
+				...rows.flatMap(({ symbol, slenderness, epsilon }) => [
+					{ symbol: `λ_${symbol}`, value: slenderness, unit: '', from: 'slenderness c/t or d/t' },
+					{ symbol: `ε_${symbol}`, value: epsilon, unit: '', from: '√(235/fy) of that part' }
+				])
+			],
+			value
+		),
+		title: `${bendingTitle[sense]}, interpolated (β_ep ${beta.toFixed(3)})`,
+		clause: clauseOf(model.code.standard, 'interpolated'),
+		notes: ['rule-from-memory']
+	};
+}
+
+function shareFormula({ symbol, from, span, squared }: Row): string {
+	const unit = squared ? `ε_${symbol}²` : `ε_${symbol}`;
+	return `(λ_${symbol} − ${from}·${unit})/(${span}·${unit})`;
+}
+
+/** W_eff fy/γM0 of the section that remains. */
+export function effectiveMomentWorking(
+	model: EnModel,
+	sense: AxisSense,
+	effective: EffectiveSection,
+	value: number
+): Working {
+	const axis = axisOf(sense);
+	const sides = axis === 'Y' ? (['Top', 'Bottom'] as const) : (['Left', 'Right'] as const);
+	const figures = effective as unknown as Record<string, number>;
+	const W = sides.map((side) => figures[`elasticModulus${axis}${side}`]!);
+	const { strengths, code } = model;
+	const byModulus = (Math.min(...W) * strengths.least * 1e-6) / code.gammaM0;
+	const edition = editionName(code.standard);
+	const clause = `${clauseOf(code.standard, 'bending')}; EN 1993-1-5 4.4`;
+	const title = `${bendingTitle[sense]}, effective section`;
+	if (Math.abs(byModulus / value - 1) <= same)
+		return {
+			title,
+			clause,
+			edition,
+			formula: `M_c,Rd = min(W_eff,${sides[0].toLowerCase()}, W_eff,${sides[1].toLowerCase()})·fy/γM0·10^-6`,
+			inputs: [
+				...sides.map((side, i) => ({
+					symbol: `W_eff,${side.toLowerCase()}`,
+					value: W[i]!,
+					unit: 'mm³',
+					from: workingKey.effective(effective.basis, `elasticModulus${axis}${side}`)
+				})),
+				strength(strengths.least),
+				factor(model)
+			],
+			result: { value, unit: 'kNm' }
+		};
+	return {
+		title,
+		clause: `${clause}; 4.3(6)`,
+		edition,
+		formula: 'M_c,Rd = M_eff/γM0',
+		inputs: [
+			{
+				symbol: 'M_eff',
+				value: value * code.gammaM0,
+				unit: 'kNm',
+				from: 'effective section, each part up to its own strength'
+			},
+			factor(model)
+		],
+		result: { value, unit: 'kNm' }
+	};
+}
+
+/** The moment of the section with its pulled parts reduced for holes. */
+export function holedMomentWorking(
+	model: EnModel,
+	pulled: readonly PulledPart[],
+	moment: number,
+	value: number
+): Working {
+	const { standard } = model.code;
+	const shares = pulled.map(({ part, share }) => `${part.name} ${(100 * share).toFixed(1)} %`);
+	return {
+		title: 'Moment resistance with bolt holes on the pulled side',
+		clause: clauseOf(standard, 'tensionHoles'),
+		edition: editionName(standard),
+		formula: 'M_c,Rd = M_net/γM0',
+		inputs: [
+			{
+				symbol: 'M_net',
+				value: moment,
+				unit: 'kNm',
+				from: `section with 0.9·A_net·fu/γM2 over A·fy/γM0 of its pulled area: ${shares.join(', ')}`
+			},
+			factor(model)
+		],
+		result: { value, unit: 'kNm' }
+	};
+}
