@@ -54,4 +54,13 @@ describe('engine jobs', () => {
 		const stop = () => Promise.resolve(false);
 		expect(await engineHandlers.unlock(request, { progress: () => {}, goOn: stop })).toBeNull();
 	});
+
+	it('solves torsion beside the handbook, and not at all once cancelled', async () => {
+		const job = await engineHandlers.torsion({ definition }, { progress: () => {}, goOn: going });
+		if (!job?.ok) throw new Error('No torsion.');
+		const { handbook, numerical } = job.value.torsion;
+		expect(numerical!.torsionConstant / handbook!.torsionConstant!).toBeCloseTo(1, 3);
+		const goOn = () => Promise.resolve(false);
+		expect(await engineHandlers.torsion({ definition }, { progress: () => {}, goOn })).toBeNull();
+	});
 });

@@ -4,6 +4,7 @@ import type { ResponseState } from '$lib/engine/response/state';
 import { noState } from '$lib/engine/response/state-report';
 import { analyse } from '$lib/engine/rules/analyse';
 import { prepareSection } from '$lib/engine/section/prepare';
+import { withNumericalTorsion } from '$lib/engine/section/torsion/with-numerical';
 import { unlocking, type Unlocking } from '$lib/engine/unlock/unlock';
 import type { EngineJobs } from './engine-jobs';
 import type { JobContext, JobHandlers } from './protocol';
@@ -66,5 +67,12 @@ export const engineHandlers: JobHandlers<EngineJobs> = {
 		const states = await statesInBatches(stepsOf(bent, at), context);
 		return ok({ states, firstYield: bent.firstYield, plasticMoment: bent.plasticMoment });
 	},
-	unlock: (request, context) => searched(unlocking(request), context)
+	unlock: (request, context) => searched(unlocking(request), context),
+	torsion: async ({ definition, strengthBasis }, { goOn }) => {
+		const section = prepareSection(definition, strengthBasis);
+		if (!section.ok) return section;
+		if (!(await goOn())) return null;
+		const { gross, torsion, notes } = withNumericalTorsion(section.value);
+		return ok({ gross, torsion, notes });
+	}
 };

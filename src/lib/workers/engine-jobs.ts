@@ -5,6 +5,7 @@ import type { AnalyseRequest } from '$lib/engine/rules/analyse';
 import type { Analysis } from '$lib/engine/rules/analysis';
 import type { StrengthBasis } from '$lib/engine/material/material';
 import type { SectionDefinition } from '$lib/engine/section/definition';
+import type { SectionWithTorsion } from '$lib/engine/section/torsion/with-numerical';
 import type { Unlocking, UnlockRequest } from '$lib/engine/unlock/unlock';
 import { jobsOver, type Jobs } from './jobs';
 
@@ -26,7 +27,12 @@ export type EngineJobs = {
 	};
 	/** Changes that unlock more; reports progress, may be cancelled; null when it was, or cannot be built. */
 	unlock: { payload: UnlockRequest; value: Unlocking | null };
+	/** Torsion solved numerically, tens of milliseconds at a stretch; null when cancelled before it began. */
+	torsion: { payload: About; value: Result<SolvedTorsion, Issue[]> | null };
 };
+
+/** Gross properties with the numerical figures where no handbook gives any, and both side by side. */
+export type SolvedTorsion = Pick<SectionWithTorsion, 'gross' | 'torsion' | 'notes'>;
 
 let shared: Jobs<EngineJobs> | undefined;
 
