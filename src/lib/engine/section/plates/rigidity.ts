@@ -31,23 +31,22 @@ export function neighboursOf({ runs, runOf }: Runs, contacts: readonly Contact[]
  * the run at another hold and so close a cell.
  */
 function openBranch(
-	runs: Runs,
+	{ runs, runOf }: Runs,
 	neighbours: readonly ReadonlySet<number>[],
 	run: number,
 	hold: Hold,
 	holds: readonly Hold[]
 ): number[] | null {
-	const seen = new Uint8Array(runs.runs.length);
-	const other = new Uint8Array(runs.runs.length);
-	for (const one of holds)
-		if (one !== hold) for (const plate of one.by) other[runs.runOf[plate]!] = 1;
+	const seen = new Uint8Array(runs.length);
+	const other = new Uint8Array(runs.length);
+	for (const one of holds) if (one !== hold) for (const plate of one.by) other[runOf[plate]!] = 1;
 	const reached: number[] = [];
 	const reach = (next: number) => {
 		if (next === run || seen[next]) return;
 		seen[next] = 1;
 		reached.push(next);
 	};
-	for (const plate of hold.by) reach(runs.runOf[plate]!);
+	for (const plate of hold.by) reach(runOf[plate]!);
 	for (let k = 0; k < reached.length; k++) {
 		if (other[reached[k]!]) return null;
 		neighbours[reached[k]!]!.forEach(reach);
@@ -55,19 +54,27 @@ function openBranch(
 	return reached;
 }
 
-/** Second moment of plates about the mid-line of a strip, mm⁴. */
-export function secondMomentAbout(
+/** Whether the plates of some runs have at least a second moment (mm⁴) about the mid-line of a strip. */
+function isStiff(
 	strips: readonly Strip[],
+	{ runs }: Runs,
 	about: Strip,
-	plates: readonly number[]
-) {
-	return plates.reduce((sum, plate) => {
-		const strip = strips[plate]!;
-		const [w, t] = [2 * strip.half, 2 * strip.halfThickness];
-		const sine = strip.along.z * about.along.y - strip.along.y * about.along.z;
-		const own = (w * w * sine * sine + t * t * (1 - sine * sine)) / 12;
-		return sum + w * t * (own + inStrip(about, strip.centre).v ** 2);
-	}, 0);
+	branch: readonly number[],
+	least: number
+): boolean {
+	let sum = 0;
+	for (const run of branch)
+		for (const { plate } of runs[run]!.pieces) {
+			sum += secondMomentAbout(about, strips[plate]!);
+			if (sum >= least) return true;
+		}
+	return false;
+}
+
+function secondMomentAbout(about: Strip, { centre, along, half, halfThickness }: Strip): number {
+	const sine = along.z * about.along.y - along.y * about.along.z;
+	const own = (half * half * sine * sine + halfThickness * halfThickness * (1 - sine * sine)) / 3;
+	return 4 * half * halfThickness * (own + inStrip(about, centre).v ** 2);
 }
 
 /** A hold of a run and whether what stands there is stiff enough to hold it. */
@@ -86,27 +93,19 @@ export function weighedHolds(
 ): WeighedHold[] {
 	const holds = mergedHolds(given);
 	const wall = runs.runs[run]!;
+	const t = 2 * Math.min(...wall.pieces.map(({ plate }) => strips[plate]!.halfThickness));
+	const about = strips[wall.pieces[0]!.plate]!;
 	return holds.map((hold, i) => {
-		if (hold.kind === 'lap') return { ...hold, stiff: true, stiffener: false };
-		const branch = openBranch(runs, neighbours, run, hold, holds);
 		const between = i > 0 && i < holds.length - 1;
 		const clear = widestBeside(wall, holds, i);
-		const t = leastThickness(strips, wall);
-		const factor = between ? leastRigidity.between : leastRigidity.edge;
-		const about = strips[wall.pieces[0]!.plate]!;
-		const stiff =
-			branch === null ||
-			clear <= stocky * t ||
-			secondMomentAbout(strips, about, platesOf(runs, branch)) >= factor * t ** 3 * clear;
-		return { ...hold, stiff, stiffener: between && branch !== null };
+		if (!between && clear <= stocky * t) return { ...hold, stiff: true, stiffener: false };
+		const branch = openBranch(runs, neighbours, run, hold, holds);
+		if (branch === null) return { ...hold, stiff: true, stiffener: false };
+		const least = (between ? leastRigidity.between : leastRigidity.edge) * t ** 3 * clear;
+		const stiff = clear <= stocky * t || isStiff(strips, runs, about, branch, least);
+		return { ...hold, stiff, stiffener: between };
 	});
 }
-
-const platesOf = ({ runs }: Runs, list: readonly number[]): number[] =>
-	list.flatMap((run) => runs[run]!.pieces.map(({ plate }) => plate));
-
-const leastThickness = (strips: readonly Strip[], { pieces }: Run): number =>
-	Math.min(...pieces.map(({ plate }) => 2 * strips[plate]!.halfThickness));
 
 /** The wider of the clear widths on both sides of a hold, mm. */
 function widestBeside({ from, to }: Run, holds: readonly Hold[], i: number): number {
