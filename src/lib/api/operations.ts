@@ -1,5 +1,5 @@
 import type { Operation } from './operation';
-import { analyseAnswerSchema, analyseRequestSchema } from './analyse';
+import { analyseAnswerSchema, analyseQuerySchema, analyseRequestSchema } from './analyse';
 import { interactionAnswerSchema, interactionRequestSchema } from './interaction';
 import { responseAnswerSchema, responseRequestSchema } from './response';
 import { healthSchema } from './health';
@@ -19,6 +19,7 @@ export const operations: readonly Operation[] = [
 		title: 'Analyse a section',
 		description:
 			'Gross properties, first yield and full plastic, class of every plate, and the resistance that may be counted under the demands. Needs no account. A figure whose rule does not reach, or is not built, is null and a note says why.',
+		query: analyseQuerySchema,
 		body: analyseRequestSchema,
 		answer: analyseAnswerSchema,
 		refusals: compute
