@@ -18,25 +18,40 @@ const curve = (title: string) =>
 		limits.curvePoints
 	);
 
+const strainLimit = within('strainLimit', '', ranges.strainLimit)
+	.optional()
+	.meta({ description: 'No fibre is followed beyond this strain, in either sense.' });
+
 const lawKinds = [
-	strict('An elastic–plastic law', { type: z.literal('elastic-plastic') }),
+	strict('An elastic–plastic law', { type: z.literal('elastic-plastic'), strainLimit }),
 	strict('A bilinear law', {
 		type: z.literal('bilinear'),
 		Eh: within('Hardening modulus Eh', 'N/mm²', ranges.hardening),
-		fu: strength('Tensile strength fu').optional()
+		fu: strength('Tensile strength fu').optional(),
+		strainLimit
 	}),
-	strict('A quad-linear law', { type: z.literal('quad-linear') }),
+	strict('A quad-linear law', { type: z.literal('quad-linear'), strainLimit }),
 	strict('A Ramberg–Osgood law', {
 		type: z.literal('ramberg-osgood'),
 		n: within('Exponent n', '', ranges.exponent),
 		m: within('Exponent m', '', ranges.exponent).optional(),
-		epsilonU: within('Ultimate strain epsilonU', '', ranges.curveStrain).optional()
+		epsilonU: within('Ultimate strain epsilonU', '', ranges.strainLimit).optional(),
+		stages: z
+			.union([z.literal(1), z.literal(2)], { error: must('stages', '1 or 2') })
+			.optional()
+			.meta({ description: 'Two where fu is known (stainless), one throughout (aluminium).' }),
+		variant: oneOf('variant', ['EN1993-1-4:2006', 'later'])
+			.optional()
+			.meta({ description: 'm = 1 + 3.5 f0.2/fu, or 1 + 2.8 f0.2/fu in the later one.' }),
+		family: oneOf('family', ['austenitic', 'duplex', 'ferritic']).optional(),
+		strainLimit
 	}),
 	strict('A law by curve', {
 		type: z.literal('curve'),
 		tension: curve('tension'),
 		compression: curve('compression').optional(),
-		beyond: oneOf('beyond', ['flat', 'zero'])
+		beyond: oneOf('beyond', ['flat', 'zero']),
+		strainLimit
 	})
 ] as const;
 

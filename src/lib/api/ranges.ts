@@ -23,6 +23,7 @@ export const ranges = {
 	curvature: either(1e6),
 	curvatureRatio: either(1e6),
 	strain: either(10),
+	strainLimit: { above: 0, most: 10 },
 	curveStrain: { least: 0, most: 10 },
 	/** N/mm² */
 	curveStress: { least: 0, most: 10_000 },

@@ -146,7 +146,18 @@ export const responseAnswerSchema = z
 			.optional()
 			.meta({ description: 'One a reversal of the cycle.' }),
 		firstYield: z.object({ curvature: figure('1/m'), moment: figure('kNm') }),
-		plasticMoment: figure('kNm')
+		plasticMoment: figure('kNm'),
+		ended: z
+			.object({
+				reason: z.string(),
+				curvature: z.number().meta({ 'x-unit': '1/m' }),
+				moment: z.number().meta({ 'x-unit': 'kNm' })
+			})
+			.optional()
+			.meta({
+				description:
+					'Where a fibre comes to the end of its stress–strain law as the curvature grows; states beyond have converged false.'
+			})
 	})
 	.meta({ id: 'ResponseAnswer' });
 

@@ -9,7 +9,19 @@ export interface StressStrainLaw {
 	readonly offsets: readonly number[];
 	/** N/mm², one per segment. */
 	readonly slopes: readonly number[];
-	/** Strain at which the law leaves its first line in tension (> 0) and in compression (> 0). */
+	/**
+	 * Strain at which the law leaves its first line in tension (> 0) and in compression (> 0); of a
+	 * rounded law f0.2/E, where the elastic check has yield.
+	 */
 	readonly yieldTension: number;
 	readonly yieldCompression: number;
+	/** Where the law ends, if it does: no state is given with a fibre beyond. */
+	readonly limit?: StrainLimit;
+}
+
+/** Greatest strains that a law is followed to, positive in both senses, and why. */
+export interface StrainLimit {
+	readonly tension: number;
+	readonly compression: number;
+	readonly reason: string;
 }

@@ -1,7 +1,9 @@
 import { fail, ok, type Result } from '../result';
-import type { StressStrainLaw } from './law';
+import type { StrainLimit, StressStrainLaw } from './law';
 import type { LawDefinition } from './material';
 import { quadLinearPoints } from './quad-linear';
+import { rambergOsgood, type RambergOsgood } from './ramberg-osgood';
+import { roundedPoints } from './rounded-lines';
 
 /** What a law is built from: E, fy, fyc and fu in N/mm²; fyc and fu positive numbers. */
 export interface Strengths {
@@ -16,6 +18,10 @@ export interface LawSide {
 	points: readonly (readonly [number, number])[];
 	/** Slope beyond the last point, N/mm²; `null` means that the stress drops to zero there. */
 	beyond: number | null;
+	/** Yield strain where it is not the first point's. */
+	yield?: number;
+	/** Why the law ends with its last point, if it does. */
+	ends?: string;
 }
 
 /**
@@ -30,7 +36,33 @@ export function lawOf(
 	if (!tension.ok) return tension;
 	const compression = lawSide(definition, strengths, strengths.fyc, 'compression');
 	if (!compression.ok) return compression;
-	return ok(piecewiseLaw(tension.value, compression.value));
+	const law = piecewiseLaw(tension.value, compression.value);
+	const limit = strainLimit(definition?.strainLimit, tension.value, compression.value);
+	return ok(limit ? { ...law, limit } : law);
+}
+
+function strainLimit(
+	asked: number | undefined,
+	tension: LawSide,
+	compression: LawSide
+): StrainLimit | undefined {
+	const end = (side: LawSide) => (side.ends ? side.points.at(-1)![0] : Infinity);
+	const own = { tension: end(tension), compression: end(compression) };
+	const least = Math.min(own.tension, own.compression);
+	if (asked !== undefined && asked <= least)
+		return {
+			tension: asked,
+			compression: asked,
+			reason: 'The strain limit of the law is reached.'
+		};
+	const reason = tension.ends ?? compression.ends;
+	if (reason === undefined) return undefined;
+	const within = asked ?? Infinity;
+	return {
+		tension: Math.min(own.tension, within),
+		compression: Math.min(own.compression, within),
+		reason
+	};
 }
 
 function lawSide(
@@ -48,12 +80,13 @@ function lawSide(
 		case 'quad-linear': {
 			if (fu === null) return fail('The quad-linear law needs fu: give fu with the grade.');
 			const points = quadLinearPoints(E, strength, fu);
-			return points.ok ? ok({ points: points.value, beyond: 0 }) : points;
+			const ends = 'The quad-linear law ends at the ultimate strain.';
+			return points.ok ? ok({ points: points.value, beyond: 0, ends }) : points;
 		}
 		case 'curve':
 			return curveSide(definition as CurveDefinition, sense);
 		case 'ramberg-osgood':
-			return fail('The Ramberg–Osgood law is not built yet: use a tabulated curve instead.');
+			return roundedSide(definition as RambergOsgood, E, strength, fu);
 		default:
 			return unknownLaw(type);
 	}
@@ -92,7 +125,21 @@ function curveSide(
 		before = strain;
 	}
 	if (!(points[0]![1] > 0)) return fail(`The ${sense} curve must begin with a stress above 0.`);
-	return ok({ points, beyond: beyond === 'zero' ? null : 0 });
+	if (beyond === 'flat') return ok({ points, beyond: 0 });
+	return ok({ points, beyond: null, ends: 'The stress–strain curve ends.' });
+}
+
+function roundedSide(
+	asked: RambergOsgood,
+	E: number,
+	strength: number,
+	fu: number | null
+): Result<LawSide, string> {
+	const curve = rambergOsgood(asked, E, strength, fu);
+	if (!curve.ok) return curve;
+	const points = roundedPoints(curve.value);
+	const ends = 'The Ramberg–Osgood curve ends.';
+	return ok({ points, beyond: 0, yield: strength / E, ends });
 }
 
 function unknownLaw(type: never): Result<LawSide, string> {
@@ -108,8 +155,8 @@ export function piecewiseLaw(tension: LawSide, compression: LawSide): StressStra
 		kinks: [...down.kinks.map((k) => -k).reverse(), ...(joined ? [] : [0]), ...up.kinks],
 		offsets: [...down.offsets.map((o) => -o).reverse(), ...up.offsets.slice(joined ? 1 : 0)],
 		slopes: [...[...down.slopes].reverse(), ...up.slopes.slice(joined ? 1 : 0)],
-		yieldTension: up.kinks[0] ?? Infinity,
-		yieldCompression: down.kinks[0] ?? Infinity
+		yieldTension: tension.yield ?? up.kinks[0] ?? Infinity,
+		yieldCompression: compression.yield ?? down.kinks[0] ?? Infinity
 	};
 }
 

@@ -1,11 +1,17 @@
 import type { StressStrainLaw } from './law';
+import type { RambergOsgood } from './ramberg-osgood';
 
 /** Stress–strain law as asked for in a grade; strengths come from the grade itself. */
-export type LawDefinition =
+export type LawDefinition = LawShape & {
+	/** No fibre is followed beyond this strain, in either sense; positive. */
+	strainLimit?: number;
+};
+
+export type LawShape =
 	| { type: 'elastic-plastic' }
 	| { type: 'bilinear'; Eh: number; fu?: number }
 	| { type: 'quad-linear' }
-	| { type: 'ramberg-osgood'; n: number; m?: number; epsilonU?: number }
+	| ({ type: 'ramberg-osgood' } & RambergOsgood)
 	| {
 			type: 'curve';
 			tension: readonly (readonly [number, number])[];

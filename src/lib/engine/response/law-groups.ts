@@ -87,6 +87,8 @@ function sameStrength(a: Material, b: Material): boolean {
 	if (a === b || a.law === b.law) return a.fy === b.fy && a.fyc === b.fyc;
 	if (a.fy !== b.fy || a.fyc !== b.fyc) return false;
 	return (
+		a.law.limit?.tension === b.law.limit?.tension &&
+		a.law.limit?.compression === b.law.limit?.compression &&
 		sameNumbers(a.law.kinks, b.law.kinks) &&
 		sameNumbers(a.law.offsets, b.law.offsets) &&
 		sameNumbers(a.law.slopes, b.law.slopes)

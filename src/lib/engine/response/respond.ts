@@ -9,6 +9,7 @@ import { mechanicsOf } from './law-groups';
 import { canCarry, isWithinReach, momentLimits } from './limits';
 import { plasticMomentOf } from './plastic';
 import { noState, stateReport } from './state-report';
+import { isWithinLaws, lawEnd, type PathEnd } from './strain-limits';
 import type { BendingPath, FirstYield, ResponseState, StrainPlane } from './state';
 
 const radians = Math.PI / 180;
@@ -38,6 +39,8 @@ export interface Bending {
 	atMoment(moment: number): ResponseState;
 	/** State of a whole strain plane, whatever N it carries. */
 	atPlane(plane: StrainPlane): ResponseState;
+	/** Where a fibre comes to the end of its law as the curvature grows; null where none does. */
+	ended?(): PathEnd | null;
 	/** Moment (kNm) at a curvature (1/m), without the rest of the state; null when not balanced. */
 	momentAt(curvature: number): number | null;
 }
@@ -61,9 +64,11 @@ export function bending(
 	const bent = balancer(b, path, elastic);
 	const carries = canCarry(mechanics, path.N * 1e3);
 	const limits = once(() => (carries ? momentLimits(mechanics, path) : null));
-	const report = (state: Bent) => stateReport(b, state, firstYield.curvature);
+	const report = (state: Bent) =>
+		isWithinLaws(b, state) ? stateReport(b, state, firstYield.curvature) : noState;
 	return {
 		path,
+		ended: once(() => (carries ? lawEnd(b, bent, (firstYield.curvature ?? 1) * 1e-3) : null)),
 		firstYield,
 		plasticMoment,
 		atCurvature: (curvature) =>
@@ -80,7 +85,7 @@ export function bending(
 		momentAt: (curvature) => {
 			if (!carries || !isWithinReach(mechanics, curvature * 1e-3)) return null;
 			const state = bent(curvature * 1e-3);
-			return state.converged ? state.forces.M * 1e-6 : null;
+			return state.converged && isWithinLaws(b, state) ? state.forces.M * 1e-6 : null;
 		}
 	};
 }

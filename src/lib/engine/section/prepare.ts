@@ -10,6 +10,7 @@ import { grossProperties } from './gross';
 import { partsOf, partGradeIssues } from './part-materials';
 import type { PreparedSection } from './prepared';
 import type { Shape } from './shape';
+import { materialNotes } from './transformed';
 import { shapeOf } from './shape-of';
 
 /**
@@ -39,7 +40,12 @@ export function prepareSection(
 		contours,
 		bounds: loopBounds(contours),
 		gross: grossProperties(parts.value, { ...torsion, perimeter: outerLength(contours) }),
-		notes: [...shape.value.notes, ...torsionNotes(shape.value), ...boltHoleNotes(definition)]
+		notes: [
+			...shape.value.notes,
+			...torsionNotes(shape.value),
+			...boltHoleNotes(definition),
+			...materialNotes(parts.value)
+		]
 	});
 }
 

@@ -2,6 +2,7 @@ import type { ResponseRequest } from '../../../api/response';
 import { cycleStates, type Reversals } from '../../../engine/response/history/cycle';
 import type { History } from '../../../engine/response/history/history';
 import { bendingFrom, type ImposedOnce } from '../../../engine/response/history/history-bending';
+import type { PathEnd } from '../../../engine/response/strain-limits';
 import { bending, type Imposed } from '../../../engine/response/respond';
 import type { BendingPath, FirstYield, ResponseState } from '../../../engine/response/state';
 import { noState } from '../../../engine/response/state-report';
@@ -24,6 +25,7 @@ export interface Bent {
 	legs?: { states: ResponseState[] }[];
 	firstYield: FirstYield;
 	plasticMoment: number | null;
+	ended?: PathEnd;
 	notes: Note[];
 }
 
@@ -47,6 +49,7 @@ export const bentInTurns = async (
 	const left = loaded && unloadFrom ? loadedTo(loaded, path, unloadFrom) : loaded;
 	const lost = history !== null && left === null;
 	const bent = bending(section, path, left ?? history);
+	const end = bent.ended?.();
 	const states = await take(lost ? noStates(at) : statesOf(bent, at));
 	if (!states.ok) return states;
 	return ok({
@@ -54,6 +57,7 @@ export const bentInTurns = async (
 		...(cycled ? { legs: cycled.value.legs } : {}),
 		firstYield: bent.firstYield,
 		plasticMoment: bent.plasticMoment,
+		...(end ? { ended: end } : {}),
 		notes: lost ? [lostNote] : []
 	});
 };

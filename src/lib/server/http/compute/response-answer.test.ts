@@ -39,19 +39,105 @@ describe('responseAnswer', () => {
 	});
 
 	it.each([
-		['law_not_built', { law: { type: 'ramberg-osgood', n: 8 } }],
+		['residual-not-covered', { residual: 'rolled' }],
 		[
-			'law_not_built',
-			{ section: { ...flat, grade: { fy: 250, law: { type: 'ramberg-osgood', n: 8 } } } }
-		],
-		['unloading_not_built', { unloadFrom: { curvatureRatio: [2] } }],
-		['residual_not_built', { residual: 'rolled' }]
+			'law-not-unloaded',
+			{
+				unloadFrom: { curvatureRatio: [2] },
+				law: {
+					type: 'curve',
+					tension: [
+						[0.001, 200],
+						[0.01, 150]
+					],
+					beyond: 'flat'
+				}
+			}
+		]
 	])('gives no state and says why: %s', async (code, request) => {
 		const { states, plasticMoment, notes } = await asked(request);
 		expect(states).toHaveLength(2);
 		expect(states.every(({ converged, moment }) => !converged && moment === null)).toBe(true);
 		expect(plasticMoment).toBeNull();
 		expect(notes.map((note) => note.code)).toContain(code);
+	});
+
+	it('releases a bar from a state and gives what is left: M − M = 0, κ = κr − M/EI', async () => {
+		const { states, notes } = await asked({
+			unloadFrom: { curvatureRatio: [2] },
+			at: { moment: [0] }
+		});
+		expect(states[0]!.moment).toBeCloseTo(0, 9);
+		// M/My = 1.5 − 0.5/2² = 1.375, so that 2 − 1.375 of the yield curvature stay
+		expect(states[0]!.curvatureRatio).toBeCloseTo(0.625, 9);
+		// at the surfaces fy − 1.375 fy, at the edge of the core fy − 1.375 fy/2
+		expect(states[0]!.extremes!.stressMax).toBeCloseTo(250 * 0.375, 9);
+		expect(notes.map(({ code }) => code)).toContain('strained-one-way');
+	});
+
+	it('loads under one axial force and releases to another', async () => {
+		const { states } = await asked({
+			...{ unloadFrom: { curvatureRatio: [3], N: 1000 }, N: 0, at: { moment: [0] } }
+		});
+		expect(states[0]!.N).toBeCloseTo(0, 6);
+		expect(states[0]!.e0).toBeGreaterThan(1e-5);
+	});
+
+	it('follows a cycle leg by leg and ends each at its reversal', async () => {
+		const { legs, states } = await asked({
+			at: undefined,
+			cycle: { curvatures: [0.03, -0.03, 0.03], pointsPerLeg: 4 }
+		});
+		expect(states).toEqual([]);
+		expect(legs?.map((leg) => leg.states.length)).toEqual([4, 4, 4]);
+		const ends = legs!.map((leg) => leg.states.at(-1)!);
+		expect(ends[1]!.moment).toBeCloseTo(-ends[0]!.moment!, 8);
+		expect(ends[2]!.moment).toBeCloseTo(ends[0]!.moment!, 8);
+		expect(ends[1]!.curvature).toBeCloseTo(-0.03, 12);
+	});
+
+	it('gives no figure from a reversal on that cannot be reached', async () => {
+		const { legs, states, notes } = await asked({
+			...{ at: { moment: [0] }, cycle: { moments: [200, -300, 0], pointsPerLeg: 1 } }
+		});
+		expect(legs!.map((leg) => leg.states[0]!.converged)).toEqual([true, false, false]);
+		expect(states[0]!.converged).toBe(false);
+		expect(notes.map(({ code }) => code)).toContain('history-not-reached');
+	});
+
+	it('bounds a cycle by all its states', async () => {
+		const curvatures = Array.from({ length: 101 }, (_, i) => (-1) ** i * 0.01);
+		const error = await refusal({ section: flat, cycle: { curvatures } });
+		expect(error?.issues?.[0]).toMatchObject({ path: 'cycle' });
+		expect(error?.message).toContain('at most 2000 states in all');
+	});
+
+	it('says that a welded section has yielded before any load', async () => {
+		const welded = { kind: 'i', h: 400, b: 200, tw: 8, tf: 15, fabrication: 'welded', grade: 355 };
+		const { states, firstYield, plasticMoment, notes } = await asked({
+			...{ section: welded, residual: 'welded', at: { curvature: [0.01] } }
+		});
+		expect(firstYield).toEqual({ curvature: 0, moment: 0 });
+		expect(states[0]!.converged).toBe(true);
+		expect(plasticMoment).toBeGreaterThan(states[0]!.moment!);
+		expect(notes.map(({ code }) => code)).toContain('residual-welded');
+	});
+
+	it('ends with the law: states beyond are not given, and where it ended is', async () => {
+		const law = { type: 'elastic-plastic', strainLimit: 0.01 };
+		// curvature at the limit: 0.01 at 100 mm from the axis
+		const { states, ended } = await asked({ law, at: { curvature: [0.0999, 0.1001] } });
+		expect(states.map(({ converged }) => converged)).toEqual([true, false]);
+		expect(ended?.curvature).toBeCloseTo(0.1, 9);
+		const share = 250 / 210_000 / 0.01;
+		expect(ended?.moment).toBeCloseTo((500 / 3) * (1.5 - 0.5 * share ** 2), 8);
+	});
+
+	it('bends under a rounded law, and says what first yield means there', async () => {
+		const { states, notes } = await asked({ law: { type: 'ramberg-osgood', n: 8 } });
+		expect(states.every(({ converged }) => converged)).toBe(true);
+		expect(states[0]?.moment).toBeLessThan(500 / 3);
+		expect(notes.map(({ code }) => code)).toContain('rounded-law');
 	});
 
 	it('refuses a request that asks for two kinds of states, or for none', async () => {

@@ -9,6 +9,7 @@ import type { Imposed } from '../../../engine/response/respond';
 import type { BendingPath } from '../../../engine/response/state';
 import { noState } from '../../../engine/response/state-report';
 import type { PreparedSection } from '../../../engine/section/prepared';
+import { materialNotes } from '../../../engine/section/transformed';
 import { prepareSection } from '../../../engine/section/prepare';
 import { contractVersion, engineVersion } from '../../../engine/version';
 import { parsed } from '../parse';
@@ -18,21 +19,9 @@ import { historyNotes } from './history-notes';
 import { ignoredFields } from './ignored-fields';
 import { withLaw } from './replaced-law';
 import { placed, subjectOf, type FindShape, type Subject } from './subject';
-import { hasUnbuiltLaw, unbuiltLawNote, withoutUnbuiltLaws } from './unbuilt-laws';
 import { usualPointsPerLeg, workIssues } from './work-limit';
 
 const known = Object.keys(responseRequestSchema.shape);
-
-/** Why no state can be given, if so. */
-const unbuiltNotes = (request: ResponseRequest, subject: Subject): Note[] => [
-	...(request.law
-		? request.law.type === 'ramberg-osgood'
-			? [unbuiltLawNote]
-			: []
-		: hasUnbuiltLaw(subject.definition)
-			? [unbuiltLawNote]
-			: [])
-];
 
 /** The schema has made sure that one of the four at most is there. */
 const imposedOf = ({
@@ -83,16 +72,16 @@ const preparedFor = (
 	request: ResponseRequest,
 	{ definition, at }: Subject
 ): Result<PreparedSection, Refusal> => {
-	const section = prepareSection(withoutUnbuiltLaws(definition), request.strengthBasis);
+	const section = prepareSection(definition, request.strengthBasis);
 	if (!section.ok) return fail(invalid(placed(section.error, at)));
-	if (!request.law || request.law.type === 'ramberg-osgood') return section;
+	if (!request.law) return section;
 	const lawful = withLaw(section.value, request.law);
 	return lawful.ok ? lawful : fail(invalid(lawful.error));
 };
 
 /**
- * Answer to POST /api/v1/response: states of the bent section. What is not built yet gives states
- * that are not converged, and a note. Other requests get their turn between states; once `signal` is
+ * Answer to POST /api/v1/response: states of the bent section. What the
+ * laws do not reach gives states that are not converged. Other requests get their turn between states; once `signal` is
  * aborted the rest is left undone.
  */
 export const responseAnswer = async (
@@ -106,13 +95,9 @@ export const responseAnswer = async (
 	if (!subject.ok) return subject;
 	const section = preparedFor(request.value, subject.value);
 	if (!section.ok) return section;
-	const unbuilt = unbuiltNotes(request.value, subject.value);
 	const tooMuch = workIssues(request.value, section.value);
 	if (tooMuch.length > 0) return fail(invalid(tooMuch));
-	const response =
-		unbuilt.length > 0
-			? ok({ ...noAnswer(request.value), notes: unbuilt })
-			: await bentAnswer(request.value, section.value, signal);
+	const response = await bentAnswer(request.value, section.value, signal);
 	if (!response.ok) return response;
 	const { notes, ...figures } = response.value;
 	return ok({
@@ -120,7 +105,12 @@ export const responseAnswer = async (
 		engineVersion,
 		strengthBasis: section.value.strengthBasis,
 		...figures,
-		notes: [...subject.value.notes, ...ignoredFields(body, known), ...notes]
+		notes: [
+			...subject.value.notes,
+			...ignoredFields(body, known),
+			...materialNotes(section.value.parts),
+			...notes
+		]
 	});
 };
 
