@@ -47,9 +47,10 @@ function openBranch(
 		reached.push(next);
 	};
 	for (const plate of hold.by) reach(runOf[plate]!);
-	for (let k = 0; k < reached.length; k++) {
-		if (other[reached[k]!]) return null;
-		neighbours[reached[k]!]!.forEach(reach);
+	// grows while it is walked
+	for (const at of reached) {
+		if (other[at]) return null;
+		neighbours[at]!.forEach(reach);
 	}
 	return reached;
 }
