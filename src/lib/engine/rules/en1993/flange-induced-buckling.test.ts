@@ -1,16 +1,18 @@
 import { describe, expect, it } from 'vitest';
+import { formulaValue } from '../../explain/formula';
 import type { ISection, SectionDefinition } from '../../section/definition';
 import { prepareSection } from '../../section/prepare';
 import { analyse, type AnalyseRequest } from '../analyse';
+import { flangeInducedBucklingCheck, type Counted } from './flange-induced-buckling';
+import { testModel } from './test-model';
 
-function analysed(definition: SectionDefinition, request?: AnalyseRequest) {
+function judged(definition: SectionDefinition, request?: AnalyseRequest) {
 	const section = prepareSection(definition);
 	if (!section.ok) throw new Error(section.error.map(({ message }) => message).join(' '));
-	const analysis = analyse(section.value, request);
-	return { ...analysis, codes: analysis.notes.map(({ code }) => code) };
+	const { resistance, verdict } = analyse(section.value, request);
+	const check = resistance?.checks.find(({ name }) => name === 'flange-induced buckling');
+	return { check, verdict, resistance };
 }
-
-const code = 'flange-induced-buckling-not-checked';
 
 /** Web 800×8 (Aw 6400, hw/tw 100, class 3 of fy 355), flanges 750×80 (60 000): √(Aw/Afc) = 0.3266. */
 const heavy: ISection = {
@@ -23,50 +25,68 @@ const heavy: ISection = {
 	grade: 355
 };
 
+const plastic: Counted = { overall: 2, basis: 'plastic', topCompressed: true };
+
 describe('buckling of the flange into the web, EN 1993-1-5 8(1)', () => {
-	it('is missing where 100 is over 0.4 · 210000/355 · 0.3266 = 77.3, counted as class 2', () => {
-		const { verdict, demands, codes, resistance } = analysed(heavy, { demands: [{ My: 100 }] });
-		expect(resistance?.basis).toBe('effective-class-2');
-		expect(codes).toContain(code);
-		expect(demands[0]?.missing.map((note) => note.code)).toContain(code);
-		expect(demands[0]?.countable).toBeGreaterThan(0);
-		expect(verdict).toMatchObject({ status: 'incomplete', clear: false });
-		expect(verdict.notChecked).toContain('flange-induced buckling');
+	it.each([
+		['class 1', { ...plastic, overall: 1 }, 0.3],
+		['class 2', plastic, 0.4],
+		['a class 3 web taken as class 2', { ...plastic, overall: 3, basis: 'effective-class-2' }, 0.4],
+		['class 3', { ...plastic, overall: 3, basis: 'elastic' }, 0.55],
+		['class 4', { ...plastic, overall: 4, basis: 'effective' }, 0.55]
+	] as const)('%s: hw/tw 100 against k · 210000/355 · 0.3266', (_, counted, k) => {
+		const model = testModel(heavy);
+		const found = flangeInducedBucklingCheck(model, counted, 'one')!;
+		expect(found.value).toBe(100);
+		expect(found.limit / (k * (210_000 / 355) * Math.sqrt(6400 / 60_000))).toBeCloseTo(1, 12);
+		const { formula, inputs, result } = Object.values(model.workings.explanation())[0]!;
+		const worked = formulaValue(formula, inputs);
+		expect(worked.ok && worked.value / result.value).toBeCloseTo(1, 9);
 	});
 
-	it('is met, and not mentioned, within 0.55 · 210000/355 · 0.3266 = 106.3 when counted to first yield', () => {
+	it('fails where 100 is over 77.3, counted as class 2, and nothing passes then', () => {
+		const { check, verdict, resistance } = judged(heavy, { demands: [{ My: 100 }] });
+		expect(resistance?.basis).toBe('effective-class-2');
+		expect(check?.utilisation).toBeCloseTo(100 / 77.27, 3);
+		expect(verdict.status).not.toBe('passes');
+	});
+
+	it('is met within 0.55 · 210000/355 · 0.3266 = 106.3 when counted to first yield', () => {
 		const elastic = { code: { allowEffectiveClass2: false }, demands: [{ My: 100 }] };
-		const { verdict, codes } = analysed(heavy, elastic);
-		expect(codes).not.toContain(code);
-		expect(verdict.status).toBe('passes');
+		expect(judged(heavy, elastic).check?.limit).toBeCloseTo(106.3, 1);
 	});
 
 	it('looks at the flange in compression', () => {
 		// Top flange 750×80 as before; bottom flange 300×25: √(6400/7500) = 0.92 is far from it.
 		const uneven: ISection = { ...heavy, h: 905, bBottom: 300, tfBottom: 25 };
-		expect(analysed(uneven, { demands: [{ My: -10 }] }).codes).not.toContain(code);
+		const found = flangeInducedBucklingCheck(testModel(uneven), {
+			...plastic,
+			topCompressed: false
+		})!;
+		expect(found.part).toBe('bottomFlange');
+		expect(found.limit).toBeCloseTo(0.4 * (210_000 / 355) * Math.sqrt(6400 / 7500), 9);
 	});
 
 	it('takes both webs of a box', () => {
-		const box = (tf: number): SectionDefinition => ({
+		const box: SectionDefinition = {
 			kind: 'box',
-			h: 800 + 2 * tf,
+			h: 960,
 			b: 750,
 			tw: 8,
-			tfTop: tf,
-			tfBottom: tf,
+			tfTop: 80,
+			tfBottom: 80,
 			webGap: 600,
 			grade: 355
-		});
-		// √(12800/60000) = 0.462: 0.4 · 591.5 · 0.462 = 109.3. With 120 mm, 0.377: 89.2.
-		expect(analysed(box(80), { demands: [{ My: 100 }] }).codes).not.toContain(code);
-		expect(analysed(box(120), { demands: [{ My: 100 }] }).codes).toContain(code);
+		};
+		// √(12800/60000) = 0.462: 0.4 · 591.5 · 0.462 = 109.3
+		expect(flangeInducedBucklingCheck(testModel(box), plastic)!.limit).toBeCloseTo(109.3, 1);
 	});
 
-	it('is said of +My when nothing is demanded, and of no bending about z or tension', () => {
-		expect(analysed(heavy).codes).toContain(code);
-		expect(analysed(heavy).verdict.notChecked).toContain('flange-induced buckling');
-		expect(analysed(heavy, { demands: [{ Mz: 10 }] }).codes).not.toContain(code);
-		expect(analysed(heavy, { demands: [{ N: 10 }] }).codes).not.toContain(code);
+	it('is not asked of rolled sections, of bending about z or of tension', () => {
+		expect(
+			flangeInducedBucklingCheck(testModel({ ...heavy, fabrication: 'rolled' }), plastic)
+		).toBeNull();
+		expect(judged(heavy, { demands: [{ Mz: 10 }] }).check).toBeUndefined();
+		expect(judged(heavy, { demands: [{ N: 10 }] }).check).toBeUndefined();
 	});
 });

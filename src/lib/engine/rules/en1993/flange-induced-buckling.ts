@@ -1,5 +1,4 @@
 import { workingKey } from '../../explain/keys';
-import type { Note } from '../../result';
 import { boxSizes } from '../../section/kinds/box';
 import { iSizes } from '../../section/kinds/i';
 import type { PreparedSection } from '../../section/prepared';
@@ -69,19 +68,6 @@ export function flangeInducedBucklingCheck(
 			result: { value: limit, unit: '' }
 		}));
 	return { value, limit, clause, part };
-}
-
-/** A note where the limit is exceeded. */
-export function flangeInducedBuckling(model: EnModel, counted: Counted): Note[] {
-	const found = flangeInducedBucklingCheck(model, counted);
-	if (found === null || found.value <= found.limit) return [];
-	return [
-		{
-			code: 'flange-induced-buckling-not-checked',
-			message: `The compression flange may buckle into the web: hw/tw ${found.value.toFixed(1)} is over ${found.limit.toFixed(1)}. That check is not built beyond this limit.`,
-			clause
-		}
-	];
 }
 
 function factor({ overall, basis }: Counted): number {
