@@ -1,5 +1,4 @@
-import type { Standard } from '../result';
-import type { ClassifiedElement, SectionClass } from '../result';
+import type { ClassifiedElement, SectionClass, Standard } from '../result';
 import { clauseOf } from './edition';
 import type { AngleElement, PlateElement, TubeElement } from './elements/element';
 import {
