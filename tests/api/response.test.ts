@@ -77,14 +77,14 @@ describe('POST /api/v1/response', () => {
 		expect(plasticMoment).toBeCloseTo((628.4 * 355) / 1e3, 1);
 	});
 
-	it('says that residual stress is not built, and gives no state', async () => {
+	it('says where no published residual stress covers a section, and gives no state', async () => {
 		const { states, notes } = await asked({
 			section: rectangle,
 			residual: 'rolled',
 			at: { curvature: [0.01] }
 		});
 		expect(states[0]).toMatchObject({ converged: false, moment: null });
-		expect(notes[0]?.code).toBe('residual_not_built');
+		expect(notes[0]?.code).toBe('residual-not-covered');
 	});
 
 	it('lets others have their answer while it computes', async () => {

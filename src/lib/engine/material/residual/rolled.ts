@@ -1,7 +1,7 @@
 import { cutAlong } from '../../geometry/cut';
 import type { Edge } from '../../geometry/boundary';
 import { frameAt } from '../../geometry/frame';
-import { edgesAbout } from '../../response/history/cell';
+import { edgesAbout } from '../../geometry/edges-about';
 import { zeroField } from '../../response/history/linear-field';
 import type { PreparedSection } from '../../section/prepared';
 import { iSizes } from '../../section/kinds/i';

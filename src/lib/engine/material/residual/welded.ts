@@ -1,7 +1,7 @@
 import { cutAlong } from '../../geometry/cut';
 import type { Edge } from '../../geometry/boundary';
 import { frameAt, type Frame } from '../../geometry/frame';
-import { edgesAbout } from '../../response/history/cell';
+import { edgesAbout } from '../../geometry/edges-about';
 import type { PreparedSection } from '../../section/prepared';
 import { boxSizes } from '../../section/kinds/box';
 import { iSizes } from '../../section/kinds/i';

@@ -1,4 +1,4 @@
-import type { Edge, Loop } from '../../geometry/boundary';
+import type { Edge } from '../../geometry/boundary';
 import { extentAcross, loopBounds } from '../../geometry/bounds';
 import { flanksOf } from '../../geometry/flank';
 import { momentCount, type Moments } from '../../geometry/flank-moments';
@@ -36,14 +36,6 @@ export function cellOf(
 	if (!(moments[0]! > 0)) return null;
 	return { part, edges, moments, box: loopBounds([edges]), plastic };
 }
-
-/** The same loops, measured from the gross centroid. */
-export const edgesAbout = (loops: readonly Loop[], { y, z }: { y: number; z: number }): Edge[] =>
-	loops.flat().map((edge): Edge => {
-		const moved = (p: { y: number; z: number }) => ({ y: p.y - y, z: p.z - z });
-		if (edge.kind === 'arc') return { ...edge, centre: moved(edge.centre) };
-		return { kind: 'line', from: moved(edge.from), to: moved(edge.to) };
-	});
 
 /** Frame whose `across` runs down the steepest fall of a field: field = c − size·across. */
 export function fallOf({ y, z }: LinearField): { frame: Frame; size: number } {

@@ -3,7 +3,8 @@ import { residualPattern, type ResidualPattern } from '../../material/residual/p
 import { fail, ok, type Note, type Result } from '../../result';
 import type { PreparedSection } from '../../section/prepared';
 import { mechanicsOf, type Mechanics } from '../law-groups';
-import { cellOf, edgesAbout, type Cell } from './cell';
+import { edgesAbout } from '../../geometry/edges-about';
+import { cellOf, type Cell } from './cell';
 import { scaled, zeroField, type LinearField } from './linear-field';
 
 /**
