@@ -15,29 +15,36 @@ const beside = 1e-9;
  * It is the stress along V: what flows along a flange is not in it. Null where the cut crosses
  * several walls that are not mirror images, which the formula cannot tell apart.
  */
-export function shearStressAt(
+export const shearStressAt = (
 	section: PreparedSection,
 	V: number,
 	axis: 'y' | 'z',
 	level: number
-): number | null {
+): number | null => shearStressOf(section, axis)(V, level);
+
+/** The same for many cuts of one section along one axis. */
+export function shearStressOf(
+	section: PreparedSection,
+	axis: 'y' | 'z'
+): (V: number, level: number) => number | null {
 	const { gross, contours, parts } = section;
-	const angle = axis === 'z' ? 0 : Math.PI / 2;
-	const frame = frameAt(gross.centroid, angle);
+	const frame = frameAt(gross.centroid, axis === 'z' ? 0 : Math.PI / 2);
 	const profile = profileOf(
 		parts.flatMap(({ region }) => region.loops),
 		frame
 	);
-	const across = axis === 'z' ? level - gross.centroid.z : gross.centroid.y - level;
-	if (across <= profile.low || across >= profile.high) return 0;
 	const depth = profile.high - profile.low;
-	const sides = [across - beside * depth, across + beside * depth];
-	if (!mirrored(section, axis) && sides.some((side) => walls(contours, frame, side) > 1))
-		return null;
-	const width = Math.min(...sides.map((side) => widthAt(profile, side)).filter((own) => own > 0));
+	const alike = mirrored(section, axis);
 	const moments = new Float64Array(momentCount);
-	momentsBelow(profile, across, moments);
-	return Math.abs(flowFactor(section, axis, moments[1]!, moments[2]!) * V * 1e3) / width;
+	return (V, level) => {
+		const across = axis === 'z' ? level - gross.centroid.z : gross.centroid.y - level;
+		if (across <= profile.low || across >= profile.high) return 0;
+		const sides = [across - beside * depth, across + beside * depth];
+		if (!alike && sides.some((side) => walls(contours, frame, side) > 1)) return null;
+		const width = Math.min(...sides.map((side) => widthAt(profile, side)).filter((own) => own > 0));
+		momentsBelow(profile, across, moments);
+		return Math.abs(flowFactor(section, axis, moments[1]!, moments[2]!) * V * 1e3) / width;
+	};
 }
 
 /** First moments over second moments, 1/mm, with the product moment taken in. */
