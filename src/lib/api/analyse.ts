@@ -213,7 +213,7 @@ const reducedSchema = z.object({
 });
 
 const elasticSchema = z.object({
-	value: z.number().meta({ description: '(σ/fyd)² + 3(τ/fyd)², for information' }),
+	value: z.number().meta({ description: '√(σ² + 3τ²)/fyd, for information' }),
 	part: z.string(),
 	sigma: z.number().meta({ 'x-unit': 'N/mm²' }),
 	tau: z.number().meta({ 'x-unit': 'N/mm²' })

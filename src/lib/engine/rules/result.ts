@@ -137,7 +137,7 @@ export type LimitedBy =
 
 /** Elastic check by von Mises, 6.2.1(5): for information. */
 export interface ElasticUse {
-	/** √((σ/fyd)² + 3(τ/fyd)²) squared, as the code writes it: at most 1. */
+	/** √(σ² + 3τ²)/fyd: at most 1. */
 	readonly value: number;
 	readonly part: string;
 	/** N/mm² */

@@ -42,19 +42,34 @@ describe('what may be counted, in a sentence', () => {
 		expect(said.governing).toBe('web');
 	});
 
-	it('counts nothing in class 4', () => {
-		const said = verdictOn({ ...stocky, h: 1540, tw: 8, grade: 355 }, { demands: [{ My: 10 }] });
-		expect(said.sentence).toBe('Class 4. Nothing may be counted yet.');
+	it('counts the effective section in class 4', () => {
+		// Trahair, Bradford, Nethercot & Gardner, example 4.9.4: 4996 kNm.
+		const girder: ISection = { ...stocky, h: 1540, b: 400, weldLeg: 6, grade: 345 };
+		const said = verdictOn(girder, { demands: [{ My: 10 }] });
+		expect(said.sentence).toBe('Class 4. Count 4996 kNm, on the effective section.');
 		expect(said.detail).toContain('is over the Class 3 limit');
-		expect(said.detail).toContain('nor anything beyond is to be counted');
-		expect(said.notChecked).toContain('effective widths');
-		expect(said.status).toBe('incomplete');
+		expect(said.detail).toMatch(/The last .* kNm of the full block are not to be counted\.$/);
+		expect(said.status).toBe('passes');
+	});
+
+	it('counts between first yield and the full block by the 2022 edition', () => {
+		const slender: ISection = { ...stocky, b: 460, tf: 18 };
+		const code = { standard: 'EN1993-1-1:2022' } as const;
+		expect(verdictOn(slender, { code }).sentence).toMatch(
+			/^Class 3\. Count .* kNm, between first yield and the full block\.$/
+		);
 	});
 
 	it('says why a section without a class counts nothing', () => {
-		const said = verdictOn({ kind: 'flat', b: 100, h: 20, grade: 'S355' });
+		const outer = [
+			[0, 0],
+			[100, 0],
+			[100, 20],
+			[0, 20]
+		] as const;
+		const said = verdictOn({ kind: 'outline', outer, grade: 'S355' });
 		expect(said.sentence).toBe('No class. Nothing may be counted yet.');
-		expect(said.detail).toContain('not built yet');
+		expect(said.detail).toContain('no class and no resistance');
 		expect(said.ruler.firstYield).toBeGreaterThan(0);
 		expect(said.ruler.countable).toBeNull();
 	});
@@ -66,12 +81,13 @@ describe('what may be counted, in a sentence', () => {
 		expect(plainSentence(sentenceTokens)).toBe(sentence);
 	});
 
-	it('counts what the linear sum leaves beside an axial force', () => {
-		// Half of NRd leaves half of MyRd.
+	it('counts what N leaves of the plastic moment', () => {
+		// n = 0.5, a = 2600/10600: MN = Mpl (1 − n)/(1 − 0.5 a), 6.2.9.1(5).
 		const half = (10600 * 0.235) / 2;
 		const said = verdictOn(stocky, { demands: [{ N: -half, My: 50 }] });
-		expect(said.countable.moment).toBeCloseTo(302.915 / 2, 6);
-		expect(said.sentence).toContain('beside −1246 kN, by the linear sum.');
+		const expected = (302.915 * 0.5) / (1 - 0.5 * (2600 / 10600));
+		expect(said.countable.moment).toBeCloseTo(expected, 6);
+		expect(said.sentence).toContain('beside −1246 kN, by the plastic interaction.');
 	});
 });
 
@@ -81,7 +97,8 @@ describe('status', () => {
 	it('passes, fails or stays open with the demand', () => {
 		expect(status({ demands: [{ My: 100 }] })).toBe('passes');
 		expect(status({ demands: [{ My: 400 }] })).toBe('fails');
-		expect(status({ demands: [{ My: 100, unbracedLength: 5000 }] })).toBe('incomplete');
+		expect(status({ demands: [{ My: 100, unbracedLength: 5000 }] })).toBe('passes');
+		expect(status({ demands: [{ My: 100, N: -1, unbracedLength: 5000 }] })).toBe('incomplete');
 		expect(status({ demands: [] })).toBe('no-figure');
 		expect(status({ demands: [{ name: 'empty' }] })).toBe('no-figure');
 	});
@@ -93,14 +110,14 @@ describe('status', () => {
 	});
 
 	it('speaks of the demand that fails before one that misses a check', () => {
-		const open = { name: 'open', My: 10, unbracedLength: 5000 };
+		const open = { name: 'open', My: 10, N: -1, unbracedLength: 5000 };
 		const over = { name: 'over', My: 400 };
 		expect(verdictOn(stocky, { demands: [open, over, { name: 'none' }] }).demand).toBe('over');
 		expect(verdictOn(stocky, { demands: [{ My: 10 }, open] }).demand).toBe('open');
 	});
 
 	it('fails rather than stays open when a check that was made is exceeded', () => {
-		expect(status({ demands: [{ My: 400, unbracedLength: 5000 }] })).toBe('fails');
+		expect(status({ demands: [{ My: 400, N: -1, unbracedLength: 5000 }] })).toBe('fails');
 	});
 
 	it('is of the demand that is asked for, else of the worst', () => {

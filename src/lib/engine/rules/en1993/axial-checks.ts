@@ -40,6 +40,12 @@ function axialLimit(c: DemandCase): number | null {
 	const { model } = context;
 	const { kind } = model.section.definition;
 	if (classified.overall <= 2 && !kind.endsWith('hollow'))
-		return Math.min(value, shearedAxial(model, shearedMechanics(model, shearLosses(shear))));
-	return value * Math.max(1 - Math.max(shear.rhoY, shear.rhoZ), 1e-9);
+		return Math.max(
+			Math.min(value, shearedAxial(model, shearedMechanics(model, shearLosses(shear)))),
+			leastLeft * value
+		);
+	return value * Math.max(1 - Math.max(shear.rhoY, shear.rhoZ), leastLeft);
 }
+
+/** Where shear takes all strength this share stands for nothing, so that figures stay finite. */
+const leastLeft = 1e-9;

@@ -7,7 +7,7 @@ import { elasticField, type StressField } from './elastic-stress-check';
 import { shearStressAt } from './shear-stress';
 
 /**
- * Greatest (σ/fyd)² + 3(τ/fyd)² of the gross section under a demand, 6.2.1(5): at the top and bottom edge
+ * Greatest √(σ² + 3τ²)/fyd of the gross section under a demand, 6.2.1(5): at the top and bottom edge
  * of every part and at the centroid. For information. Null with shear along y, and where the shear
  * stress has no formula.
  */
@@ -58,6 +58,6 @@ function stressAt(
 
 function useAt(gammaM0: number, { name, material }: Part, sigma: number, tau: number): ElasticUse {
 	const strength = Math.min(material.fy, material.fyc) / gammaM0;
-	const value = (sigma / strength) ** 2 + 3 * (tau / strength) ** 2;
+	const value = Math.hypot(sigma, Math.sqrt(3) * tau) / strength;
 	return { value, part: name, sigma, tau };
 }
