@@ -42,6 +42,15 @@ describe('class 4 as class 3 at a low stress, 5.5.2(9)', () => {
 		expect(judged(bent(most * (1 + 1e-9))).raised).toBeNull();
 	});
 
+	it('leaves the limits of classes 1 and 2 as they are, so that the row shows what it is over', () => {
+		const { classified, raised } = judged(bent(most / 2));
+		const limits = (rows: typeof classified) =>
+			rows.elements.find(({ part }) => part === 'topFlange')?.limits.slice(0, 2);
+		expect(raised && limits(raised)).toEqual(limits(classified));
+		const web = raised?.elements.find(({ part }) => part === 'web');
+		expect(web?.class).toBe(1);
+	});
+
 	it('counts γM0: the stress may be less by it', () => {
 		const code = { ...used, gammaM0: 1.1 };
 		expect(judged(bent((most / 1.1) * (1 - 1e-12)), code).raised?.overall).toBe(3);

@@ -24,8 +24,9 @@ export function stressLevelClass(
 	const stress = elasticStress(model.section.gross, effects.N, effects, 1);
 	const rows = worstRows(raisedRows(model, stress, effects));
 	if (rows === null) return null;
-	const first = rows.reduce((a, b) => (use(b) > use(a) ? b : a));
-	return { overall: 3, elements: rows, governing: first.part };
+	const first = rows.reduce((a, b) => (isWorse(b, a) ? b : a));
+	const elements = rows.map((row) => (row === first ? { ...row, class: 3 as const } : row));
+	return { overall: 3, elements, governing: first.part };
 }
 
 /** That class 4 was taken as class 3 for its low stress. */
@@ -68,15 +69,19 @@ function raisedRows(
 	}
 }
 
-/** Class 3 where the raised limit is met, else 4; tubes go by ε squared. A part in tension has no limits. */
+/**
+ * Class 3 where the raised limit is met (1 or 2 where its own ε gives that), else 4; tubes go by ε
+ * squared. A part in tension has no limits.
+ */
 function raise(row: ClassifiedElement, fyd: number, most: number): ClassifiedElement {
 	const last = row.limits[2];
 	if (last === undefined || most <= 0) return { ...row, limits: [], class: 1 };
 	const factor = Math.sqrt(fyd / most);
 	const onLimits = row.type === 'tubular' ? fyd / most : factor;
-	const limits = row.limits.map((limit) => limit * onLimits);
+	const limits = [...row.limits.slice(0, 2), last * onLimits];
 	const within = row.slenderness <= last * onLimits;
-	return { ...row, epsilon: row.epsilon * factor, limits, class: within ? 3 : 4 };
+	const own = row.class <= 2 ? row.class : 3;
+	return { ...row, epsilon: row.epsilon * factor, limits, class: within ? own : 4 };
 }
 
 /** One row for each part and kind of support, or null where any part is beyond class 3. */
@@ -86,10 +91,13 @@ function worstRows(rows: readonly ClassifiedElement[]): ClassifiedElement[] | nu
 	for (const row of rows) {
 		const at = kept.findIndex(({ part, type }) => part === row.part && type === row.type);
 		if (at < 0) kept.push(row);
-		else if (use(row) > use(kept[at]!)) kept[at] = row;
+		else if (isWorse(row, kept[at]!)) kept[at] = row;
 	}
 	return kept;
 }
+
+const isWorse = (a: ClassifiedElement, b: ClassifiedElement): boolean =>
+	a.class === b.class ? use(a) > use(b) : a.class > b.class;
 
 const use = ({ slenderness, limits }: ClassifiedElement) =>
 	limits[2] === undefined ? 0 : slenderness / limits[2];

@@ -52,6 +52,7 @@ export function elementsOf({ definition }: PreparedSection, strengths: Strengths
 		case 'plates': {
 			const { stretches, notes } = plateStretches(definition);
 			if (stretches === null) return { elements: null, notes };
+			if (stretches.length === 0) return { elements: null, notes: [...notes, nothingClear] };
 			const plates = stretchElements(stretches, strengths);
 			return { elements: { kind: 'plates', plates, angle: null }, notes };
 		}
@@ -64,6 +65,13 @@ const slenderFlat: Note = {
 	code: 'flat-too-slender',
 	message:
 		'A flat bar wider than 18ε times its thickness has no class: Table 5.2 has no row for a plate with two free edges, and only a stockier bar is sure not to twist out of its plane. There is no resistance. First yield and full plastic are properties of the section only.',
+	clause: 'EN 1993-1-1 Table 5.2'
+};
+
+const nothingClear: Note = {
+	code: 'no-clear-plate',
+	message:
+		'No plate has a clear width between its supports, so there is nothing to classify and no resistance is given. First yield and full plastic are properties of the section only.',
 	clause: 'EN 1993-1-1 Table 5.2'
 };
 
