@@ -1,6 +1,5 @@
 import type { Note } from '../../result';
 import type { Demand } from '../result';
-import { clauseOf } from './edition';
 import type { EnModel } from './model';
 import { shearAreasOf, type ShearArea, type ShearPanel } from './shear-area';
 import { panelBuckling, type PanelBuckling } from './shear-buckling';
@@ -150,6 +149,3 @@ function bucklingOf(
 	const { chiW, slenderness, kTau } = worst;
 	return { chiW, slenderness, kTau, Vbw, Vbf, Vb: Math.min(Vbw + Vbf, most) };
 }
-
-/** Clause of the plastic shear resistance. */
-export const shearClause = ({ code }: EnModel): string => clauseOf(code.standard, 'shear');
