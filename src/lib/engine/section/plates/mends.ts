@@ -18,11 +18,9 @@ export function mendedIssues(
 	placed: PlacedPlates,
 	issues: readonly PlacingIssue[]
 ): Issue[] {
-	return issues.map(({ path, message, ...rest }, i) => {
-		const mend =
-			i < mendsSought
-				? mendOf(definition, placed, { path, message, ...rest }, issues.length)
-				: null;
+	return issues.map((issue, i) => {
+		const { path, message } = issue;
+		const mend = i < mendsSought ? mendOf(definition, placed, issue, issues) : null;
 		return mend ? { path, message, mend } : { path, message };
 	});
 }
@@ -31,18 +29,23 @@ function mendOf(
 	definition: PlatesSection,
 	placed: PlacedPlates,
 	issue: PlacingIssue,
-	before: number
+	before: readonly PlacingIssue[]
 ): Mend | null {
 	for (const { plates, anchor, mover } of candidates(definition, placed, issue)) {
 		const mend = moved(definition, placed, plates, anchor, mover);
 		const left = issuesAfter(definition, mend);
-		const gone = !left.some(
-			({ kind, a, b }) => kind === issue.kind && a === issue.a && b === issue.b
+		const worse = left.some(
+			(one) => !before.some((old) => isSame(old, one) && one.size <= old.size + placed.tolerance)
 		);
-		if (gone && left.length < before) return mend;
+		const solved = !left.some((one) => isSame(issue, one) && one.size >= issue.size);
+		if (solved && !worse) return mend;
 	}
 	return null;
 }
+
+/** Two issues speak of the same pair of plates, or both of pieces that lie apart. */
+const isSame = (p: PlacingIssue, q: PlacingIssue): boolean =>
+	p.kind === q.kind && (p.kind === 'apart' || (p.a === q.a && p.b === q.b));
 
 interface Candidate {
 	readonly plates: readonly number[];

@@ -11,8 +11,10 @@ export interface PlacingIssue extends Issue {
 	readonly kind: 'overlap' | 'apart' | 'join';
 	readonly a: number;
 	readonly b: number;
-	/** Which plates would have to move together to close a gap; none for the other kinds. */
+	/** Which plates would have to move together to close a gap; none for an overlap. */
 	readonly piece: readonly number[];
+	/** Depth of an overlap in mm, or the number of pieces that lie apart. */
+	readonly size: number;
 }
 
 /** Plates that overlap, joins between plates that do not touch, and pieces that hang together nowhere. */
@@ -31,6 +33,7 @@ function overlapIssues(
 			a,
 			b,
 			piece: [],
+			size: -gap,
 			path: `plates.${b}`,
 			message: `Plates “${plates[a]!.name}” and “${plates[b]!.name}” overlap by ${millimetres(-gap)}.`
 		}));
@@ -46,7 +49,7 @@ function connectionIssues(definition: PlatesSection, placed: PlacedPlates): Plac
 	if (wrong.length > 0)
 		return wrong.map(({ join, ...issue }) => {
 			const [a, b] = named![join]!;
-			return { ...issue, kind: 'join', a, b, piece: [b] };
+			return { ...issue, kind: 'join', a, b, piece: [b], size: 1 };
 		});
 	const pieces = connectedPieces(plates.length, named ?? touching);
 	return pieces.length < 2 ? [] : [apartIssue(plates, placed, pieces, joins !== undefined)];
@@ -75,6 +78,7 @@ function apartIssue(
 		a,
 		b,
 		piece: other,
+		size: others.length + 1,
 		path: `plates.${other[0]}`,
 		message: `Plates ${namesOf(plates, piece, a)} and ${namesOf(plates, other, b)} are not connected: ${why}${where}. Join them, or set tied when they act together by intent.`
 	};
