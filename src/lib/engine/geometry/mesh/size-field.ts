@@ -38,8 +38,10 @@ export function sizeField(loops: readonly Loop[], coarser: number): SizeField {
 	const at = ({ y, z }: Point) => {
 		let size = 1;
 		for (const source of sources) {
-			const wanted = source.size * coarser + growth * Math.hypot(source.y - y, source.z - z);
-			if (wanted < size) size = wanted;
+			const [dy, dz] = [source.y - y, source.z - z];
+			const reach = (size - source.size * coarser) / growth;
+			if (reach > 0 && dy * dy + dz * dz < reach * reach)
+				size = source.size * coarser + growth * Math.sqrt(dy * dy + dz * dz);
 		}
 		return size;
 	};
