@@ -6,8 +6,7 @@ import { addArcAntiderivative, addLineMoments, type Moments } from './flank-mome
  * it). For bodies that are cut once: nothing is prepared.
  */
 export function addMomentsBelow(out: Moments, flanks: readonly Flank[], level: number): void {
-	for (let i = 0; i < flanks.length; i++) {
-		const flank = flanks[i]!;
+	for (const flank of flanks) {
 		if (flank.low >= level) continue;
 		const to = flank.high < level ? flank.high : level;
 		if (flank.kind === 'line') addLineMoments(out, flank, flank.low, to, flank.sign);

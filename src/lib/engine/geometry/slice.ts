@@ -13,7 +13,7 @@ export function stretchesAt(edges: readonly Edge[], angle: number, along: number
 	const aside = frameAt({ y: 0, z: 0 }, angle - Math.PI / 2);
 	const ends = flanksOf([edges], aside)
 		.filter(({ low, high }) => low <= along && along < high)
-		.map((flank) => ({ at: -placeOn(flank, along), sign: -flank.sign }))
+		.map((flank) => ({ at: 0 - placeOn(flank, along), sign: -flank.sign }))
 		.sort((a, b) => a.at - b.at);
 	const out: Stretch[] = [];
 	let open = 0;

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import type { LawDefinition } from '../../material/material';
 import { bending } from '../respond';
 import type { BendingPath } from '../state';
-import { part, rectangle, sectionOf, steel } from '../test-sections';
+import { circle, part, rectangle, sectionOf, steel } from '../test-sections';
 import { historyOf, type History } from './history';
 import { bendingFrom } from './history-bending';
 import { historyPicture } from './history-picture';
@@ -98,6 +98,39 @@ describe('a rectangle bent past yield and released', () => {
 		expect(bent.atCurvature(-6 * yieldCurvature).moment! / My).toBeCloseTo(-hard(6), 10);
 		// fully elastic release: residual curvature by superposition
 		expect(bent.atMoment(0).curvature! / yieldCurvature).toBeCloseTo(r - hard(r), 10);
+	});
+
+	it('keeps 16/3π − 1 of fy at the surface of a round bar and of a tube what its moduli say', () => {
+		const hollow = (inner: number) =>
+			sectionOf(
+				part(
+					'tube',
+					{
+						loops: [
+							circle({ y: 3, z: 5 }, 50),
+							...(inner ? [circle({ y: 3, z: 5 }, inner, true)] : [])
+						]
+					},
+					steel(fy, { E })
+				)
+			);
+		for (const inner of [0, 40]) {
+			const history = historyOf(hollow(inner));
+			if (!history.ok) throw new Error(history.error.code);
+			const after = bentTo(history.value, 1e4 * yieldCurvature);
+			// Wpl = 4 (R³ − r³)/3, Wel = π (R⁴ − r⁴)/4R
+			const [plastic, elastic] = [
+				(4 * (50 ** 3 - inner ** 3)) / 3,
+				(Math.PI * (50 ** 4 - inner ** 4)) / 200
+			];
+			const kept = releasedFrom(after);
+			const top = kept.cells.find(({ box }) => Math.abs(box.top - 50) < 1e-6)!;
+			const own = top.plastic[0]!;
+			const stress = E * (kept.strain.c - own.c + (kept.strain.z - own.z) * 50);
+			expect(stress / fy).toBeCloseTo(plastic / elastic - 1, 6);
+			const areas = kept.cells.reduce((sum, { moments }) => sum + moments[0]!, 0);
+			expect(areas / kept.mechanics.area).toBeCloseTo(1, 12);
+		}
 	});
 
 	it('is not followed where the law softens', () => {

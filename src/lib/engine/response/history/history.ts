@@ -33,6 +33,11 @@ const lawNote: Note = {
 		'The stress–strain law softens, drops to zero or has another modulus in compression than in tension: unloading and residual stress are not followed for it, and no state is given.'
 };
 
+const fineNote: Note = {
+	code: 'history-too-fine',
+	message: `Unloading and residual stress are followed up to ${mostCells} pieces of steel: this section has too many parts for a law of so many lines, and no state is given.`
+};
+
 /**
  * The section as it leaves the mill or the shop, at rest: free of stress (`none`) or with the residual
  * stresses of rolling or welding. Fails with a note where no published pattern covers the section or
@@ -48,6 +53,7 @@ export function historyOf(
 		if (!own) return fail(lawNote);
 		layers.push(own);
 	}
+	if (layers.reduce((sum, own) => sum + own.length, 0) > mostCells) return fail(fineNote);
 	const cells =
 		residual === 'none' ? ok(freeCells(section, layers)) : lockedCells(section, residual, layers);
 	if (!cells.ok) return cells;

@@ -62,9 +62,8 @@ export const bentInTurns = async (
 	});
 };
 
-function* noStates(at: Imposed): Generator<ResponseState> {
-	for (const list of Object.values(at)) for (let i = 0; i < list.length; i++) yield noState;
-}
+const noStates = (at: Imposed): ResponseState[] =>
+	Object.values(at).flatMap((list: readonly unknown[]) => list.map(() => noState));
 
 const cycleInTurns = async (
 	history: History,
