@@ -30,18 +30,18 @@ export type Explanation = Readonly<Record<string, Working>>;
  * `workings?.add(key, () => working)` then costs nothing.
  */
 export class Workings {
-	readonly #kept = new Map<string, Working>();
+	readonly #kept: Record<string, Working> = {};
 
 	/** Keeps the working of a figure; the last one under a key stands. */
 	add(key: string, make: () => Working): void {
-		this.#kept.set(key, make());
+		this.#kept[key] = make();
 	}
 
 	get(key: string): Working | undefined {
-		return this.#kept.get(key);
+		return this.#kept[key];
 	}
 
 	explanation(): Explanation {
-		return Object.fromEntries(this.#kept);
+		return this.#kept;
 	}
 }

@@ -73,7 +73,10 @@ function limitWords(limitedBy: VerdictView['limitedBy']): string | null {
 	}
 }
 
-function countedBy({ N, biaxial, together, besideShear, basis, gammaM0 }: VerdictView, over: string): string {
+function countedBy(
+	{ N, biaxial, together, besideShear, basis, gammaM0 }: VerdictView,
+	over: string
+): string {
 	if (N !== 0 || biaxial) {
 		if (together === 'fibre') return ', up to first yield';
 		return together === 'sum' ? ', by the linear sum' : ', by the plastic interaction';
