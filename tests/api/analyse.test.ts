@@ -62,6 +62,42 @@ describe('POST /api/v1/analyse', () => {
 		expect((plain.resistance?.MyRd ?? 0) / (factored.resistance?.MyRd ?? 1)).toBeCloseTo(1.1, 12);
 	});
 
+	it('tells with ?explain=1 how each figure came about, and only then', async () => {
+		const request = { shapeId: 'en10365-ipe-300', grade: 'S355', demand: { My: 50 } };
+		const { status, body } = await post('/api/v1/analyse?explain=1', request);
+		expect(status).toBe(200);
+		const { explain, resistance } = analyseAnswerSchema.parse(body);
+		const working = explain?.['resistance.MyRd'];
+		expect(working?.clause).toBe('EN 1993-1-1:2005 6.2.5');
+		expect(working?.result).toEqual({ value: resistance?.MyRd, unit: 'kNm' });
+		expect((await asked(request)).explain).toBeUndefined();
+	});
+
+	it('uses transverse stiffeners in the shear resistance of a slender web', async () => {
+		const section = {
+			kind: 'i',
+			fabrication: 'welded',
+			h: 1540,
+			b: 400,
+			tw: 10,
+			tf: 20,
+			grade: 355
+		};
+		const plain = await asked({ section });
+		const stiffeners = { spacing: 1500, endPost: 'non-rigid' };
+		const stiffened = await asked({ section, stiffeners });
+		// Trahair, Bradford, Nethercot & Gardner, examples 4.9.5 and 4.9.6: 1197 and 1583 kN.
+		expect((plain.resistance?.VzRd ?? 0) / 1197).toBeCloseTo(1, 2);
+		expect((stiffened.resistance?.VzRd ?? 0) / 1583).toBeCloseTo(1, 2);
+	});
+
+	it('answers by both editions', async () => {
+		for (const standard of ['EN1993-1-1:2005', 'EN1993-1-1:2022']) {
+			const { classification } = await asked({ section: exampleSections.i, code: { standard } });
+			expect(classification?.standard).toBe(standard);
+		}
+	});
+
 	it('answers the same to the same request', async () => {
 		const request = { section: exampleSections.i, demand: { My: 900, Vz: 100 } };
 		const [first, second] = await Promise.all([1, 2].map(() => post('/api/v1/analyse', request)));

@@ -1,5 +1,5 @@
 /** Version of the figures: raised whenever any result may change. */
-export const engineVersion = '0.1.0';
+export const engineVersion = '0.2.0';
 
 /** Version of the HTTP contract that results follow. */
 export const contractVersion = 1;

@@ -44,10 +44,10 @@ function partWidth({ region, thickness }: ShapePart, turned: boolean): number {
 	return Math.max(right - left, top - bottom);
 }
 
-/** Holes are kept with the section; no figure takes them off yet. */
+/** Holes are kept with the section; only resistances take them off. */
 export function boltHoleNotes({ boltHoles = [] }: SectionDefinition): Note[] {
 	if (boltHoles.length === 0) return [];
 	const message =
-		'Bolt holes are not deducted: areas, moduli and strengths are of the gross section.';
+		'Bolt holes are not deducted from areas, moduli, first yield and the full plastic moment: those are of the gross section.';
 	return [{ code: 'bolt-holes-not-deducted', message }];
 }
