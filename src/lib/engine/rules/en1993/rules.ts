@@ -3,7 +3,7 @@ import type { Note } from '../../result';
 import { effectiveAnswer, type EffectiveAnswer } from '../effective-answer';
 import type { Classification, Demand, DemandState, Resistance } from '../result';
 import type { AxisSense } from '../section-moments';
-import { compressionResistance, tensionResistance } from './axial-resistance';
+import { tensionResistance, type AxialResistance } from './axial-resistance';
 import type { BendingResistance } from './bending-resistance';
 import { holeNotes } from './bolt-holes';
 import { classNotes } from './class-notes';
@@ -45,7 +45,7 @@ export function en1993Outcome(model: EnModel, asked: readonly Demand[]): EnOutco
 	const standing = standingCase(cases, judged);
 	const bent = bentAllWays(context);
 	const axial = context.axial(-1, cases.compression);
-	const resistance = resistanceOf(context, bent, standing, shear, judged);
+	const resistance = resistanceOf(context, bent, axial, standing, shear, judged);
 	const slender = [...Object.values(bent), axial].flatMap(({ effective }) => effective ?? []);
 	const unbent = demands.length === 0 || demands.some(isUnbent);
 	return {
@@ -113,16 +113,14 @@ function standingEffective(
 }
 
 function resistanceOf(
-	{ model, cases }: EnContext,
+	{ model }: EnContext,
 	bent: Bent,
+	compression: AxialResistance,
 	standing: DemandClass,
 	shear: ShearResistances,
 	judged: readonly JudgedDemand[]
 ): Resistance {
-	const [compression, tension] = [
-		compressionResistance(model, cases.compression),
-		tensionResistance(model)
-	];
+	const tension = tensionResistance(model);
 	const weak = weaker(bent.plusMz, bent.minusMz);
 	explain(model, {
 		MyRd: bent.plusMy,
