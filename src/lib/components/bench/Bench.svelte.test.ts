@@ -141,9 +141,16 @@ describe('demand cases', () => {
 		await type(user, 'My', '0');
 		await type(user, 'N', '100');
 		expect(met()).toHaveClass('clear');
-		await user.click(screen.getByRole('button', { name: 'Add a case' }));
-		await type(user, 'Vz', '600');
-		await user.click(screen.getByRole('button', { name: /^Case 1/ }));
+	});
+
+	it('name the case that a check is missing in', () => {
+		// a thrust over a length: the buckling of the member is missing
+		const long = { name: 'Case 2', N: -10, unbracedLength: 3000 };
+		const demands = [{ name: 'Case 1', N: 100 }, long];
+		const { bench } = open();
+		bench.change({ demands });
+		bench.activate(0);
+		flushSync();
 		expect(screen.getByText('Case 1 is met by every check made for it.')).not.toHaveClass('clear');
 		expect(screen.getByText(/a check that applies to it is missing/)).toBeInTheDocument();
 	});
