@@ -1,10 +1,12 @@
 import { codeSchema, standardSchema } from './code';
 import { demandSchema } from './demand';
 import { must } from './describe';
+import { effectiveSchema } from './effective';
 import { envelopeFields, noteSchema } from './envelope';
 import { listOf } from './fields';
 import { grossSchema } from './gross';
 import { limits } from './limits';
+import { reducedSchema } from './reduced';
 import { stiffenersSchema } from './stiffeners';
 import { namesOneTarget, targetFields, targetMissing } from './target';
 import { torsionSchema } from './torsion';
@@ -86,66 +88,6 @@ const classificationSchema = z.object({
 	})
 });
 
-const point = z.object({ y: z.number(), z: z.number() });
-
-const removedSchema = z.object({
-	part: z.string(),
-	element: z.string(),
-	from: z.number().meta({
-		'x-unit': 'mm',
-		description:
-			'Along the plate from the origin: z of an upright plate, y of a level one, otherwise from the end of its element.'
-	}),
-	to: z.number().meta({ 'x-unit': 'mm' }),
-	corners: z.array(point).readonly()
-});
-
-const effectiveElementSchema = z.object({
-	element: z.string(),
-	part: z.string(),
-	psi: z.number(),
-	kSigma: z.number(),
-	slenderness: z.number(),
-	rho: z.number(),
-	width: z.number(),
-	compressedWidth: z.number(),
-	effective: z.number(),
-	edges: z.array(z.number()).readonly()
-});
-
-const effectiveFields = {
-	area: z.number(),
-	centroid: point,
-	secondMomentY: z.number(),
-	secondMomentZ: z.number(),
-	productYZ: z.number(),
-	elasticModulusYTop: z.number(),
-	elasticModulusYBottom: z.number(),
-	elasticModulusZLeft: z.number(),
-	elasticModulusZRight: z.number(),
-	centroidShiftY: z.number().meta({ 'x-unit': 'mm', description: 'Effective minus gross.' }),
-	centroidShiftZ: z.number().meta({ 'x-unit': 'mm', description: 'Effective minus gross.' }),
-	removed: z.array(removedSchema).readonly(),
-	elements: z.array(effectiveElementSchema).readonly()
-};
-
-const effectiveCase = z.object({ ...effectiveFields, converged: z.object(effectiveFields) });
-
-const effectiveSchema = z.object({
-	basis: z.enum(['+My', '−My', 'Mz', 'N']),
-	...effectiveFields,
-	converged: z.object(effectiveFields),
-	byCase: z
-		.object({
-			'+My': effectiveCase.optional(),
-			'−My': effectiveCase.optional(),
-			'+Mz': effectiveCase.optional(),
-			'−Mz': effectiveCase.optional(),
-			N: effectiveCase.optional()
-		})
-		.meta({ description: 'Every pure case that is class 4.' })
-});
-
 const checkSchema = z.object({
 	demand: z.string(),
 	name: z.string(),
@@ -184,33 +126,6 @@ const limitedBy = z.enum([
 	'lateral-torsional',
 	'flange-induced-buckling'
 ]);
-
-const reducedSchema = z.object({
-	MyVRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	MzVRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	MyNRd: z.number().optional().meta({ 'x-unit': 'kNm', description: 'By the code’s formula.' }),
-	MyNRdExact: z.number().optional().meta({
-		'x-unit': 'kNm',
-		description: 'The exact plastic block under the same N.'
-	}),
-	MzNRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	MzNRdExact: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	MNRd: z.number().optional().meta({
-		'x-unit': 'kNm',
-		description: 'Plastic block along the moment’s own direction beside N.'
-	}),
-	MNVRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	NVRd: z.number().optional().meta({ 'x-unit': 'kN' }),
-	alpha: z.number().optional(),
-	beta: z.number().optional(),
-	deltaMy: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	deltaMz: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	MbRd: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	Mcr: z.number().optional().meta({ 'x-unit': 'kNm' }),
-	lambdaLT: z.number().optional(),
-	chiLT: z.number().optional(),
-	VbRd: z.number().optional().meta({ 'x-unit': 'kN' })
-});
 
 const elasticSchema = z.object({
 	value: z.number().meta({ description: '√(σ² + 3τ²)/fyd, for information' }),

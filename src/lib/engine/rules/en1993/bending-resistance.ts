@@ -15,12 +15,11 @@ import type { EffectiveSection } from './effective/effective-section';
 import { effectiveClassTwo, effectiveClassTwoWorking } from './effective-class-two';
 import { interpolationOf, type Interpolation } from './interpolated-modulus';
 import {
-	effectiveMomentWorking,
 	elasticMomentWorking,
-	holedMomentWorking,
 	interpolatedMomentWorking,
 	plasticMomentWorking
 } from './bending-workings';
+import { effectiveMomentWorking, holedMomentWorking } from './reduced-bending-workings';
 import type { EnModel } from './model';
 
 /** kNm, design; null where no moment may be counted. */
