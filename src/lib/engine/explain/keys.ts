@@ -24,5 +24,9 @@ export const workingKey = {
 	resistance: (figure: string) => `resistance.${figure}`,
 	/** A resistance under a demand's own forces: MyVRd, MyNRd, MbRd … */
 	reduced: (demand: string, figure: string) => `reduced.${demand}.${figure}`,
-	check: (demand: string, name: string) => `check.${demand}.${name}`
+	check: (demand: string, name: string) => `check.${demand}.${name}`,
+	/** What a demand shows on the ruler of its own moment: countable, firstYield, fullPlastic, use … */
+	demand: (demand: string, figure: string) => `demand.${demand}.${figure}`,
+	/** Places from the bottom, the left or the centroid: `place.plasticAxis.z`. */
+	place: (figure: string) => `place.${figure}`
 } as const;

@@ -1,5 +1,7 @@
+import { demandWorkings } from '../explain/demand-workings';
 import { grossWorkings } from '../explain/gross-workings';
 import { momentWorkings } from '../explain/moment-workings';
+import { placeWorkings } from '../explain/place-workings';
 import { Workings } from '../explain/working';
 import { mechanicsOf } from '../response/law-groups';
 import { squashLoad } from '../response/plastic';
@@ -67,6 +69,8 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 	if (workings) {
 		grossWorkings(workings, section);
 		momentWorkings(workings, section, figures.moment, figures.squashLoad);
+		placeWorkings(workings, section, figures.moment);
+		for (const state of figures.demands) demandWorkings(workings, figures, state);
 	}
 	return workings === null ? answer : { ...answer, explain: workings.explanation() };
 }

@@ -123,9 +123,29 @@ function figureKeys(analysis: Analysis): string[] {
 		...states.flatMap(({ demand, reduced }) =>
 			numbers(reduced).map((figure) => workingKey.reduced(demand, figure))
 		),
+		...states.flatMap(({ demand, firstYield, fullPlastic, countable, countableForce }) =>
+			Object.entries({ firstYield, fullPlastic, countable, countableForce })
+				.filter(([, value]) => value !== null)
+				.map(([figure]) => workingKey.demand(demand, figure))
+		),
+		...states.flatMap(({ elements, demand, basis }) =>
+			basis === 'demand'
+				? []
+				: elements.map(({ part, type }) => limitsOf(basis, part, type, demand))
+		),
 		...(resistance?.checks ?? []).map(({ demand, name }) => workingKey.check(demand, name))
 	];
 }
+
+const pureNames = { '+My': 'plusMy', '−My': 'minusMy', N: 'compression' } as const;
+
+const limitsOf = (
+	basis: '+My' | '−My' | 'N' | 'demand',
+	part: string,
+	type: string,
+	demand: string
+) =>
+	workingKey.limitFigure(basis === 'demand' ? demand : pureNames[basis], part, type, 'slenderness');
 
 describe.each(cases)('$name, request $place', ({ definition, request }) => {
 	const analysis = explained(definition, request);

@@ -7,13 +7,13 @@ import { bucklingFormula, limitFormulas } from './limit-formulas';
 import { leastPsi, outstandBuckling } from './limits';
 import { modulusOfCode } from './strengths';
 
-/** Keeps how the limits of every compressed part came about: c/t, ε, α, ψ, kσ and the limits. */
+/** Keeps how c/t of every part came about, and of a compressed one ε, α, ψ, kσ and the limits. */
 export function addLimitWorkings(
 	judging: Judging,
 	workings: Workings,
 	judged: readonly JudgedElement[]
 ): void {
-	for (const each of judged) if (each.row.limits.length > 0) addWorkings(judging, workings, each);
+	for (const each of judged) addWorkings(judging, workings, each);
 }
 
 type Piece = Pick<Working, 'title' | 'formula' | 'inputs'> & {
@@ -48,6 +48,7 @@ function addWorkings(
 		kSigma: from('kσ', kSigma, 'kSigma')
 	};
 	add(keyOf('slenderness'), slendernessPiece(judged));
+	if (row.limits.length === 0) return;
 	add(keyOf('epsilon'), epsilonPiece(judged, modulus));
 	if (row.alpha !== undefined) add(keyOf('alpha'), alphaPiece(judged, row.alpha));
 	if (judged.elastic) add(keyOf('psi'), psiPiece(judged.elastic, psiUsed));
