@@ -1,3 +1,4 @@
+import type { Explanation } from '$lib/engine/explain/working';
 import type { StrengthBasis } from '$lib/engine/material/material';
 import type { Issue } from '$lib/engine/result';
 import { analyse } from '$lib/engine/rules/analyse';
@@ -7,6 +8,7 @@ import type { SectionDefinition } from '$lib/engine/section/definition';
 import { prepareSection } from '$lib/engine/section/prepare';
 import type { PreparedSection } from '$lib/engine/section/prepared';
 import { BendState } from './bend-state.svelte';
+import { EffectiveView } from './effective-view.svelte';
 import { History } from './history.svelte';
 import { rulerModel, type RulerModel } from './ruler-model';
 import { freeCaseName, openingStudy, type DemandCase } from './study';
@@ -32,6 +34,11 @@ export interface CountAbout {
 export class Bench {
 	readonly #history: History<Study>;
 	readonly bend: BendState;
+	/** The effective section that is drawn and read; none where nothing is class 4. */
+	readonly effectiveView = new EffectiveView(
+		() => this.analysis.effective,
+		() => this.activeState
+	);
 	/** Case that was chosen; null follows the governing one. */
 	#chosenCase = $state<number | null>(null);
 	#valid: PreparedSection | null = null;
@@ -78,7 +85,11 @@ export class Bench {
 	}
 
 	readonly analysis = $derived.by(() =>
-		analyse(this.section, { code: this.code, demands: [...this.demands] })
+		analyse(this.section, {
+			code: this.code,
+			demands: [...this.demands],
+			stiffeners: this.study.stiffeners
+		})
 	);
 
 	/** The case that uses most, or whose check is missing; null where no rule covers the section. */

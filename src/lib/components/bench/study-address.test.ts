@@ -33,6 +33,23 @@ describe('a study in the address', () => {
 		expect(back).toEqual({ ok: true, value: { study: studied, bend } });
 	});
 
+	it('carries stiffeners, member lengths and every code choice', () => {
+		const study: Study = {
+			...studied,
+			code: {
+				...studied.code,
+				standard: 'EN1993-1-1:2022',
+				classAlpha: 'proportional',
+				useStressLevel: true,
+				ltbCurves: 'rolled-or-equivalent'
+			},
+			demands: [{ name: 'Wind', My: 40, unbracedLength: 4000, C1: 1.13, zg: 150 }],
+			stiffeners: { spacing: 1500, endPost: 'rigid' }
+		};
+		const back = addressedStudy(addressText({ study, bend: openingBend }));
+		expect(back).toEqual({ ok: true, value: { study, bend: openingBend } });
+	});
+
 	it('is safe in an address and stays short', () => {
 		const text = addressText({ study: studied, bend });
 		expect(text).toMatch(/^1\.[A-Za-z0-9_-]+$/);

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { codeSchema } from '$lib/api/code';
 import { demandSchema } from '$lib/api/demand';
 import { sectionSchema } from '$lib/api/section';
+import { stiffenersSchema } from '$lib/api/stiffeners';
 import { fail, ok, type Result } from '$lib/engine/result';
 import { prepareSection } from '$lib/engine/section/prepare';
 import type { SectionDefinition } from '$lib/engine/section/definition';
@@ -24,6 +25,7 @@ const addressSchema = z.object({
 		.array(demandSchema.extend({ name: z.string().max(120) }))
 		.min(1)
 		.max(60),
+	f: stiffenersSchema.optional(),
 	a: z.number().min(-360).max(360).optional(),
 	t: z.literal('curvature-zero').optional(),
 	k: z.number().min(-1000).max(1000).optional(),
@@ -45,6 +47,7 @@ export function addressText({ study, bend }: Addressed): string {
 		c: study.code,
 		...(study.strengthBasis === 'code-table' ? { b: 'code-table' } : {}),
 		d: [...study.demands],
+		...(study.stiffeners ? { f: study.stiffeners } : {}),
 		...(bend.axisAngle ? { a: bend.axisAngle } : {}),
 		...(bend.transverse === 'curvature-zero' ? { t: 'curvature-zero' } : {}),
 		k: Number(bend.ratio.toPrecision(6)),
@@ -94,7 +97,8 @@ function fromCompact(compact: z.output<typeof addressSchema>): Addressed {
 			section: compact.s as SectionDefinition,
 			code: compact.c ?? {},
 			strengthBasis: compact.b ?? 'product-standard',
-			demands: compact.d
+			demands: compact.d,
+			...(compact.f ? { stiffeners: compact.f } : {})
 		},
 		bend: {
 			axisAngle: compact.a ?? 0,

@@ -1,5 +1,5 @@
 import type { StrengthBasis } from '$lib/engine/material/material';
-import type { CodeChoice, Demand } from '$lib/engine/rules/result';
+import type { CodeChoice, Demand, Stiffeners } from '$lib/engine/rules/result';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 
 /** A demand case on the Bench: always named, so that the governing one can be. */
@@ -13,6 +13,8 @@ export interface Study {
 	readonly code: Partial<CodeChoice>;
 	readonly strengthBasis: StrengthBasis;
 	readonly demands: readonly DemandCase[];
+	/** Transverse stiffeners of the web; absent where there are none. */
+	readonly stiffeners?: Stiffeners | undefined;
 }
 
 /** How the section is bent at the moment: no part of what is saved or undone. */

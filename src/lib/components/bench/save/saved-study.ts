@@ -13,6 +13,7 @@ export function sectionToSave(
 			code: { ...study.code },
 			strengthBasis: study.strengthBasis,
 			demands: [...study.demands],
+			...(study.stiffeners ? { stiffeners: study.stiffeners } : {}),
 			...(study.shape ? { shape: study.shape } : {})
 		}
 	};
@@ -32,7 +33,8 @@ export function savedStudy({
 		section: definition as Study['section'],
 		code: { ...openingStudy.code, ...allowedCode((settings.code ?? {}) as Study['code']).code },
 		strengthBasis: settings.strengthBasis ?? openingStudy.strengthBasis,
-		demands: demands.length > 0 ? demands : [{ name: 'Case 1' }]
+		demands: demands.length > 0 ? demands : [{ name: 'Case 1' }],
+		...(settings.stiffeners ? { stiffeners: settings.stiffeners } : {})
 	};
 }
 
