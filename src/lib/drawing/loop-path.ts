@@ -17,6 +17,12 @@ function loopPath(loop: Loop, origin: Point): string {
 	return begin + loop.map((edge) => edgePath(edge, origin)).join('') + 'Z';
 }
 
+/** SVG path of a closed polygon, in mm from `origin`, as `loopsPath`. */
+export function polygonPath(corners: readonly Point[], origin: Point = { y: 0, z: 0 }): string {
+	if (corners.length === 0) return '';
+	return `M${corners.map((corner) => place(corner, origin)).join('L')}Z`;
+}
+
 const place = ({ y, z }: Point, origin: Point) => `${number(y - origin.y)} ${number(origin.z - z)}`;
 
 function startOf(edge: Edge): Point {

@@ -1,10 +1,11 @@
 import { blockLayout, depthToPx, type BlockLayout } from '$lib/drawing/block-layout';
 import { edgeStresses } from '$lib/drawing/edge-labels';
-import { loopsPath } from '$lib/drawing/loop-path';
+import { loopsPath, polygonPath } from '$lib/drawing/loop-path';
 import { strainSpan } from '$lib/drawing/span-steps';
 import { plateEdges, stressBlocks } from '$lib/drawing/stress-blocks';
 import { depthAt, depthParts, partStress, strainAt } from '$lib/drawing/stress-profile';
 import { depthOf, extentOf, turnedFrame } from '$lib/drawing/turned-frame';
+import type { EffectiveProperties } from '$lib/engine/rules/en1993/effective/effective-section';
 import type { ResponseState } from '$lib/engine/response/state';
 import type { PreparedSection } from '$lib/engine/section/prepared';
 import type { StrainLine } from '$lib/drawing/stress-profile';
@@ -12,6 +13,8 @@ import type { StrainLine } from '$lib/drawing/stress-profile';
 /** What the drawing shows: a section, how it is seen, and how it is bent. */
 export interface SceneSource {
 	readonly section: PreparedSection;
+	/** What of it counts in class 4; null where all of it does. */
+	readonly effective: Pick<EffectiveProperties, 'removed' | 'centroid'> | null;
 	/** Degrees of the level axis. */
 	readonly angle: number;
 	readonly line: StrainLine;
@@ -46,6 +49,18 @@ export class BlockScene {
 	readonly partPaths = $derived.by(() =>
 		this.#section.parts.map(({ region }) => loopsPath(region.loops, this.frame.origin))
 	);
+	/** Strips of plates that do not count. */
+	readonly removed = $derived.by(() => this.#source().effective?.removed ?? []);
+	readonly removedPaths = $derived.by(() =>
+		this.removed.map(({ corners }) => polygonPath(corners, this.frame.origin))
+	);
+	/** Height of the effective centroid above the gross one, mm; null where nothing is removed. */
+	readonly effectiveDepth = $derived.by(() => {
+		const effective = this.#source().effective;
+		return effective && effective.removed.length > 0
+			? depthOf(this.frame, effective.centroid)
+			: null;
+	});
 	/** Yield strain that scales the strain column: the least of all parts. */
 	readonly yieldStrain = $derived.by(() =>
 		Math.min(...this.parts.map(({ law }) => Math.min(law.yieldTension, law.yieldCompression)))
