@@ -21,7 +21,7 @@ export function stressBlocks(stresses: readonly PartStress[]): StressBlock[] {
 		const [top, bottom] = [edges[index] ?? 0, edges[index + 1] ?? 0];
 		const here = stresses.filter(({ part }) => part.top >= top && part.bottom <= bottom);
 		here
-			.filter((one, at) => here.findIndex((other) => sameStrength(one, other)) === at)
+			.filter((one, at) => here.findIndex((other) => sameStress(one, other)) === at)
 			.forEach((one, at) => blocks.push(cutBlock(one, top, bottom, at > 0)));
 	}
 	return joined(blocks);
@@ -33,6 +33,19 @@ export function plateEdges(stresses: readonly PartStress[]): number[] {
 	const size = Math.abs((depths[0] ?? 0) - (depths.at(-1) ?? 0)) || 1;
 	return depths.filter((depth, at) => at === 0 || (depths[at - 1] ?? 0) - depth > size * 1e-9);
 }
+
+const sameStress = (a: PartStress, b: PartStress) =>
+	a.past || b.past ? sameKnots(a.knots, b.knots) : sameStrength(a, b);
+
+const sameKnots = (a: readonly StressKnot[], b: readonly StressKnot[]) =>
+	a.length === b.length &&
+	a.every(({ depth, stress }, at) => {
+		const other = b[at]!;
+		return (
+			Math.abs(depth - other.depth) < 1e-6 * (1 + Math.abs(depth)) &&
+			Math.abs(stress - other.stress) < 1e-3
+		);
+	});
 
 const sameStrength = (a: PartStress, b: PartStress) =>
 	a.part.law === b.part.law ||

@@ -36,6 +36,8 @@ export interface PartStress {
 	readonly part: DepthPart;
 	readonly knots: readonly StressKnot[];
 	readonly yielded: readonly YieldedBand[];
+	/** Its stress follows from its past: parts of one steel may differ at one depth. */
+	readonly past?: boolean;
 }
 
 export const strainAt = (line: StrainLine, depth: number) => line.atOrigin - line.curvature * depth;

@@ -46,11 +46,12 @@ export class Bench {
 	constructor({ study, bend }: Addressed) {
 		this.#history = new History(study);
 		this.#chosenCase = bend.activeCase;
-		this.bend = new BendState(
-			() => this.section,
-			() => this.activeDemand.N ?? 0,
-			bend
-		);
+		const source = {
+			section: () => this.section,
+			demandN: () => this.activeDemand.N ?? 0,
+			residual: () => this.study.residual ?? ('none' as const)
+		};
+		this.bend = new BendState(source, bend);
 	}
 
 	get study(): Study {
@@ -84,12 +85,17 @@ export class Bench {
 		return this.issues.length > 0;
 	}
 
-	readonly analysis = $derived.by(() =>
-		analyse(this.section, {
-			code: this.code,
-			demands: [...this.demands],
-			stiffeners: this.study.stiffeners
-		})
+	readonly #asked = $derived.by(() => ({
+		code: this.code,
+		demands: [...this.demands],
+		stiffeners: this.study.stiffeners
+	}));
+
+	readonly analysis = $derived.by(() => analyse(this.section, this.#asked));
+
+	/** How the figures came about: made when first read, as it takes an analysis of its own. */
+	readonly explanation: Explanation = $derived.by(
+		() => analyse(this.section, { ...this.#asked, explain: true }).explain ?? {}
 	);
 
 	/** The case that uses most, or whose check is missing; null where no rule covers the section. */
@@ -128,7 +134,7 @@ export class Bench {
 	readonly countAbout: CountAbout = $derived.by(() => {
 		const { axisAngle } = this.bend;
 		const resistance = this.analysis.resistance;
-		if (!resistance || (this.activeDemand.N ?? 0) !== 0) return { positive: null, negative: null };
+		if (!resistance || this.bend.N !== 0) return { positive: null, negative: null };
 		if (axisAngle === 0) return { positive: resistance.MyRd, negative: resistance.MyRdNegative };
 		if (axisAngle === 90) return { positive: resistance.MzRd, negative: resistance.MzRd };
 		return { positive: null, negative: null };
@@ -138,7 +144,10 @@ export class Bench {
 		axisAngle: this.bend.axisAngle,
 		transverse: this.bend.transverse,
 		ratio: this.bend.ratio,
-		activeCase: this.#chosenCase
+		activeCase: this.#chosenCase,
+		...(this.bend.turns.length > 0 ? { turns: this.bend.turns } : {}),
+		...(this.bend.atTurn ? { atTurn: true } : {}),
+		...(this.bend.typedN === null ? {} : { typedN: this.bend.typedN })
 	}));
 
 	/** First message about a field, by its path. */

@@ -1,18 +1,25 @@
 import { describe, expect, it } from 'vitest';
 import { prepareSection } from '$lib/engine/section/prepare';
+import type { ResidualPattern } from '$lib/engine/material/residual/pattern';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 import { BendState } from './bend-state.svelte';
 import { buildKinds } from './opening-sections';
-import { openingBend, openingStudy } from './study';
+import { openingBend, openingStudy, type BendChoice } from './study';
 
-function bent(definition: SectionDefinition, choice: Partial<typeof openingBend> = {}, N = 0) {
+function bent(
+	definition: SectionDefinition,
+	choice: Partial<BendChoice> = {},
+	N = 0,
+	residual: ResidualPattern = 'none'
+) {
 	const built = prepareSection(definition);
 	if (!built.ok) throw new Error('cannot be built');
-	return new BendState(
-		() => built.value,
-		() => N,
-		{ ...openingBend, ...choice }
-	);
+	const source = {
+		section: () => built.value,
+		demandN: () => N,
+		residual: () => residual
+	};
+	return new BendState(source, { ...openingBend, ...choice });
 }
 
 const angle = buildKinds.find(({ key }) => key === 'angle')!.opening;

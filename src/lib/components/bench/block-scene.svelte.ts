@@ -1,11 +1,15 @@
 import { blockLayout, depthToPx, type BlockLayout } from '$lib/drawing/block-layout';
+import { cellFills } from '$lib/drawing/cell-fills';
 import { edgeStresses } from '$lib/drawing/edge-labels';
+import { historyStresses, stressTurns } from '$lib/drawing/history-stress';
 import { loopsPath, polygonPath } from '$lib/drawing/loop-path';
 import { strainSpan } from '$lib/drawing/span-steps';
 import { plateEdges, stressBlocks } from '$lib/drawing/stress-blocks';
 import { depthAt, depthParts, partStress, strainAt } from '$lib/drawing/stress-profile';
 import { depthOf, extentOf, turnedFrame } from '$lib/drawing/turned-frame';
 import type { EffectiveProperties } from '$lib/engine/rules/en1993/effective/effective-section';
+import type { History } from '$lib/engine/response/history/history';
+import { historyPicture } from '$lib/engine/response/history/history-picture';
 import type { ResponseState } from '$lib/engine/response/state';
 import type { PreparedSection } from '$lib/engine/section/prepared';
 import type { StrainLine } from '$lib/drawing/stress-profile';
@@ -19,6 +23,10 @@ export interface SceneSource {
 	readonly angle: number;
 	readonly line: StrainLine;
 	readonly state: ResponseState;
+	/** The steel as its past left it; null where the strain alone tells its stress. */
+	readonly past: History | null;
+	/** Let go: the stress is locked in. */
+	readonly released: boolean;
 	readonly width: number;
 	readonly height: number;
 	/** Span of the strain scale in multiples of the yield strain, held while an end is dragged. */
@@ -78,10 +86,23 @@ export class BlockScene {
 		const most = Math.max(Math.abs(this.topStrain), Math.abs(this.bottomStrain));
 		return this.#source().heldSpan ?? strainSpan(most / this.yieldStrain);
 	});
-	readonly stresses = $derived.by(() => this.parts.map((part) => partStress(part, this.line)));
+	readonly past = $derived.by(() => this.#source().past);
+	readonly released = $derived.by(() => this.#source().released);
+	readonly stresses = $derived.by(() =>
+		this.past
+			? historyStresses(this.parts, historyPicture(this.past, this.#angle))
+			: this.parts.map((part) => partStress(part, this.line))
+	);
+	/** Steel piece by piece, where its past matters. */
+	readonly fills = $derived.by(() => this.past && cellFills(this.past));
 	readonly blocks = $derived.by(() => stressBlocks(this.stresses));
+	/** Levels at which a stress is written. */
+	readonly #figureLevels = $derived.by(() => [
+		...plateEdges(this.stresses),
+		...(this.past ? stressTurns(this.stresses) : [])
+	]);
 	readonly edgeStresses = $derived.by(() =>
-		edgeStresses(this.blocks, plateEdges(this.stresses), 3 / this.layout.pxPerMm)
+		edgeStresses(this.blocks, this.#figureLevels, 3 / this.layout.pxPerMm)
 	);
 	/** Height of the neutral axis above the centroid, mm; null when it lies outside the steel. */
 	readonly neutralDepth = $derived.by(() => {

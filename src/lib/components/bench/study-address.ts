@@ -8,6 +8,7 @@ import { prepareSection } from '$lib/engine/section/prepare';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 import { allowedCode } from './allowed-code';
 import { openingBend, type BendChoice, type Study } from './study';
+import { mostTurns, type Turn } from './turns';
 
 /** Name of the query parameter that carries an unsaved study. */
 export const studyParameter = 'study';
@@ -29,7 +30,14 @@ const addressSchema = z.object({
 	a: z.number().min(-360).max(360).optional(),
 	t: z.literal('curvature-zero').optional(),
 	k: z.number().min(-1000).max(1000).optional(),
-	i: z.int().min(0).max(59).optional()
+	i: z.int().min(0).max(59).optional(),
+	r: z.enum(['rolled', 'welded']).optional(),
+	h: z
+		.array(z.union([z.number().min(-1000).max(1000), z.literal('release')]))
+		.max(mostTurns)
+		.optional(),
+	e: z.literal(1).optional(),
+	q: z.number().min(-1e9).max(1e9).optional()
 });
 
 export interface Addressed {
@@ -51,10 +59,17 @@ export function addressText({ study, bend }: Addressed): string {
 		...(bend.axisAngle ? { a: bend.axisAngle } : {}),
 		...(bend.transverse === 'curvature-zero' ? { t: 'curvature-zero' } : {}),
 		k: Number(bend.ratio.toPrecision(6)),
-		...(bend.activeCase === null ? {} : { i: bend.activeCase })
+		...(bend.activeCase === null ? {} : { i: bend.activeCase }),
+		...(study.residual ? { r: study.residual } : {}),
+		...(bend.turns?.length ? { h: bend.turns.map(shortTurn) } : {}),
+		...(bend.atTurn ? { e: 1 } : {}),
+		...(bend.typedN === undefined ? {} : { q: bend.typedN })
 	};
 	return addressVersion + '.' + toBase64Url(JSON.stringify(compact));
 }
+
+const shortTurn = (turn: Turn): Turn =>
+	typeof turn === 'number' ? Number(turn.toPrecision(6)) : turn;
 
 /** Reads `addressText` back; a sentence for the person when it cannot be used. */
 export function addressedStudy(text: string): Result<Addressed, string> {
@@ -98,13 +113,17 @@ function fromCompact(compact: z.output<typeof addressSchema>): Addressed {
 			code: compact.c ?? {},
 			strengthBasis: compact.b ?? 'product-standard',
 			demands: compact.d,
-			...(compact.f ? { stiffeners: compact.f } : {})
+			...(compact.f ? { stiffeners: compact.f } : {}),
+			...(compact.r ? { residual: compact.r } : {})
 		},
 		bend: {
 			axisAngle: compact.a ?? 0,
 			transverse: compact.t ?? 'moment-zero',
 			ratio: compact.k ?? openingBend.ratio,
-			activeCase: compact.i === undefined ? null : Math.min(compact.i, compact.d.length - 1)
+			activeCase: compact.i === undefined ? null : Math.min(compact.i, compact.d.length - 1),
+			...(compact.h ? { turns: compact.h } : {}),
+			...(compact.e ? { atTurn: true } : {}),
+			...(compact.q === undefined ? {} : { typedN: compact.q })
 		}
 	};
 }

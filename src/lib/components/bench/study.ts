@@ -1,6 +1,8 @@
 import type { StrengthBasis } from '$lib/engine/material/material';
+import type { ResidualPattern } from '$lib/engine/material/residual/pattern';
 import type { CodeChoice, Demand, Stiffeners } from '$lib/engine/rules/result';
 import type { SectionDefinition } from '$lib/engine/section/definition';
+import type { Turn } from './turns';
 
 /** A demand case on the Bench: always named, so that the governing one can be. */
 export type DemandCase = Demand & { name: string };
@@ -13,6 +15,8 @@ export interface Study {
 	readonly code: Partial<CodeChoice>;
 	readonly strengthBasis: StrengthBasis;
 	readonly demands: readonly DemandCase[];
+	/** Residual stress that bending begins with; none when absent. The code's figures do not know of it. */
+	readonly residual?: Exclude<ResidualPattern, 'none'> | undefined;
 	/** Transverse stiffeners of the web; absent where there are none. */
 	readonly stiffeners?: Stiffeners | undefined;
 }
@@ -26,6 +30,12 @@ export interface BendChoice {
 	readonly ratio: number;
 	/** Which demand case gives N and the ruler; null for the governing one. */
 	readonly activeCase: number | null;
+	/** Where bending turned before; none when absent. */
+	readonly turns?: readonly Turn[];
+	/** It stands where the last turn left it. */
+	readonly atTurn?: boolean;
+	/** N held while bending, kN, where it is not the demand's. */
+	readonly typedN?: number;
 }
 
 export const openingStudy: Study = {

@@ -14,6 +14,7 @@ export function sectionToSave(
 			strengthBasis: study.strengthBasis,
 			demands: [...study.demands],
 			...(study.stiffeners ? { stiffeners: study.stiffeners } : {}),
+			...(study.residual ? { residual: study.residual } : {}),
 			...(study.shape ? { shape: study.shape } : {})
 		}
 	};
@@ -34,9 +35,13 @@ export function savedStudy({
 		code: { ...openingStudy.code, ...allowedCode((settings.code ?? {}) as Study['code']).code },
 		strengthBasis: settings.strengthBasis ?? openingStudy.strengthBasis,
 		demands: demands.length > 0 ? demands : [{ name: 'Case 1' }],
-		...(settings.stiffeners ? { stiffeners: settings.stiffeners } : {})
+		...(settings.stiffeners ? { stiffeners: settings.stiffeners } : {}),
+		...residualOf(settings.residual)
 	};
 }
+
+const residualOf = (kept: unknown): Pick<Study, 'residual'> =>
+	kept === 'rolled' || kept === 'welded' ? { residual: kept } : {};
 
 /** What `savedStudy` changes of a section saved when other code values were allowed; or empty. */
 export const savedChanges = ({ settings }: Pick<SectionRecord, 'settings'>): string =>

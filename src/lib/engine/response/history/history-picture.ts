@@ -18,12 +18,21 @@ export interface YieldedArea {
 	loops: Loop[];
 }
 
+/** Steel at its yield strength along the cut of one part, from the lower to the upper distance, mm. */
+export interface YieldedStretch {
+	part: string;
+	sense: 'tension' | 'compression';
+	from: number;
+	to: number;
+}
+
 /** Stress in the present state of a history, seen along the normal of an axis. */
 export interface HistoryPicture {
 	/** Direction of the axis, degrees from y; the normal points to its left (up, for 0). */
 	angle: number;
 	/** One line for every stretch of steel that a cut along the normal meets; a jump of stress is two points at one distance. */
 	lines: StressLine[];
+	yielded: YieldedStretch[];
 	areas: YieldedArea[];
 }
 
@@ -38,14 +47,15 @@ export function historyPicture(
 ): HistoryPicture {
 	const { section, cells, layers, strain } = history;
 	const ofPart = section.parts.map((_, part) => cells.filter((cell) => cell.part === part));
+	const cuts = section.parts.map((_, part) =>
+		partCut(history, part, ofPart[part]!, (angle * Math.PI) / 180)
+	);
 	return {
 		angle,
-		lines: section.parts.flatMap(({ name }, part) =>
-			partLines(history, part, ofPart[part]!, (angle * Math.PI) / 180).map((points) => ({
-				part: name,
-				points
-			}))
+		lines: cuts.flatMap(({ lines }, part) =>
+			lines.map((points) => ({ part: section.parts[part]!.name, points }))
 		),
+		yielded: cuts.flatMap(({ yielded }) => yielded),
 		areas: cells.flatMap((cell): YieldedArea[] => {
 			const sense = yieldSense(cell, layers[cell.part]![0]!, strain);
 			if (!sense) return [];
@@ -63,26 +73,25 @@ function directionOf({ y, z }: LinearField): number {
 	return degrees - 180 * Math.ceil((degrees - 90) / 180);
 }
 
-function partLines(
-	{ section, layers, strain }: History,
-	part: number,
-	cells: Cell[],
-	angle: number
-) {
-	const { region, thickness } = section.parts[part]!;
+function partCut({ section, layers, strain }: History, part: number, cells: Cell[], angle: number) {
+	const { name, region, thickness } = section.parts[part]!;
 	const edges = edgesAbout(region.loops, section.gross.centroid);
 	const along = cutThrough(edges, thickness, angle);
 	const frame = frameAt({ y: 0, z: 0 }, angle);
+	const yielded: YieldedStretch[] = [];
 	const found = cells.flatMap((cell) => {
 		const stress = stressField(cell, layers[part]!, strain);
-		return stretchesAt(cell.edges, angle, along).map((stretch) =>
+		const sense = yieldSense(cell, layers[part]![0]!, strain);
+		const stretches = stretchesAt(cell.edges, angle, along);
+		if (sense) yielded.push(...stretches.map(([from, to]) => ({ part: name, sense, from, to })));
+		return stretches.map((stretch) =>
 			stretch.map((distance) => {
 				const at = pointIn(frame, along, distance);
 				return { distance, strain: valueAt(strain, at), stress: valueAt(stress, at) };
 			})
 		);
 	});
-	return joined(found.sort((a, b) => a[0]!.distance - b[0]!.distance));
+	return { lines: joined(found.sort((a, b) => a[0]!.distance - b[0]!.distance)), yielded };
 }
 
 const valueAt = ({ c, y, z }: LinearField, at: { y: number; z: number }): number =>
