@@ -13,6 +13,7 @@ export default defineConfig({
 				test: {
 					name: 'unit',
 					sequence: { groupOrder: 0 },
+					testTimeout: 30_000,
 					environment: 'node',
 					include: ['src/**/*.test.ts', 'tests/published/**/*.test.ts', 'tests/house/**/*.test.ts'],
 					exclude: ['src/**/*.svelte.test.ts']
@@ -24,6 +25,7 @@ export default defineConfig({
 				test: {
 					name: 'component',
 					sequence: { groupOrder: 1 },
+					testTimeout: 30_000,
 					environment: 'jsdom',
 					include: ['src/**/*.svelte.test.ts'],
 					setupFiles: ['tests/setup/component.ts']
