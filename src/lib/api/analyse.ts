@@ -60,6 +60,10 @@ const momentSchema = z.object({
 
 const elementSchema = z.object({
 	part: z.string(),
+	element: z
+		.string()
+		.optional()
+		.meta({ description: 'Which element of the part is the worst: `topFlange.left`.' }),
 	type: z.enum(['internal', 'outstand', 'tubular', 'angle']),
 	stress: z.enum(['compression', 'bending', 'combined', 'tension']),
 	c: z.number().meta({ 'x-unit': 'mm' }),
@@ -143,8 +147,17 @@ const rulerFields = {
 
 const token = z.union([
 	z.object({ text: z.string() }),
-	z.object({ quantity: z.enum(['moment', 'force']), value: z.number() }),
-	z.object({ quantity: z.literal('ratio'), value: z.number(), decimals: z.number() })
+	z.object({
+		quantity: z.enum(['moment', 'force']),
+		value: z.number(),
+		figure: z.string().optional()
+	}),
+	z.object({
+		quantity: z.literal('ratio'),
+		value: z.number(),
+		decimals: z.number(),
+		figure: z.string()
+	})
 ]);
 
 const verdictSchema = z.object({

@@ -1,10 +1,12 @@
-import type { VerdictToken } from '$lib/engine/rules/verdict-tokens';
+import type { VerdictFigure, VerdictToken } from '$lib/engine/rules/verdict-tokens';
 import { formatNumber, formatQuantity, type Preferences } from '$lib/units';
 
 /** A piece of a sentence as shown: `strong` for the figures in it. */
 export interface ShownPiece {
 	readonly text: string;
 	readonly strong: boolean;
+	/** Which of the engine's figures it is; absent for words and for what was put in. */
+	readonly figure?: VerdictFigure | undefined;
 }
 
 /** The verdict's tokens in the reader's units. */
@@ -18,7 +20,7 @@ export const shownPieces = (
 			token.quantity === 'ratio'
 				? formatNumber(token.value, preferences, { decimals: token.decimals })
 				: formatQuantity(token.value, token.quantity, preferences, { digits: 4, unit: true });
-		return { text, strong: true };
+		return { text, strong: true, figure: token.figure };
 	});
 
 /** "a, b and c". */

@@ -6,6 +6,8 @@ export const workingKey = {
 	gross: (figure: string) => `gross.${figure}`,
 	moment: (figure: string) => `moment.${figure}`,
 	squashLoad: 'squashLoad',
+	/** Every part at its own strength in tension. */
+	yieldLoad: 'yieldLoad',
 	/** Limits of one part in one case: `class.plusMy.web.internal`. */
 	limits: (name: CaseName, part: string, type: string) => `class.${name}.${part}.${type}`,
 	/** What they come from: `class.plusMy.web.internal.alpha`; the limits alone are `.1`, `.2`, `.3`. */

@@ -32,6 +32,7 @@ export function momentWorkings(
 	add(workingKey.moment('plasticNeutralAxisZ'), axisBody(section, 'z', moment.plasticNeutralAxisZ));
 	add(workingKey.moment('plasticNeutralAxisY'), axisBody(section, 'y', moment.plasticNeutralAxisY));
 	add(workingKey.squashLoad, squashBody(section, squash));
+	add(workingKey.yieldLoad, yieldBody(section));
 }
 
 const kNm = (value: number) => ({ value, unit: 'kNm' });
@@ -195,6 +196,20 @@ function axisBody(
 			}
 		],
 		result: { value, unit: 'mm' }
+	};
+}
+
+/** Every part at its own strength in tension, kN. */
+function yieldBody(section: PreparedSection): Body {
+	const parts = partAreas(section);
+	return {
+		title: 'Yield load: every part at its own strength in tension',
+		formula: `N_y = (${partSum(parts, (i) => `A_${i}·fy_${i}`)})·10^-3`,
+		inputs: [
+			...partInputs(parts, 'A', 'mm²', ({ area }) => area),
+			...partInputs(parts, 'fy', 'N/mm²', ({ fy }) => fy)
+		],
+		result: { value: parts.reduce((sum, { area, fy }) => sum + area * fy * 1e-3, 0), unit: 'kN' }
 	};
 }
 

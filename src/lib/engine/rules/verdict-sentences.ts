@@ -17,14 +17,14 @@ export function countSentence(view: VerdictView): VerdictToken[] {
 	if (countable === 0) return [words(`Class ${view.class}. ${nothingLeft(view)}`)];
 	const head =
 		view.basis === 'effective-class-2' ? 'Class 3, web as Class 2' : `Class ${view.class}`;
-	return [words(`${head}. Count `), moment(countable), ...countedAs(view)];
+	return [words(`${head}. Count `), moment(countable, 'countable'), ...countedAs(view)];
 }
 
 /** "Class 1 in tension. Count 2000 kN." */
 function forceSentence(view: VerdictView): VerdictToken[] {
 	const head = `Class ${view.class} in ${view.N < 0 ? 'compression' : 'tension'}`;
 	if (view.countableForce === null) return [words(nothingCounted(view, head, 'Nothing'))];
-	return [words(`${head}. Count `), force(view.countableForce), words('.')];
+	return [words(`${head}. Count `), force(view.countableForce, 'countableForce'), words('.')];
 }
 
 function nothingCounted(view: VerdictView, head: string, what: string): string {
@@ -134,17 +134,25 @@ function beyond(view: VerdictView): VerdictToken[] {
 	if (countable === null)
 		return [
 			words(' Neither the '),
-			moment(firstYield),
+			moment(firstYield, 'firstYield'),
 			words(' at first yield nor anything beyond is to be counted.')
 		];
 	if (!isPlain(view)) {
 		const left = fullPlastic - countable;
 		return left > 0
-			? [words(' The last '), moment(left), words(' of the full block are not to be counted.')]
+			? [
+					words(' The last '),
+					moment(left, 'left'),
+					words(' of the full block are not to be counted.')
+				]
 			: [];
 	}
 	const may = view.basis === 'plastic' ? 'may be counted' : 'are not to be counted';
-	return [words(' The '), moment(fullPlastic - firstYield), words(` beyond first yield ${may}.`)];
+	return [
+		words(' The '),
+		moment(fullPlastic - firstYield, 'beyond'),
+		words(` beyond first yield ${may}.`)
+	];
 }
 
 /** Whether what counts ends just at first yield or at the full block. */

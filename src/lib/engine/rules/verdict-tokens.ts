@@ -1,24 +1,44 @@
+/** Which figure of the demand, or of the part that decides, a number in a sentence is. */
+export type VerdictFigure =
+	'countable' | 'countableForce' | 'firstYield' | 'beyond' | 'left' | 'slenderness' | 'limit';
+
 /** A piece of a sentence: words, or a number that the screen writes in the reader's units. */
 export type VerdictToken =
 	| { readonly text: string }
-	| { readonly quantity: 'moment' | 'force'; readonly value: number }
-	| { readonly quantity: 'ratio'; readonly value: number; readonly decimals: number };
+	| {
+			readonly quantity: 'moment' | 'force';
+			readonly value: number;
+			/** Absent for what was put in. */
+			readonly figure?: VerdictFigure;
+	  }
+	| {
+			readonly quantity: 'ratio';
+			readonly value: number;
+			readonly decimals: number;
+			readonly figure: VerdictFigure;
+	  };
 
 export const words = (text: string): VerdictToken => ({ text });
-export const moment = (value: number): VerdictToken => ({ quantity: 'moment', value });
-export const force = (value: number): VerdictToken => ({ quantity: 'force', value });
+export const moment = (value: number, figure: VerdictFigure): VerdictToken => ({
+	quantity: 'moment',
+	value,
+	figure
+});
+export const force = (value: number, figure?: VerdictFigure): VerdictToken =>
+	figure ? { quantity: 'force', value, figure } : { quantity: 'force', value };
 
-/** Two ratios side by side with as many decimals as it takes to tell them apart. */
+/** A slenderness beside its limit, with as many decimals as it takes to tell them apart. */
 export function ratioPair(a: number, b: number): [VerdictToken, VerdictToken] {
 	const written = (value: number, more: number) => value.toFixed(decimals(value) + more);
 	let more = 0;
 	while (more < 6 && written(a, more) === written(b, more)) more++;
-	const ratio = (value: number): VerdictToken => ({
+	const ratio = (value: number, figure: VerdictFigure): VerdictToken => ({
 		quantity: 'ratio',
 		value,
-		decimals: decimals(value) + more
+		decimals: decimals(value) + more,
+		figure
 	});
-	return [ratio(a), ratio(b)];
+	return [ratio(a, 'slenderness'), ratio(b, 'limit')];
 }
 
 const decimals = (value: number) => (Math.abs(value) < 10 ? 2 : 1);

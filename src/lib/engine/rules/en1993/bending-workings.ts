@@ -118,7 +118,7 @@ export function elasticMomentWorking(model: EnModel, sense: AxisSense, value: nu
 				symbol: 'M_el',
 				value: first,
 				unit: 'kNm',
-				from: `first yield of any fibre, ${yieldFrom(sense)}`
+				from: yieldFrom(model, sense)
 			}
 		],
 		value
@@ -130,7 +130,15 @@ const blockFrom = (sense: AxisSense) =>
 		? workingKey.moment(`plastic${axisOf(sense)}`)
 		: 'plastic block turned round';
 
-const yieldFrom = (sense: AxisSense) => workingKey.moment(`firstYield${axisOf(sense)}`);
+/** The contract's first yield is that of the positive sense. */
+const yieldFrom = ({ moments }: EnModel, sense: AxisSense) => {
+	const axis = axisOf(sense);
+	const positive = moments[axis === 'Y' ? 'plusMy' : 'plusMz'].firstYield ?? 0;
+	const first = moments[sense].firstYield ?? 0;
+	return Math.abs(first - positive) <= same * positive
+		? workingKey.moment(`firstYield${axis}`)
+		: 'first yield of any fibre in this sense';
+};
 
 /** Annex B of the 2022 edition: (M_pl − (M_pl − M_el) β_ep)/γM0. */
 export function interpolatedMomentWorking(
@@ -148,7 +156,7 @@ export function interpolatedMomentWorking(
 			`M_c,Rd = (M_pl − (M_pl − M_el)·min(max(${shares}, 0), 1))/γM0`,
 			[
 				{ symbol: 'M_pl', value: plastic.moment ?? 0, unit: 'kNm', from: blockFrom(sense) },
-				{ symbol: 'M_el', value: firstYield ?? 0, unit: 'kNm', from: yieldFrom(sense) },
+				{ symbol: 'M_el', value: firstYield ?? 0, unit: 'kNm', from: yieldFrom(model, sense) },
 				...rows.flatMap(({ symbol, slenderness, epsilon }) => [
 					{ symbol: `λ_${symbol}`, value: slenderness, unit: '', from: 'slenderness c/t or d/t' },
 					{ symbol: `ε_${symbol}`, value: epsilon, unit: '', from: '√(235/fy) of that part' }

@@ -11,6 +11,10 @@ export function explainCheck(
 	body: (() => Omit<Working, 'title' | 'clause' | 'edition'>) | null
 ): void {
 	const { demand, name, clause, value, limit, utilisation } = check;
+	const key = resistanceKeys[name]?.(demand);
+	const known = key !== undefined && workings?.get(key)?.result.value === limit;
+	const unit = key === undefined ? '' : 'kN';
+	const from = known ? key : 'resistance beside the other effects';
 	workings?.add(workingKey.check(demand, name), () => ({
 		title: `${name.charAt(0).toUpperCase()}${name.slice(1)}, ${demand}`,
 		clause,
@@ -18,13 +22,21 @@ export function explainCheck(
 		...(body?.() ?? {
 			formula: 'U = E_d/R_d',
 			inputs: [
-				{ symbol: 'E_d', value, unit: '', from: 'demand' },
-				{ symbol: 'R_d', value: limit, unit: '', from: 'resistance' }
+				{ symbol: 'E_d', value, unit, from: 'demand' },
+				{ symbol: 'R_d', value: limit, unit, from }
 			],
 			result: { value: utilisation, unit: '' }
 		})
 	}));
 }
+
+/** Resistances, kN, that plain checks hold against. */
+const resistanceKeys: Readonly<Record<string, (demand: string) => string>> = {
+	'shear along y': (demand) => workingKey.reduced(demand, 'VyRd'),
+	'shear along z': (demand) => workingKey.reduced(demand, 'VzRd'),
+	compression: () => workingKey.resistance('NRd'),
+	tension: () => workingKey.resistance('NtRd')
+};
 
 /** A check of an effect against its resistance, with its working. */
 export function simpleCheck(
