@@ -191,3 +191,23 @@ export function widthAt({ levels, lines, arcs }: Profile, level: number): number
 	}
 	return width;
 }
+
+/** Width of the slice at a level (mm), ∫along (mm²) and ∫along² (mm³) over it; at a step those above it. */
+export function chordAt({ levels, lines, arcs }: Profile, level: number): [number, number, number] {
+	const slab = slabAt(levels, level);
+	if (slab >= arcs.length || level < levels[0]!) return [0, 0, 0];
+	const at = slab * coefficients;
+	const x = level - levels[slab]!;
+	let width = lines[at]! + lines[at + 1]! * x;
+	let first = lines[at + 2]! + x * (lines[at + 3]! + x * lines[at + 4]!);
+	let second = lines[at + 5]! + x * (lines[at + 6]! + x * (lines[at + 7]! + x * lines[at + 8]!));
+	for (const { arc } of arcs[slab]!) {
+		const u = level - arc.across;
+		const half = Math.sqrt(Math.max(0, (arc.radius - u) * (arc.radius + u)));
+		const along = arc.along + arc.side * half;
+		width += arc.sign * along;
+		first += (arc.sign * along * along) / 2;
+		second += (arc.sign * along * along * along) / 3;
+	}
+	return [width, first, second];
+}

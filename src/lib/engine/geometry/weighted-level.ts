@@ -43,7 +43,13 @@ function areaFunction(profiles: readonly Profile[], weights: readonly number[]) 
 
 function allLevels(profiles: readonly Profile[]): Float64Array {
 	if (profiles.length === 1) return profiles[0]!.levels;
-	return Float64Array.from(profiles.flatMap(({ levels }) => [...levels])).sort();
+	const all = new Float64Array(profiles.reduce((sum, { levels }) => sum + levels.length, 0));
+	let at = 0;
+	for (const { levels } of profiles) {
+		all.set(levels, at);
+		at += levels.length;
+	}
+	return all.sort();
 }
 
 /** Index of the last level that holds; −1 when none does. The property holds up to some level. */

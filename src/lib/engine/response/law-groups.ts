@@ -36,7 +36,18 @@ export interface Mechanics {
 	readonly profiles: (angle: number) => readonly Profile[];
 }
 
+/** Mechanics of sections that are still in use: a prepared section never changes. */
+const made = new WeakMap<PreparedSection, Mechanics>();
+
 export function mechanicsOf(section: PreparedSection): Mechanics {
+	const known = made.get(section);
+	if (known) return known;
+	const mechanics = newMechanics(section);
+	made.set(section, mechanics);
+	return mechanics;
+}
+
+function newMechanics(section: PreparedSection): Mechanics {
 	const groups = lawGroups(section);
 	const { centroid, area } = section.gross;
 	const { left, right, bottom, top } = section.bounds;
@@ -114,16 +125,21 @@ function cutsOf({ kinks, offsets, slopes }: StressStrainLaw) {
 	};
 }
 
-/** Profiles by angle; the few last asked for are kept, since one analysis asks for the same again. */
+/** So many turned views are kept beside those along y and z. */
+const keptTurned = 8;
+
+/** Profiles by angle: those along y and z stay, of others the few last ones, since one analysis asks for the same again. */
 function turnedProfiles(groups: readonly LawGroup[], centroid: Point) {
 	const kept = new Map<number, readonly Profile[]>();
+	const turned: number[] = [];
 	return (angle: number): readonly Profile[] => {
 		const known = kept.get(angle);
 		if (known) return known;
 		const frame = frameAt(centroid, angle);
 		const made = groups.map(({ loops }) => profileOf(loops, frame));
-		if (kept.size >= 8) kept.clear();
 		kept.set(angle, made);
+		if (angle % (Math.PI / 2) !== 0 && turned.push(angle) > keptTurned)
+			kept.delete(turned.shift()!);
 		return made;
 	};
 }

@@ -1,5 +1,5 @@
 import { momentCount } from '../geometry/flank-moments';
-import { momentsBelow, type Profile } from '../geometry/profile';
+import { chordAt, momentsBelow, type Profile } from '../geometry/profile';
 import { weightedLevel } from '../geometry/weighted-level';
 import type { PreparedSection } from '../section/prepared';
 import { mechanicsOf, type LawGroup, type Mechanics } from './law-groups';
@@ -20,6 +20,8 @@ interface PlasticForces {
 	M: number;
 	T: number;
 	level: number;
+	/** How fast the moment moves as the neutral axis turns, N·mm a radian. */
+	turning: () => number;
 }
 
 /**
@@ -88,7 +90,22 @@ function plasticForces(
 		M += forces.M;
 		T += forces.T;
 	});
-	return { M, T, level };
+	return { M, T, level, turning: () => turningOf(profiles, weights, level) };
+}
+
+/** Second moment of the strengths along the neutral axis about their middle, N·mm. */
+function turningOf(
+	profiles: readonly Profile[],
+	weights: readonly number[],
+	level: number
+): number {
+	const sums = [0, 0, 0];
+	profiles.forEach((profile, i) => {
+		const chord = chordAt(profile, level);
+		for (let k = 0; k < 3; k++) sums[k]! += weights[i]! * chord[k]!;
+	});
+	const [width, first, second] = sums as [number, number, number];
+	return width > 0 ? second - (first * first) / width : 0;
 }
 
 /** Tension fy below the level, compression fyc above it. */
@@ -102,39 +119,38 @@ function blockForces(profile: Profile, fy: number, fyc: number, level: number) {
 	};
 }
 
-/** How far the neutral axis turns from the asked axis until the transverse moment is zero; radians. */
+/** Share of the greatest moment below which the moment across the asked axis is rounding. */
+const nothingAcross = { straight: 1e-13, turned: 2e-15 };
+/** The neutral axis is known to this angle, radians. */
+const sameAngle = 1e-15;
+
+/**
+ * How far the neutral axis turns from the asked axis until the transverse moment is zero; radians. The
+ * block's moment moves along the neutral axis as that turns (normality), so that the transverse moment
+ * only rises over half a turn: Newton's method in a bracket.
+ */
 function plasticTurn(
 	mechanics: Mechanics,
 	block: (turned: number) => PlasticForces | null
 ): number | null {
-	const across = (turned: number) => {
-		const at = block(turned);
-		return at === null ? NaN : at.M * Math.sin(turned) + at.T * Math.cos(turned);
-	};
 	const scale = mechanics.squash * mechanics.reach;
-	const straight = across(0);
-	if (Number.isNaN(straight)) return null;
-	if (Math.abs(straight) <= 1e-13 * scale) return 0;
-	let [low, high] = straight < 0 ? [0, Math.PI / 2] : [-Math.PI / 2, 0];
-	let [atLow, atHigh] = [across(low), across(high)];
-	if (atLow > 0 || atHigh < 0) return null;
-	let side = 0;
-	for (let i = 0; i < 200 && high - low > 1e-15; i++) {
-		const secant = (low * atHigh - high * atLow) / (atHigh - atLow);
-		const middle = i % 4 === 3 || !(secant > low && secant < high) ? (low + high) / 2 : secant;
-		const value = across(middle);
-		if (Math.abs(value) <= 1e-15 * scale) return middle;
-		if (value < 0) {
-			[low, atLow] = [middle, value];
-			if (side === -1) atHigh /= 2;
-			side = -1;
-		} else {
-			[high, atHigh] = [middle, value];
-			if (side === 1) atLow /= 2;
-			side = 1;
-		}
+	let [low, high] = [-Math.PI / 2, Math.PI / 2];
+	let turned = 0;
+	for (let i = 0; i < 200; i++) {
+		const at = block(turned);
+		if (at === null) return null;
+		const [c, s] = [Math.cos(turned), Math.sin(turned)];
+		const across = at.M * s + at.T * c;
+		const nothing = turned === 0 ? nothingAcross.straight : nothingAcross.turned;
+		if (Math.abs(across) <= nothing * scale) return turned;
+		if (across < 0) low = turned;
+		else high = turned;
+		const step = -across / (at.turning() * c);
+		const newton = turned + step;
+		if (high - low <= sameAngle || Math.abs(step) <= sameAngle) break;
+		turned = newton > low && newton < high ? newton : (low + high) / 2;
 	}
-	return (low + high) / 2;
+	return Math.PI / 2 - Math.abs(turned) > 2 * sameAngle ? turned : null;
 }
 
 /** Full plastic moments about y and z (kNm, N = 0, other curvature 0) and their neutral axes from the definition's origin. */

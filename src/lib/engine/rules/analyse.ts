@@ -30,7 +30,7 @@ export interface AnalyseRequest {
 	explain?: boolean | undefined;
 }
 
-/** Everything the engine says of a section under a code and demands; nothing is kept between calls. */
+/** Everything the engine says of a section under a code and demands. */
 export function analyse(section: PreparedSection, request: AnalyseRequest = {}): Analysis {
 	const code = codeChoice(request.code);
 	const mechanics = mechanicsOf(section);

@@ -4,7 +4,7 @@ import type { Part } from '../../section/prepared';
 import type { ElasticUse } from '../result';
 import type { DemandCase } from './demand-case';
 import { elasticField, type StressField } from './elastic-stress-check';
-import { shearStressAt } from './shear-stress';
+import { shearStressOf } from './shear-stress';
 
 /**
  * Greatest √(σ² + 3τ²)/fyd of the gross section under a demand, 6.2.1(5): at the top and bottom edge
@@ -16,13 +16,15 @@ export function elasticUse({ context: { model }, demand, effects }: DemandCase):
 	const { Vy = 0, Vz = 0 } = demand;
 	if (Vy !== 0) return null;
 	const field = elasticField(section.gross, effects);
-	const levels = levelsOf(section.parts, section.gross.centroid.z);
+	const extents = section.parts.map(partExtent);
+	const levels = levelsOf(extents, section.gross.centroid.z);
+	const sheared = Vz === 0 ? () => 0 : shearStressOf(section, 'z');
 	let worst: ElasticUse | null = null;
 	for (const level of levels) {
-		const tau = Vz === 0 ? 0 : shearStressAt(section, Vz, 'z', level);
+		const tau = sheared(Vz, level);
 		if (tau === null) return null;
-		for (const part of section.parts) {
-			const { low, high } = partExtent(part);
+		for (const [i, part] of section.parts.entries()) {
+			const { low, high } = extents[i]!;
 			if (level < low || level > high) continue;
 			const sigma = stressAt(field, part, section.gross.centroid, level);
 			const use = useAt(model.code.gammaM0, part, sigma, tau);
@@ -37,9 +39,8 @@ const level = frameAt({ y: 0, z: 0 }, Math.PI / 2);
 
 const partExtent = ({ region }: Part) => extentAcross(region.loops, upright);
 
-function levelsOf(parts: readonly Part[], centroid: number): number[] {
-	const edges = parts.flatMap((part) => Object.values(partExtent(part)));
-	return [...new Set([...edges, centroid])];
+function levelsOf(extents: readonly ReturnType<typeof partExtent>[], centroid: number): number[] {
+	return [...new Set([...extents.flatMap(({ low, high }) => [low, high]), centroid])];
 }
 
 /** The greater of both side edges of a part at a level, N/mm². */
