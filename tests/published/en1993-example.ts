@@ -12,7 +12,7 @@ export interface WorkedExample {
 	readonly expected: Readonly<Record<string, number>>;
 }
 
-const file = new URL('./worked-examples.json', import.meta.url);
+const file = new URL('../../data/published/worked-examples.json', import.meta.url);
 const examples = JSON.parse(readFileSync(file, 'utf8')) as readonly WorkedExample[];
 
 export function workedExample(id: string): WorkedExample {

@@ -6,7 +6,6 @@ import { historyPicture } from '../../src/lib/engine/response/history/history-pi
 import { bending } from '../../src/lib/engine/response/respond';
 import { prepareSection } from '../../src/lib/engine/section/prepare';
 import type { SectionDefinition } from '../../src/lib/engine/section/definition';
-import examples from './worked-examples.json';
 
 const straight = { axisAngle: 0, transverse: 'moment-zero', N: 0 } as const;
 
@@ -16,37 +15,8 @@ const prepared = (definition: SectionDefinition) => {
 	return section.value;
 };
 
-const expectedOf = (id: string) => examples.find((example) => example.id === id)!.expected;
-
-describe('Beer & Johnston, Concept Application 4.6: residual stresses of the bar of 4.5 (PT02, from memory)', () => {
-	const history = historyOf(
-		prepared({ kind: 'flat', b: 50, h: 120, grade: { fy: 240, E: 200_000 } })
-	);
-	if (!history.ok) throw new Error(history.error.message);
-	const loaded = bendingFrom(history.value, straight).after({ moment: 36.8 })!;
-	const released = bendingFrom(loaded, straight).after({ moment: 0 })!;
-	const { points } = historyPicture(released).lines[0]!;
-
-	it('keeps 66.7 N/mm² at the surfaces: tension where it was compressed', () => {
-		expect(expectedOf('PT02')).toMatchObject({ residual_top: 66.7, residual_core_edge: 35.5 });
-		expect(Math.abs(points.at(-1)!.stress - 66.7)).toBeLessThan(0.1);
-		expect(Math.abs(points[0]!.stress + 66.7)).toBeLessThan(0.1);
-	});
-
-	it('keeps 35.5 N/mm² at the edges of the elastic core, 40 mm from the middle', () => {
-		const edge = points.find(({ distance }) => Math.abs(distance - 40) < 0.05)!;
-		expect(Math.abs(edge.stress + 35.5)).toBeLessThan(0.1);
-	});
-
-	it('stays bent with a radius of 225 m', () => {
-		const { curvature } = bendingFrom(released, straight).atMoment(0);
-		expect(Math.abs(1 / curvature! / 225 - 1)).toBeLessThan(0.005);
-	});
-});
-
 describe('Beer & Johnston, Sample Problem 4.5: built-up I 12 × 16 in (PT03, from memory)', () => {
 	const [inch, ksi] = [25.4, 6.894757293];
-	const kipInch = 0.112984829;
 	const section = prepared({
 		...{ kind: 'i', fabrication: 'welded', h: 16 * inch, b: 12 * inch },
 		...{ tf: inch, tw: 0.75 * inch, grade: { fy: 50 * ksi, E: 29_000 * ksi } }
@@ -54,14 +24,6 @@ describe('Beer & Johnston, Sample Problem 4.5: built-up I 12 × 16 in (PT03, fro
 	const history = historyOf(section);
 	if (!history.ok) throw new Error(history.error.message);
 	const bent = bendingFrom(history.value, straight);
-
-	it('first yields at 9525 kip·in and has plastic flanges at 10 230', () => {
-		expect(expectedOf('PT03')).toMatchObject({ My_kipin: 9525, M_flanges_plastic: 10230 });
-		expect(Math.abs(bent.firstYield.moment! / kipInch / 9525 - 1)).toBeLessThan(1e-3);
-		// the fronts reach the inner faces of the flanges, 7 of 8 in from the middle
-		const state = bent.atCurvature((bent.firstYield.curvature! * 8) / 7);
-		expect(Math.abs(state.moment! / kipInch / 10230 - 1)).toBeLessThan(1e-3);
-	});
 
 	it('keeps what superposition leaves after release: M y/I less than yield, κ − M/EI', () => {
 		const curvature = (bent.firstYield.curvature! * 8) / 7;
