@@ -43,6 +43,8 @@ export type SectionClass = 1 | 2 | 3 | 4;
 
 export interface ClassifiedElement {
 	part: string;
+	/** Which element of the part: `topFlange.left`. Absent where the part is judged as a whole. */
+	element?: string;
 	type: 'internal' | 'outstand' | 'tubular' | 'angle';
 	stress: 'compression' | 'bending' | 'combined' | 'tension';
 	c: number;

@@ -14,6 +14,14 @@ it('tells a flange between the webs from its outstand', () => {
 	]);
 });
 
+it('names the worse outstand only where the sides differ, and an angle as a whole', () => {
+	const right = { ...free, element: 'topFlange.right' };
+	expect(plateTitle(right, [right])).toBe('Top flange');
+	expect(plateTitle(right, [right], true)).toBe('Top flange, right');
+	const angle = { part: 'verticalLeg', type: 'angle' } as const;
+	expect(plateTitle(angle, [angle])).toBe('Angle as a whole');
+});
+
 it('says only the part where there is one kind of it', () => {
 	expect(plateTitle(free, [free, free])).toBe('Top flange');
 });

@@ -56,7 +56,10 @@ export function classifyPlate(
 	const elastic = at(stress.elastic, scale.elastic);
 	const { fy, epsilon } = element;
 	const share = plastic?.share ?? elastic?.share;
-	if (share === undefined) return { row: inTension(standard, element), fy, plastic, elastic };
+	if (share === undefined) {
+		const row = { ...inTension(standard, element), element: element.id };
+		return { row, fy, plastic, elastic };
+	}
 	const psi = elastic?.ratio ?? Number.NEGATIVE_INFINITY;
 	const plasticEnd = (plastic ?? elastic)?.end ?? 'tip';
 	const elasticEnd = (elastic ?? plastic)?.end ?? 'tip';
@@ -65,6 +68,7 @@ export function classifyPlate(
 			? internalLimits(standard, epsilon, share, psi)
 			: outstandLimits(epsilon, { alpha: share, plasticEnd, psi, elasticEnd });
 	const row = described(standard, element, limits, stressName(share, psi));
+	row.element = element.id;
 	row.alpha = share;
 	if (elastic) row.psi = psi;
 	return { row, fy, plastic, elastic };
