@@ -1,27 +1,33 @@
 import type { Point } from './boundary';
 
+/** Side of a cell in tolerances: wide, so that most points are looked for in one cell only. */
+const cellSide = 8;
+
 /**
  * Points that lie within `tolerance` of each other made one. Returns the nodes (first point of each
  * group stands for it) and, for every point, the index of its node.
  */
 export function snappedPoints(points: readonly Point[], tolerance: number) {
 	const origin = points[0] ?? { y: 0, z: 0 };
+	const side = cellSide * tolerance;
 	const nodes: Point[] = [];
 	const cells = new Map<string, number[]>();
-	const cell = ({ y, z }: Point) => [
-		Math.floor((y - origin.y) / tolerance),
-		Math.floor((z - origin.z) / tolerance)
-	];
+	const along = (value: number, from: number) => Math.floor((value - from) / side);
 	const nearest = (point: Point): number | undefined => {
-		const [i, j] = cell(point) as [number, number];
-		return around(i, j)
-			.flatMap((key) => cells.get(key) ?? [])
-			.find((node) => distance(nodes[node]!, point) <= tolerance);
+		const top = along(point.z + tolerance, origin.z);
+		const right = along(point.y + tolerance, origin.y);
+		for (let i = along(point.y - tolerance, origin.y); i <= right; i++)
+			for (let j = along(point.z - tolerance, origin.z); j <= top; j++)
+				for (const node of cells.get(`${i},${j}`) ?? [])
+					if (distance(nodes[node]!, point) <= tolerance) return node;
+		return undefined;
 	};
 	const added = (point: Point): number => {
-		const key = cell(point).join();
+		const key = `${along(point.y, origin.y)},${along(point.z, origin.z)}`;
 		const node = nodes.push(point) - 1;
-		cells.set(key, [...(cells.get(key) ?? []), node]);
+		const cell = cells.get(key);
+		if (cell) cell.push(node);
+		else cells.set(key, [node]);
 		return node;
 	};
 	const indices = points.map((point) => nearest(point) ?? added(point));
@@ -29,6 +35,3 @@ export function snappedPoints(points: readonly Point[], tolerance: number) {
 }
 
 const distance = (a: Point, b: Point): number => Math.hypot(a.y - b.y, a.z - b.z);
-
-const around = (i: number, j: number): string[] =>
-	[-1, 0, 1].flatMap((di) => [-1, 0, 1].map((dj) => `${i + di},${j + dj}`));

@@ -127,6 +127,8 @@ function wallsOf(strips: readonly Strip[], stops: readonly (readonly Stop[])[]):
 }
 
 function nodeAt(nodes: Point[], point: Point, reach: number): number {
-	const found = nodes.findIndex(({ y, z }) => Math.hypot(y - point.y, z - point.z) <= reach);
+	const found = nodes.findIndex(
+		({ y, z }) => Math.abs(y - point.y) <= reach && Math.hypot(y - point.y, z - point.z) <= reach
+	);
 	return found >= 0 ? found : nodes.push(point) - 1;
 }

@@ -51,7 +51,8 @@ export function thinWalls(lines: MidLines): TorsionFigures {
 function warpedWall(nodes: readonly Point[], wall: Wall, warping: Float64Array): WarpedWall {
 	const [a, b] = [nodes[wall.from]!, nodes[wall.to]!];
 	const length = Math.hypot(b.y - a.y, b.z - a.z);
-	return { ...wall, a, b, length, wa: warping[wall.from]!, wb: warping[wall.to]! };
+	const { from, to, thickness } = wall;
+	return { from, to, thickness, a, b, length, wa: warping[from]!, wb: warping[to]! };
 }
 
 function leastShear(
