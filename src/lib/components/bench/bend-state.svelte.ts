@@ -12,6 +12,8 @@ import { mostTurns, turnedSection, type Turn, type TurnedSection } from './turns
 
 /** Reach of slider, keys and handle, in multiples of the curvature at first yield. */
 export const mostRatio = 10;
+/** Moments below this share of full plastic are rounding. */
+const momentNoise = 1e-9;
 /** Reach of what is typed. */
 const mostTyped = 1000;
 
@@ -70,6 +72,11 @@ export class BendState {
 	readonly fault: Note | null = $derived.by(() =>
 		this.#start && !this.#start.ok ? this.#start.error : null
 	);
+	/** Why unloading is not followed for this steel, in a sentence; null when it is. */
+	readonly unloadFault: string | null = $derived.by(() => {
+		const free = historyOf(this.#source.section());
+		return free.ok ? null : free.error.message;
+	});
 	/** Section and steel at rest with their residual stress; null where the past does not matter. */
 	readonly start: Past | null = $derived.by(() => (this.#start?.ok ? this.#start.value : null));
 
@@ -78,6 +85,11 @@ export class BendState {
 	);
 	readonly #bentOn: HistoryBending | null = $derived.by(
 		() => this.turned && bendingFrom(this.turned.history, this.path)
+	);
+
+	/** Unbent and free of N, with the residual stress alone; null where the past does not matter. */
+	readonly restState: ResponseState | null = $derived.by(
+		() => this.start && bendingFrom(this.start, { ...this.path, N: 0 }).atCurvature(0)
 	);
 
 	/** Bending on from where the last turn left the section. */
@@ -117,6 +129,13 @@ export class BendState {
 	}
 
 	readonly state: ResponseState = $derived.by(() => this.bender.atCurvature(this.curvature));
+
+	/** Moment of the state, kNm, without the last digits' noise about zero; null where there is none. */
+	readonly moment: number | null = $derived.by(() => {
+		const { moment } = this.state;
+		const most = this.fresh.plasticMoment ?? 0;
+		return moment !== null && Math.abs(moment) < momentNoise * most ? 0 : moment;
+	});
 
 	/** The steel as it is now, where its past matters. */
 	readonly present: Past | null = $derived.by(() =>

@@ -23,9 +23,22 @@ export function residualPattern(
 	section: PreparedSection,
 	pattern: Exclude<ResidualPattern, 'none'>
 ): Result<readonly StressedPiece[], Note> {
+	const pieces = piecesOf(section, pattern);
+	return typeof pieces === 'string' ? fail(notCovered(pieces)) : ok(pieces);
+}
+
+/** Why no published pattern covers the section, in a sentence; null when one does. */
+export function residualGap(
+	section: PreparedSection,
+	pattern: Exclude<ResidualPattern, 'none'>
+): string | null {
+	const pieces = piecesOf(section, pattern);
+	return typeof pieces === 'string' ? pieces : null;
+}
+
+function piecesOf(section: PreparedSection, pattern: Exclude<ResidualPattern, 'none'>) {
 	const pieces = pattern === 'rolled' ? rolledPattern(section) : weldedPattern(section);
-	if (typeof pieces === 'string') return fail(notCovered(pieces));
-	return isBearable(section, pieces) ? ok(pieces) : fail(notCovered(tooWeak));
+	return typeof pieces === 'string' || isBearable(section, pieces) ? pieces : tooWeak;
 }
 
 const notCovered = (why: string): Note => ({
