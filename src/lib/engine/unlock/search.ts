@@ -20,13 +20,27 @@ export interface Present {
 	readonly analysis: Analysis;
 }
 
-/** Analysis of a girder; null where it cannot be built. */
+/** For a better class, at most this many times the section's mass: more is another section. */
+const heaviest = 2;
+
+/** kg/m; what a demand takes is not bounded. */
+export const mostMass = (goal: Goal, { analysis }: Present): number =>
+	goal === 'class' ? heaviest * analysis.gross.mass : Number.POSITIVE_INFINITY;
+
+/** Mass, kg/m; null where it cannot be built. */
+export function massOf({ definition }: Girder, { strengthBasis }: Standing): number | null {
+	const section = prepareSection(definition, strengthBasis);
+	return section.ok ? section.value.gross.mass : null;
+}
+
+/** Analysis of a girder; null where it cannot be built, or is heavier than `most` kg/m. */
 export function analysisOf(
 	{ definition, stiffeners }: Girder,
-	standing: Standing
+	standing: Standing,
+	most = Number.POSITIVE_INFINITY
 ): Analysis | null {
 	const section = prepareSection(definition, standing.strengthBasis);
-	if (!section.ok) return null;
+	if (!section.ok || section.value.gross.mass > most) return null;
 	const { code, demands } = standing;
 	return analyse(section.value, { code, demands, stiffeners: stiffeners ?? undefined });
 }
@@ -65,15 +79,23 @@ const changeOf = ({ part, field, value }: Variable, to: number): Change => ({
 	to
 });
 
-/** The option that a trial is, by a full analysis; null when it does not reach the goal. */
-export function verified(
-	trial: Trial,
-	goal: Goal,
-	present: Present,
-	standing: Standing
-): UnlockOption | null {
-	const analysis = analysisOf(trial.girder, standing);
-	if (analysis === null || !isReached(goal, present.analysis, analysis)) return null;
+/** What a full analysis says of a trial. */
+export interface Verified {
+	/** Null when it does not reach the goal. */
+	readonly option: UnlockOption | null;
+	/** Full plastic moment along the demand that decides, kNm: no less steel counts more. */
+	readonly ceiling: number | null;
+}
+
+export function verified(trial: Trial, goal: Goal, present: Present, standing: Standing): Verified {
+	const analysis = analysisOf(trial.girder, standing, mostMass(goal, present));
+	if (analysis === null) return { option: null, ceiling: null };
+	const ceiling = analysis.verdict.ruler.fullPlastic;
+	if (!isReached(goal, present.analysis, analysis)) return { option: null, ceiling };
+	return { option: optionOf(trial, analysis, present), ceiling };
+}
+
+function optionOf(trial: Trial, analysis: Analysis, present: Present): UnlockOption {
 	const { resistance, gross, verdict } = analysis;
 	return {
 		changes: trial.changes,

@@ -120,3 +120,36 @@ describe('sections with nothing to unlock', () => {
 		expect(found(rolled).notes[0]?.code).toBe('comes-as-it-is');
 	});
 });
+
+describe('unlocking free plates', () => {
+	const plates: SectionDefinition = {
+		kind: 'plates',
+		grade: 'S355',
+		plates: [
+			{ name: 'top', width: 400, thickness: 20, y: 200, z: 930, angle: 0 },
+			{ name: 'web', width: 900, thickness: 16, y: 200, z: 470, angle: 90 },
+			{ name: 'bottom', width: 400, thickness: 20, y: 200, z: 10, angle: 0 }
+		],
+		joins: [
+			{ a: 'top', b: 'web', weldLeg: 8 },
+			{ a: 'bottom', b: 'web', weldLeg: 8 }
+		]
+	};
+
+	it('never thickens a plate into what stands on it', () => {
+		for (const { changes } of found(plates).options)
+			expect(changes.some(({ part, field }) => field === 'thickness' && part !== 'web')).toBe(
+				false
+			);
+	});
+});
+
+describe('a search in fine steps', () => {
+	it('proposes nothing that weighs more than twice the girder', () => {
+		const fine = { ...stock, thicknesses: [20, 25, 30, 40, 60, 80], widthStep: 10 };
+		const result = unlocked({ ...asked(girder), stock: fine });
+		const before = result?.before.gross.mass ?? 0;
+		expect(result?.options.length).toBeGreaterThan(1);
+		for (const { mass } of result?.options ?? []) expect(mass).toBeLessThanOrEqual(2 * before);
+	});
+});

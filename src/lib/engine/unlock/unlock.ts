@@ -1,17 +1,21 @@
 import type { Note } from '../result';
 import type { Analysis } from '../rules/analysis';
+import { firstReached } from './first-reached';
 import { goalOf, type Goal } from './goal';
 import type { PlateStock } from './plate-stock';
 import type { Girder, UnlockOption } from './proposal';
 import {
 	analysisOf,
+	massOf,
+	mostMass,
 	runsOf,
 	smallestFirst,
 	trialOf,
 	verified,
 	type Present,
 	type Run,
-	type Standing
+	type Standing,
+	type Verified
 } from './search';
 import type { Variable } from './variable';
 import { variablesOf } from './variables';
@@ -68,32 +72,70 @@ interface Hunt {
 }
 
 /** Verifies a trial and keeps it when it is the smallest of its kind. */
-function tried(hunt: Hunt, steps: readonly (readonly [Run, number])[]): UnlockOption | null {
+function tried(hunt: Hunt, steps: readonly (readonly [Run, number])[]): Verified {
 	const { girder, goal, present, standing, best } = hunt;
-	const option = verified(trialOf(girder, steps), goal, present, standing);
-	if (option === null) return null;
+	const found = verified(trialOf(girder, steps), goal, present, standing);
+	const { option } = found;
+	if (option === null) return found;
 	const key = keyOf(option, goal);
 	const other = best.get(key);
 	if (!other || smallestFirst(option, other) < 0) best.set(key, option);
-	return option;
+	return found;
 }
 
-/**
- * Each run from its nearest value on. With more steel the first that reaches the full block is the
- * smallest; with less steel the last before it is lost.
- */
+/** Each run from its nearest value on. */
 function* singles(hunt: Hunt, variables: readonly Variable[]): Generator<number, void> {
 	const runs = variables.flatMap((variable) => runsOf(variable));
 	for (const [i, run] of runs.entries()) {
-		let reached = false;
-		for (const at of run.values.keys()) {
-			const option = tried(hunt, [[run, at]]);
-			if (option === null && reached) break;
-			reached ||= option !== null;
-			if (option && option.addedMass >= 0 && (hunt.goal === 'demand' || option.class <= 2)) break;
-		}
+		if (isLess(run)) lessSteel(hunt, run);
+		else moreSteel(hunt, run);
 		yield ((i + 1) / runs.length) * 0.5;
 	}
+}
+
+/** Whether a run takes steel away; stiffeners set closer do not. */
+const isLess = ({ variable: { value, field }, values }: Run) =>
+	field !== 'spacing' && values[0]! < value;
+
+/** With less steel the last before the goal is lost, or before even the full block would miss it. */
+function lessSteel(hunt: Hunt, run: Run): void {
+	const { verdict } = hunt.present.analysis;
+	const { countable, demand } = verdict.ruler;
+	const asked = hunt.goal === 'class' ? countable : demand;
+	let reached = false;
+	for (const at of run.values.keys()) {
+		const { option, ceiling } = tried(hunt, [[run, at]]);
+		if (option === null && reached) return;
+		reached ||= option !== null;
+		if (ceiling !== null && asked !== null && ceiling <= asked) return;
+	}
+}
+
+/** With more steel the first that reaches the goal, and the first that reaches the full block. */
+function moreSteel(hunt: Hunt, run: Run): void {
+	const known = new Map<number, Verified>();
+	const at = (place: number) => {
+		const found = known.get(place) ?? tried(hunt, [[run, place]]);
+		known.set(place, found);
+		return found.option;
+	};
+	const count = withinMass(hunt, run);
+	const first = firstReached(count, 0, (place) => at(place) !== null);
+	const option = first === null ? null : at(first);
+	if (first === null || option === null) return;
+	if (hunt.goal === 'class' && option.class > 2)
+		firstReached(count, first + 1, (place) => (at(place)?.class ?? 4) <= 2);
+}
+
+/** How many values of a run are not too heavy. */
+function withinMass({ girder, goal, present, standing }: Hunt, run: Run): number {
+	if (goal === 'demand') return run.values.length;
+	const most = mostMass(goal, present);
+	const tooHeavy = (at: number) => {
+		const mass = massOf(trialOf(girder, [[run, at]]).girder, standing);
+		return mass !== null && mass > most;
+	};
+	return firstReached(run.values.length, 0, tooHeavy) ?? run.values.length;
 }
 
 /**
@@ -117,7 +159,7 @@ function* pairs(hunt: Hunt, variables: readonly Variable[]): Generator<number, v
 				tried(hunt, [
 					[a, atA],
 					[b, atB]
-				])
+				]).option
 			)
 				atB--;
 			else atA++;

@@ -2,6 +2,7 @@ import type { TeeSection } from '../section/definition';
 import { boxVariables } from './box-variables';
 import { iVariables } from './i-variables';
 import type { PlateStock } from './plate-stock';
+import { platesVariables } from './plates-variables';
 import type { Girder } from './proposal';
 import { around, thicker, variable, type Variable } from './variable';
 
@@ -33,12 +34,13 @@ export function variablesOf({ definition, stiffeners }: Girder, stock: PlateStoc
 					})
 				)
 			];
+		case 'plates':
+			return platesVariables(definition, stock);
 		case 'channel':
 		case 'angle':
 		case 'rectangular-hollow':
 		case 'circular-hollow':
 		case 'round':
-		case 'plates':
 		case 'outline':
 			return [];
 		default:
