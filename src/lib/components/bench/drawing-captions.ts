@@ -4,14 +4,14 @@ import type { Study } from './study';
 
 /** What the drawing shows beside the bent section, in words: what is not counted, and stiffeners. */
 export function drawingCaptions(
-	view: Pick<EffectiveView, 'case' | 'pass' | 'shown'>,
+	view: Pick<EffectiveView, 'case' | 'pass' | 'drawn'>,
 	study: Pick<Study, 'stiffeners'>,
 	preferences: Preferences
 ): string[] {
 	const { stiffeners } = study;
 	const captions: string[] = [];
-	if (view.shown && view.shown.removed.length > 0)
-		captions.push(removedCaption(view, view.shown, preferences));
+	if (view.drawn && view.drawn.removed.length > 0)
+		captions.push(removedCaption(view, view.drawn, preferences));
 	if (stiffeners)
 		captions.push(
 			`Not drawn: transverse stiffeners every ${formatQuantity(stiffeners.spacing, 'length', preferences, { digits: 5, trim: true, unit: true })}, ${stiffeners.endPost} end posts.`
@@ -21,7 +21,7 @@ export function drawingCaptions(
 
 function removedCaption(
 	{ case: on, pass }: Pick<EffectiveView, 'case' | 'pass'>,
-	{ centroidShiftY, centroidShiftZ }: NonNullable<EffectiveView['shown']>,
+	{ centroidShiftY, centroidShiftZ }: NonNullable<EffectiveView['drawn']>,
 	preferences: Preferences
 ): string {
 	const head = `Dashed: not counted under ${on === 'N' ? 'compression' : on}, ${pass === 'once' ? 'one pass' : 'converged'}.`;

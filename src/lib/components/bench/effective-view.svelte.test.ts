@@ -26,6 +26,19 @@ describe('the effective section on show', () => {
 		expect(bench.effectiveView.case).toBe('+My');
 	});
 
+	it('takes nothing away on the drawing while the demand leaves the section whole', () => {
+		// The opening girder is class 4 under compression alone, and class 3 under its moment.
+		const bench = new Bench({ study: openingStudy, bend });
+		expect(bench.effectiveView.cases).toContain('N');
+		expect(bench.effectiveView.drawn).toBeNull();
+		bench.changeCase(0, { My: undefined, N: -100 });
+		expect(bench.effectiveView.drawn?.removed.length).toBeGreaterThan(0);
+		bench.changeCase(0, { N: 100 });
+		expect(bench.effectiveView.drawn).toBeNull();
+		bench.effectiveView.choose('N');
+		expect(bench.effectiveView.drawn).not.toBeNull();
+	});
+
 	it('gives up a chosen case that is no longer class 4', () => {
 		const bench = new Bench({ study: slender, bend });
 		bench.effectiveView.choose('−My');

@@ -28,11 +28,13 @@ export class EffectiveView {
 		return order.filter((one) => byCase[one] !== undefined);
 	});
 
-	readonly case: EffectiveCase | null = $derived.by(() => {
-		const wanted = [this.#chosen, caseOf(this.#demand())];
-		const found = wanted.find((one) => one !== null && this.cases.includes(one));
-		return found ?? this.cases[0] ?? null;
+	/** Case that was chosen or that the demand on show is in; null where all of the section counts for it. */
+	readonly #own: EffectiveCase | null = $derived.by(() => {
+		const wanted = [this.#chosen, ...casesOf(this.#demand())];
+		return wanted.find((one) => one !== null && this.cases.includes(one)) ?? null;
 	});
+
+	readonly case: EffectiveCase | null = $derived.by(() => this.#own ?? this.cases[0] ?? null);
 
 	readonly #both = $derived.by(() =>
 		this.case === null ? null : (this.#answer()?.byCase[this.case] ?? null)
@@ -45,16 +47,26 @@ export class EffectiveView {
 		this.pass === 'once' ? this.once : this.converged
 	);
 
+	/** What the drawing shows: nothing while the demand on show leaves the section whole. */
+	readonly drawn: EffectiveProperties | null = $derived.by(() =>
+		this.#own === null ? null : this.shown
+	);
+
 	choose(wanted: EffectiveCase): void {
 		this.#chosen = wanted;
 	}
 }
 
-/** The pure case that a demand is nearest to: its moment's greater part, or its N alone. */
-function caseOf(state: DemandState | undefined): EffectiveCase | null {
-	if (!state || (state.moment === 0 && state.N === 0)) return null;
-	if (state.moment === 0) return 'N';
-	const angle = (state.axisAngle * Math.PI) / 180;
+/** Pure cases whose reductions a class 4 demand takes, the nearest first: that of its moment, then N. */
+function casesOf(state: DemandState | undefined): EffectiveCase[] {
+	if (state?.class !== 4) return [];
+	const pressed: EffectiveCase[] = state.N < 0 ? ['N'] : [];
+	return state.moment === 0 ? pressed : [bendingCase(state.axisAngle), ...pressed];
+}
+
+/** The axis of the greater part of the moment, with its sense. */
+function bendingCase(axisAngle: number): EffectiveCase {
+	const angle = (axisAngle * Math.PI) / 180;
 	const [y, z] = [Math.cos(angle), Math.sin(angle)];
 	if (Math.abs(y) >= Math.abs(z) - 1e-9) return y > 0 ? '+My' : '−My';
 	return z > 0 ? '+Mz' : '−Mz';

@@ -23,6 +23,22 @@ export const shownPieces = (
 		return { text, strong: true, figure: token.figure };
 	});
 
+/** A piece with the mark that closes it, so that no line begins with a comma. */
+export interface GluedPiece extends ShownPiece {
+	readonly mark: string;
+}
+
+/** Moves a mark at the start of a piece to the figure before it. */
+export function gluedPieces(pieces: readonly ShownPiece[]): GluedPiece[] {
+	const markOf = (piece: ShownPiece | undefined) =>
+		piece && !piece.strong ? (/^[.,;:]+/.exec(piece.text)?.[0] ?? '') : '';
+	return pieces.map((piece, at) => ({
+		...piece,
+		text: pieces[at - 1]?.strong ? piece.text.slice(markOf(piece).length) : piece.text,
+		mark: piece.strong ? markOf(pieces[at + 1]) : ''
+	}));
+}
+
 /** "a, b and c". */
 export function listed(names: readonly string[]): string {
 	if (names.length < 2) return names.join('');
