@@ -3,6 +3,7 @@ import { analyseAnswerSchema, analyseQuerySchema, analyseRequestSchema } from '.
 import { interactionAnswerSchema, interactionRequestSchema } from './interaction';
 import { responseAnswerSchema, responseRequestSchema } from './response';
 import { healthSchema } from './health';
+import { proofListSchema, proofQuerySchema } from './proof';
 import { unlockAnswerSchema, unlockRequestSchema } from './unlock';
 import { firmOperations } from './firm-operations';
 import { sectionOperations } from './section-operations';
@@ -95,6 +96,17 @@ export const operations: readonly Operation[] = [
 			'Rows [id, designation, family, standard, mass in kg/m, h in mm, b in mm] for searching on the spot. Carries an ETag.',
 		answer: null,
 		refusals: []
+	},
+	{
+		id: 'proof',
+		method: 'get',
+		path: '/api/v1/proof',
+		title: 'Published values and ours',
+		description:
+			'One page of the published values that the engine is held against, each with its source, our own value and what may lie between them; with the counts of all. A value that is not met is there like any other. Needs no account.',
+		query: proofQuerySchema,
+		answer: proofListSchema,
+		refusals: [400]
 	},
 	{
 		id: 'health',
