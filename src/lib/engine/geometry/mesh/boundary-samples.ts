@@ -16,8 +16,15 @@ export interface Samples {
 	segments: Segment[];
 }
 
-/** Boundary points as close as the size field asks; loops that touch share the point. */
-export function boundarySamples(loops: readonly Loop[], { at }: SizeField): Samples {
+/**
+ * Boundary points as close as the size field asks; loops that touch share the point. Null as soon as
+ * there are more than `most`.
+ */
+export function boundarySamples(
+	loops: readonly Loop[],
+	{ at }: SizeField,
+	most: number
+): Samples | null {
 	const samples: Samples = { points: [], sizes: [], segments: [] };
 	const edges = loops.flat();
 	const known = new Map<string, number>();
@@ -30,15 +37,16 @@ export function boundarySamples(loops: readonly Loop[], { at }: SizeField): Samp
 	};
 	for (const loop of loops) {
 		const starts = loop.map((edge) => node(edgePoint(edge, 0)));
-		loop.forEach((edge, i) => {
-			const inside = edgeStops(edge, at, longestPiece(edge, edges));
+		for (const [i, edge] of loop.entries()) {
+			const inside = edgeStops(edge, at, longestPiece(edge, edges), most);
 			const stops = [
 				starts[i]!,
 				...inside.map((share) => node(edgePoint(edge, share))),
 				starts[(i + 1) % loop.length]!
 			];
+			if (samples.points.length > most) return null;
 			for (let k = 1; k < stops.length; k++) addSegment(samples, stops[k - 1]!, stops[k]!, edge);
-		});
+		}
 	}
 	return samples;
 }
@@ -55,11 +63,12 @@ function addSegment({ points, sizes, segments }: Samples, from: number, to: numb
 	segments.push({ from, to, arc: edge.kind === 'arc' ? edge : null });
 }
 
-/** Shares of an edge at which it is cut: halved until each piece is as short as wanted. */
-function edgeStops(edge: Edge, sizeAt: SizeField['at'], longest: number): number[] {
+/** Shares of an edge at which it is cut: halved until each piece is as short as wanted, or there are more than `most`. */
+function edgeStops(edge: Edge, sizeAt: SizeField['at'], longest: number, most: number): number[] {
 	const length = edgeSpan(edge);
 	const stops: number[] = [];
 	const halve = (from: number, to: number): void => {
+		if (stops.length > most) return;
 		const middle = (from + to) / 2;
 		const piece = (to - from) * length;
 		if (piece <= longest && piece <= sizeAt(edgePoint(edge, middle))) return;

@@ -3,7 +3,7 @@ import { edgeDirection, edgePoint, edgeSpan } from './placed-loops';
 import { wallThickness } from './wall-thickness';
 
 /** A place that asks for elements of a size. */
-interface Source extends Point {
+export interface Source extends Point {
 	readonly size: number;
 }
 
@@ -26,26 +26,39 @@ const usualGrowth = 0.3;
 /**
  * Small elements where the stress function bends: at corners and along arcs, in proportion to the
  * wall there; growing with the distance. Along plain walls it is a polynomial that quadratic
- * elements of any length carry exactly. `coarser` multiplies every size.
+ * elements of any length carry exactly.
  */
-export function sizeField(loops: readonly Loop[], coarser: number): SizeField {
+export function sizeSources(loops: readonly Loop[]): Source[] {
 	const edges = loops.flat();
-	const sources = loops.flatMap((loop) => [
+	return loops.flatMap((loop) => [
 		...loop.flatMap((edge, i) => cornerSource(loop.at(i - 1)!, edge, edges)),
 		...loop.flatMap((edge) => arcSource(edge, edges))
 	]);
+}
+
+/** The sizes that sources ask for around them; `coarser` multiplies every size. */
+export function sizeField(sources: readonly Source[], coarser: number): SizeField {
 	const growth = usualGrowth * coarser;
-	const at = ({ y, z }: Point) => {
+	return { at: sizeFrom(sources, coarser, growth), growth };
+}
+
+/** Asked for every piece of boundary, so that the sources stand in plain rows of numbers. */
+function sizeFrom(sources: readonly Source[], coarser: number, growth: number): SizeField['at'] {
+	const ys = Float64Array.from(sources, ({ y }) => y);
+	const zs = Float64Array.from(sources, ({ z }) => z);
+	const sizes = Float64Array.from(sources, ({ size }) => size * coarser);
+	return ({ y, z }) => {
 		let size = 1;
-		for (const source of sources) {
-			const [dy, dz] = [source.y - y, source.z - z];
-			const reach = (size - source.size * coarser) / growth;
-			if (reach > 0 && dy * dy + dz * dz < reach * reach)
-				size = source.size * coarser + growth * Math.sqrt(dy * dy + dz * dz);
+		for (let i = 0; i < sizes.length; i++) {
+			const reach = (size - sizes[i]!) / growth;
+			if (reach <= 0) continue;
+			const dy = ys[i]! - y;
+			const dz = zs[i]! - z;
+			const square = dy * dy + dz * dz;
+			if (square < reach * reach) size = sizes[i]! + growth * Math.sqrt(square);
 		}
 		return size;
 	};
-	return { at, growth };
 }
 
 /** Just beside a corner, where the wall of an edge is measured, as a share of the edge. */

@@ -24,17 +24,20 @@ export type Refusal = 'too-many-points' | 'not-settled';
 /**
  * Delaunay triangles of the area to the left of `loops`, sides no longer than the size field asks.
  * Boundary pieces that Delaunay's rule passes over are halved until it keeps them all; triangles too
- * large are given a point at their circumcentre.
+ * large are given a point at their circumcentre. A generator: it pauses after every round.
  */
-export function triangulationOf(
+export function* triangulating(
 	loops: readonly Loop[],
 	sizes: SizeField,
 	mostPoints: number
-): Triangulation | Refusal {
-	const samples = boundarySamples(loops, sizes);
+): Generator<void, Triangulation | Refusal> {
+	const samples = boundarySamples(loops, sizes, mostPoints);
+	yield;
+	if (samples === null) return 'too-many-points';
 	for (let round = 0; round < mostRounds; round++) {
 		if (samples.points.length > mostPoints) return 'too-many-points';
 		const mesh = delaunay(samples);
+		yield;
 		if (halvedMissing(samples, mesh)) continue;
 		markInside(mesh, samples.segments);
 		if (!refined(samples, mesh, sizes.growth)) return mesh;

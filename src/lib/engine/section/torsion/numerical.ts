@@ -3,9 +3,9 @@ import { frameAt, pointIn } from '../../geometry/frame';
 import { nodeOrder } from '../../geometry/mesh/node-order';
 import { cutLoops, placedLoops } from '../../geometry/mesh/placed-loops';
 import { quadraticMesh, type QuadraticMesh } from '../../geometry/mesh/quadratic-mesh';
-import { sizeField } from '../../geometry/mesh/size-field';
+import { sizeField, sizeSources } from '../../geometry/mesh/size-field';
 import { elementStiffness } from '../../geometry/mesh/stiffness';
-import { triangulationOf } from '../../geometry/mesh/triangulation';
+import { triangulating } from '../../geometry/mesh/triangulation';
 import type { Note } from '../../result';
 import { contact } from '../../tolerances';
 import type { PreparedSection } from '../prepared';
@@ -46,18 +46,22 @@ const attempts = [
  * Saint-Venant's torsion of any section, solved on quadratic triangles with true arcs: torsion constant
  * mm⁴ (the middle between a bound from above and one from below), warping constant mm⁶ about the
  * shear centre, and shear centre from the definition's origin (Trefftz). All parts are taken to have
- * the same shear modulus, and parts that touch along an edge to be one. Pure and deterministic.
+ * the same shear modulus, and parts that touch along an edge to be one. Pure and deterministic. A
+ * generator, so that it can pause: it yields every few milliseconds.
  */
-export function numericalTorsion(section: PreparedSection): NumericalTorsionOutcome {
+export function* torsionSolving(
+	section: PreparedSection
+): Generator<void, NumericalTorsionOutcome> {
 	const { contours, bounds, gross } = section;
 	const merged = mergedPlates(section.definition);
 	if (merged.unjoined) return { notes: merged.notes };
 	const scale = Math.hypot(bounds.right - bounds.left, bounds.top - bounds.bottom);
 	const frame = frameAt(gross.centroid, (gross.principalAngle * Math.PI) / 180);
-	const mesh = meshOf(cutLoops(placedLoops(contours, frame, scale), contact.ofSize));
+	const mesh = yield* meshing(cutLoops(placedLoops(contours, frame, scale), contact.ofSize));
 	const stiffness = mesh && elementStiffness(mesh);
 	if (!mesh || !stiffness) return { notes: [noMesh] };
-	const solved = solvedOn(mesh, stiffness);
+	yield;
+	const solved = yield* solving(mesh, stiffness);
 	const inPlace = ({ y, z }: Point) => pointIn(frame, y * scale, z * scale);
 	const whole = mesh.pieces === 1;
 	const [below, above] = [solved.below * scale ** 4, solved.torsionAbove * scale ** 4];
@@ -75,17 +79,32 @@ export function numericalTorsion(section: PreparedSection): NumericalTorsionOutc
 	};
 }
 
-function meshOf(loops: readonly Loop[]): QuadraticMesh | null {
+/** The same solution at once. */
+export function numericalTorsion(section: PreparedSection): NumericalTorsionOutcome {
+	const steps = torsionSolving(section);
+	for (;;) {
+		const { done, value } = steps.next();
+		if (done) return value;
+	}
+}
+
+function* meshing(loops: readonly Loop[]): Generator<void, QuadraticMesh | null> {
+	const sources = sizeSources(loops);
+	yield;
 	for (const { coarser, mostPoints } of attempts) {
-		const mesh = triangulationOf(loops, sizeField(loops, coarser), mostPoints);
+		const mesh = yield* triangulating(loops, sizeField(sources, coarser), mostPoints);
 		if (typeof mesh === 'object') return quadraticMesh(mesh);
 	}
 	return null;
 }
 
-function solvedOn(mesh: QuadraticMesh, stiffness: Float64Array) {
+function* solving(mesh: QuadraticMesh, stiffness: Float64Array) {
 	const order = nodeOrder(mesh.elements, mesh.y.length);
-	const figures = warpingFigures(mesh, warpingFunction(mesh, stiffness, order));
+	yield;
+	const warping = warpingFunction(mesh, stiffness, order);
+	yield;
+	const figures = warpingFigures(mesh, warping);
+	yield;
 	return { ...figures, below: torsionBelow(mesh, stiffness, order) };
 }
 

@@ -33,7 +33,7 @@ const engineRequest = (
 export const analyseAnswer = async (
 	body: unknown,
 	findShape: FindShape,
-	_signal?: AbortSignal,
+	signal?: AbortSignal,
 	query?: URLSearchParams
 ): Promise<Result<AnalyseAnswer, Refusal>> => {
 	const request = parsed(analyseRequestSchema, body);
@@ -43,14 +43,16 @@ export const analyseAnswer = async (
 	const { definition, notes, at } = subject.value;
 	const section = prepareSection(definition, request.value.code?.strengthBasis);
 	if (!section.ok) return fail(invalid(placed(section.error, at)));
-	const solved = sectionWithTorsion(section.value, request.value.numericalTorsion === true);
-	const analysis = analyse(solved, engineRequest(request.value, query));
+	const asked = request.value.numericalTorsion === true;
+	const solved = await sectionWithTorsion(section.value, asked, signal);
+	if (!solved.ok) return solved;
+	const analysis = analyse(solved.value, engineRequest(request.value, query));
 	const { notes: own, ...figures } = analysis;
 	return ok({
 		contract: contractVersion,
 		engineVersion,
 		...figures,
-		torsion: solved.torsion,
+		torsion: solved.value.torsion,
 		notes: [...notes, ...ignoredFields(body, known), ...own]
 	});
 };

@@ -19,10 +19,11 @@ const tooMuchWork: Refusal = {
 	message: `This search takes more than ${mostWork / 1000} s. Give fewer demands or a shorter stock.`
 };
 
-/** Runs a search that can pause to its end, letting other requests in between. */
+/** Runs a search that can pause to its end, letting other requests in between; `most`: its longest work, ms. */
 export const searchInTurns = async <T>(
 	search: Generator<unknown, T>,
-	signal?: AbortSignal
+	signal?: AbortSignal,
+	most = mostWork
 ): Promise<Result<T, Refusal>> => {
 	let [started, worked] = [performance.now(), 0];
 	for (;;) {
@@ -31,7 +32,7 @@ export const searchInTurns = async <T>(
 		const now = performance.now();
 		if (now - started < turn) continue;
 		worked += now - started;
-		if (worked > mostWork) return fail(tooMuchWork);
+		if (worked > most) return fail(tooMuchWork);
 		await nextTurn();
 		if (signal?.aborted) return fail(clientGone);
 		started = performance.now();

@@ -26,6 +26,19 @@ const triangle: SectionDefinition = {
 	]
 };
 
+/** Ribs standing side by side on a base: much to mesh. */
+const combOf = (ribs: number): SectionDefinition => ({
+	kind: 'plates',
+	grade: 'S355',
+	plates: [
+		{ name: 'base', width: 50 * ribs, thickness: 20, y: 0, z: 0, angle: 0 },
+		...Array.from({ length: ribs }, (_, i) => ({
+			...{ name: `rib ${i + 1}`, width: 150, thickness: 12, angle: 90 },
+			...{ y: 50 * (i - (ribs - 1) / 2), z: 85 }
+		}))
+	]
+});
+
 describe('torsion in the answer', () => {
 	it('is solved for an outline without being asked, and says so', async () => {
 		const { gross, torsion, notes } = await asked(triangle);
@@ -49,5 +62,19 @@ describe('torsion in the answer', () => {
 	it('comes out the same from the store', async () => {
 		const [first, second] = [await asked(triangle), await asked({ ...triangle })];
 		expect(second.torsion).toEqual(first.torsion);
+	});
+
+	it('lets other requests be answered while it is solved', async () => {
+		const answered: string[] = [];
+		const comb = asked(combOf(30)).then(() => answered.push('comb'));
+		const rolled = asked(ipe300).then(() => answered.push('rolled'));
+		await Promise.all([comb, rolled]);
+		expect(answered).toEqual(['rolled', 'comb']);
+	});
+
+	it('is given up when nobody waits for it any more', async () => {
+		const gone = AbortSignal.abort();
+		const answer = await analyseAnswer({ section: combOf(31) }, noShape, gone);
+		expect(answer).toMatchObject({ ok: false, error: { code: 'client_gone' } });
 	});
 });
