@@ -7,6 +7,8 @@ import {
 } from '$lib/units';
 import { workingKey } from '$lib/engine/explain/keys';
 import type { Analysis } from '$lib/engine/rules/analysis';
+import { isEn1993 } from '$lib/engine/rules/en1993/edition';
+import { shearAreasOf } from '$lib/engine/rules/en1993/shear-area';
 import type { PreparedSection } from '$lib/engine/section/prepared';
 
 /** A row of the values table: one figure, or first yield beside full plastic. */
@@ -20,7 +22,7 @@ export interface ValueRow {
 
 const { gross: of, moment: own, place } = workingKey;
 
-type Figures = Pick<Analysis, 'gross' | 'moment' | 'squashLoad'>;
+type Figures = Pick<Analysis, 'gross' | 'moment' | 'squashLoad' | 'code'>;
 
 /** Rows that stand at first yield and at full plastic. */
 export function limitRows(
@@ -81,7 +83,8 @@ export function limitRows(
 
 /** Rows of one figure. */
 export function singleRows(
-	{ gross, moment, squashLoad }: Figures,
+	{ gross, moment, squashLoad, code }: Figures,
+	section: PreparedSection,
 	preferences: Preferences
 ): ValueRow[] {
 	const row = rowMaker(preferences);
@@ -95,6 +98,7 @@ export function singleRows(
 		plain('Shape factor, y–y', 'shapeFactorY', moment.shapeFactorY),
 		plain('Shape factor, z–z', 'shapeFactorZ', moment.shapeFactorZ),
 		row('Area', 'area', [of('area')], gross.area),
+		...shearRows(section, code, row),
 		row('Mass', 'massPerLength', [of('mass')], gross.mass),
 		row('Squash load', 'force', [workingKey.squashLoad], squashLoad),
 		row('Second moment, y–y', 'secondMoment', [of('secondMomentY')], gross.secondMomentY),
@@ -117,6 +121,16 @@ export function singleRows(
 			shearOffset(gross, 'y')
 		),
 		row('Painted surface', 'surface', [of('perimeter')], gross.perimeter)
+	];
+}
+
+/** Shear areas by EN 1993-1-1, with its η; where it gives none for the shape the figure is missing. */
+function shearRows(section: PreparedSection, code: Figures['code'], row: RowMaker): ValueRow[] {
+	if (!isEn1993(code.standard)) return [];
+	const { y, z } = shearAreasOf(section, code.eta);
+	return [
+		row('Shear area, along z', 'area', [workingKey.shear('z', 'area')], z?.area ?? null),
+		row('Shear area, along y', 'area', [workingKey.shear('y', 'area')], y?.area ?? null)
 	];
 }
 
