@@ -21,7 +21,7 @@ async function open(path: string): Promise<Page> {
 it('shows without an account that every published value is met, and narrows the list to a search', async () => {
 	const page = await open('/proof');
 	const heading = await page.getByRole('heading', { level: 1 }).textContent();
-	expect(heading).toMatch(/^8\u202f408 published values, all met\.$/);
+	expect(heading).toMatch(/^Proof: 8\u202f408 published values, all met\.$/);
 	await page.getByRole('searchbox', { name: 'Search the published values' }).fill('ipe 500');
 	await page.waitForURL(/q=ipe\+500/);
 	await page.getByRole('combobox', { name: 'Kind' }).selectOption('section-properties');

@@ -6,10 +6,16 @@ type Decimal = Pick<Preferences, 'decimal'>;
 /** The published value as it is printed, with the reader's decimal mark; words as they are. */
 export function printedText({ published, printed }: ProofCheck, { decimal }: Decimal): string {
 	if (typeof published === 'string') return published;
-	return (decimal === 'comma' ? printed.replace('.', ',') : printed).replace(/^-/, '−');
+	const [whole = '', fraction] = printed.replace(/^-/, '−').split('.');
+	const parted = whole.length < 5 ? whole : whole.replace(/\B(?=(\d{3})+$)/g, '\u202f');
+	return fraction === undefined ? parted : parted + (decimal === 'comma' ? ',' : '.') + fraction;
 }
 
-const significant = (printed: string): number => printed.replace(/^[-0.]+|[^\d]/g, '').length;
+/** Digits printed, without the zeros that only fill up to the unit. */
+function significant(printed: string): number {
+	const filled = printed.includes('.') ? printed : printed.replace(/0+$/, '');
+	return filled.replace(/^[-0.]+|[^\d]/g, '').length;
+}
 
 /** Our value with two figures more than the published one is printed with. */
 export function oursText(check: ProofCheck, preferences: Decimal): string {
@@ -17,7 +23,7 @@ export function oursText(check: ProofCheck, preferences: Decimal): string {
 	if (typeof ours === 'string') return ours;
 	if (ours === null || typeof published === 'string') return NO_FIGURE;
 	const digits = Math.max(4, significant(printed) + 2);
-	return formatNumber(ours, preferences, { digits, trim: true, grouping: 'never' });
+	return formatNumber(ours, preferences, { digits, trim: true });
 }
 
 /** The difference in per cent, or in the unit where the tolerance is one; what is the same says so. */

@@ -4,7 +4,7 @@ import { log } from '../log';
 import { proofFamilies, type ProofCheck, type ProofFamily } from './check';
 import { allChecks } from './registry';
 
-/** Longest that other requests wait for a turn, ms. */
+/** Longest that other requests wait for a turn, ms; solving torsion by elements is a turn of its own. */
 const turn = 20;
 
 /** How many values one family holds, and how many of them ours meets. */

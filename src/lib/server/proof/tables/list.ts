@@ -18,7 +18,7 @@ export interface PublishedTable {
 	readonly why: string;
 }
 
-const printed = 'published values are rounded to 3 or 4 figures: 0.5 % or half the last digit';
+const printed = 'rounded to 3 or 4 figures: 0.5 % or half the last digit';
 const loose = (reason: string) => `${reason}: 2 % or half the last digit`;
 const en10365 = 'EN 10365:2017';
 const a6 = 'ASTM A6 (AISC Shapes Database v15.0)';
