@@ -21,11 +21,18 @@ export interface CellFill {
 const pale = 0.07;
 const deep = 0.5;
 
-/** Every cell of a history as it is filled on the drawing. */
-export const cellFills = ({ section, cells, layers, strain }: History): CellFill[] =>
+/**
+ * Every cell of a history as it is filled on the drawing; the tint is deepest at the strength of its
+ * steel, or at the stress `deepest`, N/mm², where that is given.
+ */
+export const cellFills = (
+	{ section, cells, layers, strain }: History,
+	deepest?: number
+): CellFill[] =>
 	cells.map((cell) => {
 		const own = layers[cell.part]!;
-		const { fy, fyc } = section.parts[cell.part]!.material;
+		const { fy, fyc } =
+			deepest === undefined ? section.parts[cell.part]!.material : { fy: deepest, fyc: deepest };
 		return {
 			path: loopsPath(chainedLoops(cell.edges)),
 			...tintOf(cell, stressField(cell, own, strain), { fy, fyc }),

@@ -1,4 +1,5 @@
 import type { GradeDefinition } from '$lib/engine/material/material';
+import { lawShort } from './law/law-draft';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 
 /** Grade of a part: its own, or the section's. */
@@ -25,6 +26,9 @@ export function withGrade(section: SectionDefinition, grade: GradeDefinition): S
 	return { ...rest, grade };
 }
 
-/** A grade in a few letters: its name, or its yield strength. */
-export const gradeTitle = (grade: GradeDefinition): string =>
-	typeof grade === 'string' ? grade : `fy ${typeof grade === 'number' ? grade : grade.fy}`;
+/** A grade in a few letters: its name, or its yield strength and law. */
+export function gradeTitle(grade: GradeDefinition): string {
+	if (typeof grade === 'string') return grade;
+	if (typeof grade === 'number') return `fy ${grade}`;
+	return `fy ${grade.fy}${grade.law ? `, ${lawShort[grade.law.type]}` : ''}`;
+}
