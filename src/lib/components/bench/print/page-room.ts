@@ -13,8 +13,9 @@ export function drawingHeight(
 	{ notes, classification, resistance }: Counted,
 	demands: number
 ): number {
-	const values = 21 + 2;
-	const left = 6 + (classification?.elements.length ?? 0) + demands + 8;
+	const values = 23 + 2;
+	const resistances = resistance ? 8 : 0;
+	const left = 6 + (classification?.elements.length ?? 0) + demands + 8 + resistances;
 	const checks = resistance?.checks.length ?? 0;
 	const tables = Math.max(values, (values + left + checks + 2) / 2) * row;
 	const text = notes.reduce((sum, { message }) => sum + 13 * Math.ceil(message.length / 80), 0) / 2;

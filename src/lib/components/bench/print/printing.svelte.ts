@@ -3,6 +3,8 @@ import { flushSync, tick } from 'svelte';
 /** The printed page is built only while it is printed, so that bending never waits for it. */
 export class Printing {
 	under = $state(false);
+	/** An appendix tells how the figures came about. */
+	withWorking = $state(false);
 
 	begin = () => {
 		flushSync(() => (this.under = true));
