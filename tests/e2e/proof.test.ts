@@ -38,7 +38,7 @@ it('opens the same list from its address, on its page', async () => {
 	expect(await page.getByRole('navigation', { name: 'Pages' }).textContent()).toMatch(
 		/51 to 100 of/
 	);
-	expect(await page.getByRole('cell', { name: 'met' }).count()).toBe(50);
+	expect(await page.getByRole('cell', { name: 'met', exact: true }).count()).toBe(50);
 	await page.close();
 });
 
