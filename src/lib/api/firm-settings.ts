@@ -71,3 +71,19 @@ export const firmConflictSchema = z
 		theirs: firmSettingsSchema
 	})
 	.meta({ id: 'FirmSettingsConflict' });
+
+/** What a page knows of the firm in hand: its settings, and the stock that proposals use. */
+export interface FirmInHand {
+	/** Null for visitors and people without a firm: the program's defaults hold. */
+	readonly firm: { readonly id: string; readonly name: string } | null;
+	readonly settings: FirmSettings | null;
+	readonly defaultStock: z.infer<typeof plateStockSchema>;
+	readonly mayUpdate: boolean;
+}
+
+export const noFirm = (defaultStock: FirmInHand['defaultStock']): FirmInHand => ({
+	firm: null,
+	settings: null,
+	defaultStock,
+	mayUpdate: false
+});

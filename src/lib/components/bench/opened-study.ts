@@ -1,4 +1,5 @@
 import { changesTold } from './allowed-code';
+import { underPreset, type Preset } from './firm/preset';
 import { openingBend, openingStudy } from './study';
 import { addressedStudy, addressText, studyParameter, type Addressed } from './study-address';
 
@@ -8,22 +9,35 @@ export interface Opened {
 	readonly notice: string;
 	/** What was changed of it on opening; empty when nothing was. */
 	readonly adjusted: string;
+	/** A new study under the firm's own code choices. */
+	readonly fromPreset: boolean;
 }
 
 export const openingAddressed: Addressed = { study: openingStudy, bend: openingBend };
 
-/** The study that an address carries, or the ready plate girder. */
-export function openedStudy(parameters: URLSearchParams): Opened {
+/** The study that an address carries, or the ready plate girder, under the firm's preset if it has one. */
+export function openedStudy(parameters: URLSearchParams, preset?: Preset | null): Opened {
 	const text = parameters.get(studyParameter);
-	if (text === null) return { addressed: openingAddressed, notice: '', adjusted: '' };
+	if (text === null) {
+		const addressed = preset
+			? { ...openingAddressed, study: underPreset(openingStudy, preset) }
+			: openingAddressed;
+		return { addressed, notice: '', adjusted: '', fromPreset: Boolean(preset) };
+	}
 	const read = addressedStudy(text);
 	if (read.ok) {
 		const { study, bend, changes = [] } = read.value;
-		return { addressed: { study, bend }, notice: '', adjusted: changesTold(changes) };
+		return {
+			addressed: { study, bend },
+			notice: '',
+			adjusted: changesTold(changes),
+			fromPreset: false
+		};
 	}
 	return {
 		addressed: openingAddressed,
 		adjusted: '',
+		fromPreset: false,
 		notice: `${read.error} A plate girder is opened instead.`
 	};
 }
