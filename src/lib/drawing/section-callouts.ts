@@ -55,10 +55,6 @@ export function sectionCallouts(definition: SectionDefinition, length: Length): 
 		case 'round':
 			return [whole(`Ø ${length(definition.d)}`)];
 		case 'plates':
-			return definition.plates.slice(0, 6).map((plate) => ({
-				text: by(plate.width, plate.thickness),
-				place: { beside: { y: plate.y, z: plate.z }, room: Infinity }
-			}));
 		case 'outline':
 			return [];
 	}

@@ -10,6 +10,8 @@ export interface Issue {
 	message: string;
 	/** A change that has been tried and solves it. */
 	mend?: Mend;
+	/** Where it is, mm from the definition's origin. */
+	at?: { y: number; z: number };
 }
 
 /** A mend of plates: each plate named goes to a new centre, mm from the definition's origin. */

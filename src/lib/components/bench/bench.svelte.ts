@@ -7,12 +7,15 @@ import { verdict, type Verdict } from '$lib/engine/rules/verdict';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 import { prepareSection } from '$lib/engine/section/prepare';
 import type { PreparedSection } from '$lib/engine/section/prepared';
+import { engineJobs } from '$lib/workers/engine-jobs';
 import { BendState } from './bend-state.svelte';
 import { EffectiveView } from './effective-view.svelte';
 import { History } from './history.svelte';
 import { rulerModel, type RulerModel } from './ruler-model';
+import { PieceFocus } from './piece-focus.svelte';
 import { freeCaseName, openingStudy, type DemandCase } from './study';
 import type { BendChoice, Study } from './study';
+import { TorsionState } from './torsion/torsion-state.svelte';
 import type { Addressed } from './study-address';
 
 /** The demand case that decides; `value` is its use, null when a check that applies is missing. */
@@ -32,6 +35,11 @@ export interface CountAbout {
  * and how it is bent. Derived in stages, so that bending touches none of the stages before it.
  */
 export class Bench {
+	/** Plate or point that form and drawing point at. */
+	readonly pieces = new PieceFocus();
+	readonly torsion = new TorsionState(({ definition, strengthBasis }) =>
+		engineJobs().start('torsion', { definition, strengthBasis })
+	);
 	readonly #history: History<Study>;
 	readonly bend: BendState;
 	/** The effective section that is drawn and read; none where nothing is class 4. */
@@ -79,6 +87,13 @@ export class Bench {
 		const built = this.#built;
 		if (built.ok) this.#valid = built.value;
 		return this.#valid ?? openingSection();
+	});
+
+	/** Shear centre by formula, or where none gives it by the numerical solution, once it is there. */
+	readonly shearCentre = $derived.by(() => {
+		const standing = this.torsion.standing(this.section);
+		const solved = standing.kind === 'solved' ? standing.solved.gross : this.section.gross;
+		return solved.shearCentre;
 	});
 
 	get stale(): boolean {

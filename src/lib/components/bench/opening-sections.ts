@@ -1,4 +1,5 @@
-import type { SectionDefinition } from '$lib/engine/section/definition';
+import type { Ring, SectionDefinition } from '$lib/engine/section/definition';
+import { platePresets } from '$lib/engine/section/plates/presets';
 
 /** A kind of section as it is offered for building: its name and the sizes it opens with. */
 export interface BuildKind {
@@ -8,6 +9,27 @@ export interface BuildKind {
 }
 
 const grade = 'S355';
+
+/** An I with a cover plate on each flange. */
+const coveredI = preparedPreset('i-with-cover-plates');
+
+/** A bar bent to a hook, mm. */
+const hook: Ring = [
+	[0, 0],
+	[160, 0],
+	[160, 90],
+	[130, 90],
+	[130, 30],
+	[40, 30],
+	[40, 240],
+	[0, 240]
+];
+
+function preparedPreset(id: string): SectionDefinition {
+	const preset = platePresets.find((one) => one.id === id);
+	if (!preset) throw new Error(`There is no preset ${id}.`);
+	return preset.section({}, grade);
+}
 
 export const buildKinds: readonly BuildKind[] = [
 	{
@@ -91,11 +113,15 @@ export const buildKinds: readonly BuildKind[] = [
 		opening: { kind: 'angle', h: 150, b: 100, t: 12, r: 12, rToe: 6, grade }
 	},
 	{ key: 'flat', title: 'Flat bar', opening: { kind: 'flat', b: 20, h: 200, grade } },
-	{ key: 'round', title: 'Round bar', opening: { kind: 'round', d: 60, grade } }
+	{ key: 'round', title: 'Round bar', opening: { kind: 'round', d: 60, grade } },
+	{ key: 'plates', title: 'Free plates', opening: coveredI },
+	{
+		key: 'outline',
+		title: 'Outline',
+		opening: { kind: 'outline', regions: [{ outer: hook }], grade }
+	}
 ];
 
-/** Key of the kind a definition belongs to; plates and outlines have none. */
-export function buildKindOf(section: SectionDefinition): string | null {
-	const key = section.kind === 'i' ? `i-${section.fabrication}` : section.kind;
-	return buildKinds.some((kind) => kind.key === key) ? key : null;
-}
+/** Key of the kind a definition belongs to. */
+export const buildKindOf = (section: SectionDefinition): string =>
+	section.kind === 'i' ? `i-${section.fabrication}` : section.kind;

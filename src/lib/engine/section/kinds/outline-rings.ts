@@ -28,12 +28,12 @@ export function regionIssues(region: RegionRings, label: Label, tolerance: numbe
 	const rings = [region.outer, ...region.holes];
 	const alone = rings.flatMap((points, i) => {
 		const name = ringName(i);
-		const message = ringFault(
+		const fault = ringFault(
 			points,
 			`${name[0]!.toUpperCase()}${name.slice(1)}${label.name}`,
 			tolerance
 		);
-		return message === null ? [] : [{ path: ringPath(label, i), message }];
+		return fault === null ? [] : [{ path: ringPath(label, i), ...fault }];
 	});
 	if (alone.length > 0) return alone;
 	const holes = holeIssues(rings, label, tolerance);
@@ -56,14 +56,16 @@ const ringName = (i: number): string => (i === 0 ? 'outer ring' : `hole ${i}`);
 const ringPath = ({ path }: Label, i: number): string =>
 	i === 0 ? `${path}outer` : `${path}holes.${i - 1}`;
 
-function ringFault(points: readonly Point[], name: string, tolerance: number): string | null {
+function ringFault(
+	points: readonly Point[],
+	name: string,
+	tolerance: number
+): Pick<Issue, 'message' | 'at'> | null {
 	const arrangement = arrangementOf([{ points, owner: 0 }], tolerance);
-	const crossing = arrangement.crossing?.at;
-	if (crossing) return `${name} crosses itself near ${place(crossing)}.`;
 	const area = ringArea(points);
-	const fault = windingFault(arrangement, Math.sign(area) || 1);
-	if (fault) return `${name} crosses itself near ${place(fault.at)}.`;
-	return area === 0 ? `${name} encloses no area.` : null;
+	const at = arrangement.crossing?.at ?? windingFault(arrangement, Math.sign(area) || 1)?.at;
+	if (at) return { message: `${name} crosses itself near ${place(at)}.`, at };
+	return area === 0 ? { message: `${name} encloses no area.` } : null;
 }
 
 function holeIssues(
@@ -92,7 +94,7 @@ function crossedIssue(owners: readonly [number, number], at: Point, label: Label
 		a === 0
 			? `Hole ${b}${label.name} crosses the outer ring near ${place(at)}.`
 			: `Holes ${a} and ${b}${label.name} overlap near ${place(at)}.`;
-	return { path: ringPath(label, b), message };
+	return { path: ringPath(label, b), message, at };
 }
 
 /** Regions that overlap, or hang together nowhere. Rings are wound: outer anticlockwise, holes clockwise. */
@@ -118,7 +120,8 @@ function overlap(owners: readonly [number, number], at: Point): Issue {
 	const [a, b] = [Math.min(...owners), Math.max(...owners)];
 	return {
 		path: `regions.${b}`,
-		message: `Regions region${a + 1} and region${b + 1} overlap near ${place(at)}.`
+		message: `Regions region${a + 1} and region${b + 1} overlap near ${place(at)}.`,
+		at
 	};
 }
 

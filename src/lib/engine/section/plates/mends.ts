@@ -59,7 +59,7 @@ function candidates(
 	{ touching }: PlacedPlates,
 	{ kind, a, b, piece }: PlacingIssue
 ): Candidate[] {
-	if (kind === 'apart') return [{ plates: piece, anchor: a, mover: b }];
+	if (kind === 'apart') return bySize(apartCandidates(plates.length, touching, a, b, piece));
 	const links = touching.filter((one) => one.a !== a || one.b !== b);
 	const pieces = connectedPieces(
 		plates.length,
@@ -72,7 +72,27 @@ function candidates(
 	];
 	if (pieceOf(a) === pieceOf(b)) return alone;
 	const together = alone.map((one) => ({ ...one, plates: pieceOf(one.mover) }));
-	return [...alone, ...together.sort((p, q) => p.plates.length - q.plates.length)];
+	return [...alone, ...bySize(together)];
+}
+
+const bySize = (list: readonly Candidate[]): Candidate[] =>
+	[...list].sort((p, q) => p.plates.length - q.plates.length);
+
+/** Either piece may close a gap. */
+function apartCandidates(
+	count: number,
+	touching: PlacedPlates['touching'],
+	a: number,
+	b: number,
+	piece: readonly number[]
+): Candidate[] {
+	const pieces = connectedPieces(
+		count,
+		touching.map((one) => [one.a, one.b] as const)
+	);
+	const own = pieces.find((one) => one.includes(a));
+	const there = { plates: piece, anchor: a, mover: b };
+	return own && !own.includes(b) ? [there, { plates: own, anchor: b, mover: a }] : [there];
 }
 
 /** Digits of a coordinate that a mend gives: enough to touch a kilometre from the origin. */

@@ -68,7 +68,13 @@ export const subjectOf = async (
 
 /** Issues of the engine with their place in the request: `tw` → `section.tw`. */
 export const placed = (issues: readonly Issue[], at: Subject['at']): Issue[] =>
-	issues.map(({ path, message }) => ({
-		path: at === 'section' ? (path ? `section.${path}` : 'section') : path || 'shapeId',
-		message
+	issues.map(({ path, mend, ...rest }) => ({
+		...rest,
+		path: placeIn(path, at),
+		...(mend && { mend: { ...mend, path: placeIn(mend.path, at) } })
 	}));
+
+function placeIn(path: string, at: Subject['at']): string {
+	if (at !== 'section') return path || 'shapeId';
+	return path ? `section.${path}` : 'section';
+}
