@@ -41,9 +41,7 @@ describe('a mend of plates', () => {
 	it('closes a gap by moving the smaller of the pieces', () => {
 		const [issue] = issues(section({ ...top, z: 412 }, web, bottom));
 		expect(issue!.mend!.changes).toEqual([{ plate: 'top', y: 0, z: 410 }]);
-		expect(issue!.mend!.words).toBe(
-			'Move “web” and what hangs on it by 2 mm up so that it touches “top”.'
-		);
+		expect(issue!.mend!.words).toBe('Move “top” by 2 mm down so that it touches “web”.');
 	});
 
 	it('brings a floating piece to the nearest plate, slantwise when it must', () => {
