@@ -50,6 +50,13 @@ describe('a study in the address', () => {
 		expect(back).toEqual({ ok: true, value: { study, bend: openingBend } });
 	});
 
+	it('carries residual stress, turns, where it stands and a typed N', () => {
+		const past = { ...openingBend, turns: [3, 'release', -2] as const, atTurn: true, typedN: -50 };
+		const study: Study = { ...studied, residual: 'welded' };
+		const back = addressedStudy(addressText({ study, bend: past }));
+		expect(back).toEqual({ ok: true, value: { study, bend: past } });
+	});
+
 	it('is safe in an address and stays short', () => {
 		const text = addressText({ study: studied, bend });
 		expect(text).toMatch(/^1\.[A-Za-z0-9_-]+$/);

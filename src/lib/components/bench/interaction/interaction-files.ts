@@ -17,7 +17,9 @@ const forces: readonly Force[] = ['N', 'My', 'Mz'];
 export function interactionCsv(series: readonly Series[], preferences: Preferences): string {
 	const comma = preferences.decimal === 'comma';
 	const part = comma ? ';' : ',';
-	const cell = (text: string) => (/[",;\n]/.test(text) ? `"${text.replaceAll('"', '""')}"` : text);
+	const special = [part, '"', '\n', '\r'];
+	const cell = (text: string) =>
+		special.some((sign) => text.includes(sign)) ? `"${text.replaceAll('"', '""')}"` : text;
 	const number = (value: number, force: Force) => {
 		const shown = Number(toShown(value, forceQuantity(force), preferences.system).toPrecision(9));
 		return comma ? String(shown).replace('.', ',') : String(shown);

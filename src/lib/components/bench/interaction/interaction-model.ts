@@ -57,3 +57,28 @@ export function stretches({ points, key }: Series): ReadPoint[][] {
 	if (key === 'code' && out.length === 1 && first) out[0]!.push(first);
 	return out.filter(({ length }) => length > 1);
 }
+
+/** Forces below this share of the curve's greatest are rounding. */
+const noise = 1e-9;
+
+/** A curve whose forces are zero where only the last digits are left of them. */
+export function withoutNoise(series: Series): Series {
+	if (series.key === 'cases') return series;
+	const most = (force: Force) =>
+		readable(series).reduce((so, point) => Math.max(so, Math.abs(point[force])), 0);
+	const [N, My, Mz] = [most('N'), most('My'), most('Mz')];
+	const clean = (value: number, greatest: number) =>
+		Math.abs(value) < noise * greatest ? 0 : value;
+	return {
+		...series,
+		points: series.points.map(
+			(point) =>
+				point && {
+					...point,
+					N: clean(point.N, N),
+					My: clean(point.My, My),
+					Mz: clean(point.Mz, Mz)
+				}
+		)
+	};
+}

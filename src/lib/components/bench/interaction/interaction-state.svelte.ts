@@ -2,7 +2,7 @@ import { interactionCurve, type InteractionPlane } from '$lib/engine/response/in
 import { interactionWith, type LoadFactors } from '$lib/engine/response/interaction-factors';
 import { countableCurve, type CountablePoint } from '$lib/engine/rules/countable-curve';
 import type { Bench } from '../bench.svelte';
-import { casePoint, hasForce, type Series } from './interaction-model';
+import { casePoint, hasForce, withoutNoise, type Series } from './interaction-model';
 
 /** Time the hand rests before what takes longer is worked out, ms. */
 const rest = 150;
@@ -46,16 +46,16 @@ export class Interaction {
 	readonly series: readonly Series[] = $derived.by(() => {
 		const { plastic, firstYield } = this.#curves;
 		const all: Series[] = [
+			{ key: 'cases', title: 'Demand cases', points: this.cases },
 			{ key: 'plastic', title: 'Full plastic', points: plastic.ok ? plastic.value.points : [] },
 			{
 				key: 'first-yield',
 				title: 'First yield',
 				points: firstYield.ok ? firstYield.value.points : []
 			},
-			{ key: 'code', title: 'Counted by the code', points: this.#code ?? [] },
-			{ key: 'cases', title: 'Demand cases', points: this.cases }
+			{ key: 'code', title: 'Counted by the code', points: this.#code ?? [] }
 		];
-		return all.filter(({ points }) => points.some((point) => point !== null));
+		return all.filter(({ points }) => points.some((point) => point !== null)).map(withoutNoise);
 	});
 
 	/** Load factors of the cases, in their order; shorter while they are worked out. */

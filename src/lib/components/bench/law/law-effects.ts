@@ -18,7 +18,8 @@ export function lawEffects(
 		...(part === '' || own.name === part ? { material } : {})
 	}));
 	const changed: PreparedSection = { ...section, parts };
-	const code = [...lawIssues(parts, standard), ...lawNotes(parts, standard)];
+	const issues = lawIssues(parts, standard);
+	const code = issues.length > 0 ? issues : lawNotes(parts, standard);
 	const past = historyOf(changed);
 	const said = [
 		...code.map(({ message }) => message),
