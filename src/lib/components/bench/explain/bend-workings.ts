@@ -43,7 +43,11 @@ export function bendWorkings(bench: Bench): Explanation {
 	const { path } = bench.bend.bender;
 	const found = ([1, -1] as const).flatMap((sense) => {
 		const axisAngle = path.axisAngle + (sense < 0 ? 180 : 0);
-		const { firstYield, plasticMoment } = bending(bench.section, { ...path, axisAngle });
+		const { firstYield, plasticMoment } = bending(
+			bench.section,
+			{ ...path, axisAngle },
+			bench.bend.start
+		);
 		const figures = { firstYield: firstYield.moment, plastic: plasticMoment };
 		return (['firstYield', 'plastic'] as const).flatMap((figure) => {
 			const value = figures[figure];
