@@ -53,7 +53,7 @@ export function torsionRows(
 }
 
 /** Places nearer to the centroid than this share of the section's size are rounding. */
-const placeRounding = 1e-9;
+const placeRounding = 1e-7;
 
 function differenceOf(
 	first: number | null | undefined,
