@@ -25,8 +25,8 @@ export class UnlockSearch {
 	progress = $state<number | null>(null);
 	cancelled = $state(false);
 	fault = $state('');
-	/** The option that was put in last, while its section is still on the Bench. */
-	#tried = $state.raw<{ option: UnlockOption; section: unknown } | null>(null);
+	/** The option that was put in last, and the study that it made. */
+	#tried = $state.raw<{ option: UnlockOption; study: unknown } | null>(null);
 	#job: Job<Unlocking | null> | null = null;
 
 	constructor(bench: Bench, start: StartSearch = inWorker) {
@@ -35,9 +35,7 @@ export class UnlockSearch {
 	}
 
 	readonly tried: UnlockOption | null = $derived.by(() =>
-		this.#tried !== null && this.#tried.section === this.#bench.definition
-			? this.#tried.option
-			: null
+		this.#tried !== null && this.#tried.study === this.#bench.study ? this.#tried.option : null
 	);
 
 	/** Whether what was found is of the study as it stands. */
@@ -90,7 +88,7 @@ export class UnlockSearch {
 			shape: null,
 			...(stiffeners === null ? {} : { stiffeners })
 		});
-		this.#tried = { option, section: this.#bench.definition };
+		this.#tried = { option, study: this.#bench.study };
 	}
 
 	undo(): void {
