@@ -31,4 +31,62 @@ describe('the largest circle within rings', () => {
 		expect(at(1e-4) / at(1)).toBeCloseTo(1e-4, 10);
 		expect(at(1e5) / at(1)).toBeCloseTo(1e5, 2);
 	});
+
+	it('takes the same work for an outline as thin as can be: 1 km by 0.01 mm, straight or askew', () => {
+		const started = performance.now();
+		for (const angle of [0, 37]) {
+			const [c, s] = [Math.cos((angle * Math.PI) / 180), Math.sin((angle * Math.PI) / 180)];
+			const turned = ring([0, 0], [1e5, 0], [1e5, 0.01], [0, 0.01]).map(({ y, z }) => ({
+				y: c * y - s * z,
+				z: s * y + c * z
+			}));
+			expect(inscribedDiameter([turned])).toBeCloseTo(0.01, 8);
+		}
+		expect(performance.now() - started).toBeLessThan(200);
+	});
+
+	it('touches the four inward corners of a cross', () => {
+		const cross = ring(
+			...([
+				[-1, -9],
+				[1, -9],
+				[1, -1],
+				[9, -1],
+				[9, 1],
+				[1, 1]
+			] as [number, number][]),
+			...([
+				[1, 9],
+				[-1, 9],
+				[-1, 1],
+				[-9, 1],
+				[-9, -1],
+				[-1, -1]
+			] as [number, number][])
+		);
+		expect(inscribedDiameter([cross])).toBeCloseTo(2 * Math.SQRT2, 9);
+	});
+
+	it('fits the wall of a thin tube of many sides', () => {
+		const sides = 90;
+		const round = (radius: number, sense: number) =>
+			Array.from({ length: sides }, (_, k) => {
+				const angle = (sense * 2 * Math.PI * k) / sides;
+				return { y: radius * Math.cos(angle), z: radius * Math.sin(angle) };
+			});
+		// between a corner of the hole and the outline's corner beyond it: both sides meet the hole's corner
+		const half = Math.PI / sides;
+		const corner = ((100 - 99) * Math.cos(half)) / (1 + Math.cos(half));
+		expect(inscribedDiameter([round(100, 1), round(99, -1)])).toBeCloseTo(2 * corner, 9);
+	});
+
+	it('touches the roots of a gear of a thousand teeth, in time', () => {
+		const gear = Array.from({ length: 2000 }, (_, k) => {
+			const [radius, angle] = [k % 2 ? 98 : 100, (Math.PI * k) / 1000];
+			return { y: radius * Math.cos(angle), z: radius * Math.sin(angle) };
+		});
+		const started = performance.now();
+		expect(inscribedDiameter([gear])).toBeCloseTo(196, 6);
+		expect(performance.now() - started).toBeLessThan(5000);
+	});
 });
