@@ -118,13 +118,14 @@ describe('a stress–strain law', () => {
 describe('interaction', () => {
 	it('shows the demand and reads it off by the keys', async () => {
 		const page = await openBench();
-		await page.getByRole('heading', { name: 'Interaction' }).scrollIntoViewIfNeeded();
+		await page.getByRole('heading', { name: 'Interaction', exact: true }).scrollIntoViewIfNeeded();
 		const plot = page.getByRole('slider', { name: /^Read the chart/ });
 		await plot.waitFor();
 		await page
 			.getByRole('table', { name: /^Demand cases/ })
 			.getByText('Case 1')
 			.waitFor();
+		await page.getByText('Counted by the code').waitFor();
 		await plot.focus();
 		await expect.poll(() => plot.getAttribute('aria-valuetext')).toMatch(/^Case 1: N −200/);
 		await page.keyboard.press('ArrowDown');

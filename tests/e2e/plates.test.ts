@@ -66,7 +66,10 @@ describe('free plates in a browser', () => {
 			.fill('0 0\n100 0\n100 200\n0 200\n\n30 50\n30 150\n70 150\n70 50');
 		await page.getByRole('button', { name: 'Use these coordinates' }).click();
 		await expect.poll(() => verdict(page).textContent()).toMatch(/No class/);
-		await page.getByText('An outline does not say which of its parts are plates').waitFor();
+		await page
+			.getByRole('region', { name: 'Verdict' })
+			.getByText('An outline does not say which of its parts are plates')
+			.waitFor();
 		const row = page.getByRole('row', { name: /^Moment, y–y/ });
 		const figures = await row.getByRole('cell').allTextContents();
 		expect(figures[0]).toMatch(/\d/);

@@ -7,6 +7,7 @@ import { prepareSection } from '$lib/engine/section/prepare';
 import { withNumericalTorsion } from '$lib/engine/section/torsion/with-numerical';
 import { unlocking, type Unlocking } from '$lib/engine/unlock/unlock';
 import type { EngineJobs } from './engine-jobs';
+import { solvedInteraction } from './interaction-handler';
 import type { JobContext, JobHandlers } from './protocol';
 
 /** States between two pauses: some milliseconds of work. */
@@ -68,6 +69,7 @@ export const engineHandlers: JobHandlers<EngineJobs> = {
 		return ok({ states, firstYield: bent.firstYield, plasticMoment: bent.plasticMoment });
 	},
 	unlock: (request, context) => searched(unlocking(request), context),
+	interaction: solvedInteraction,
 	torsion: async ({ definition, strengthBasis }, { goOn }) => {
 		const section = prepareSection(definition, strengthBasis);
 		if (!section.ok) return section;

@@ -7,9 +7,10 @@ import type { StrengthBasis } from '$lib/engine/material/material';
 import type { SectionDefinition } from '$lib/engine/section/definition';
 import type { SectionWithTorsion } from '$lib/engine/section/torsion/with-numerical';
 import type { Unlocking, UnlockRequest } from '$lib/engine/unlock/unlock';
+import type { InteractionAsked, SolvedInteraction } from './interaction-handler';
 import { jobsOver, type Jobs } from './jobs';
 
-interface About {
+export interface About {
 	definition: SectionDefinition;
 	strengthBasis?: StrengthBasis;
 }
@@ -27,6 +28,11 @@ export type EngineJobs = {
 	};
 	/** Changes that unlock more; reports progress, may be cancelled; null when it was, or cannot be built. */
 	unlock: { payload: UnlockRequest; value: Unlocking | null };
+	/** Curves and load factors; may be cancelled between them, null when it was. */
+	interaction: {
+		payload: InteractionAsked;
+		value: Result<SolvedInteraction, Issue[]> | null;
+	};
 	/** Torsion solved numerically, tens of milliseconds at a stretch; null when cancelled before it began. */
 	torsion: { payload: About; value: Result<SolvedTorsion, Issue[]> | null };
 };
