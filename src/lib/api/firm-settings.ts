@@ -15,7 +15,8 @@ const thicknesses = listOf(
 	mostThicknesses
 )
 	.min(1, { error: 'The stock needs one thickness at least.' })
-	.refine(rising, { error: 'Thicknesses must rise, each one once.' });
+	.refine(rising, { error: 'Thicknesses must rise, each one once.' })
+	.readonly();
 
 const stepOf = (title: string) => within(title, 'mm', ranges.stockStep);
 

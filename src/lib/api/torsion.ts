@@ -23,12 +23,9 @@ const numericalSchema = z.object({
 /** Torsion by formulas and by the numerical solution, side by side. */
 export const torsionSchema = z
 	.object({
-		handbook: z
-			.object(figures)
-			.nullable()
-			.meta({
-				description: 'By handbook formulas or thin-walled theory; null where none applies.'
-			}),
+		handbook: z.object(figures).nullable().meta({
+			description: 'By handbook formulas or thin-walled theory; null where none applies.'
+		}),
 		numerical: numericalSchema.nullable().meta({
 			description:
 				'Saint-Venant’s problem solved numerically: always for outline and plates, else when numericalTorsion is true.'

@@ -33,7 +33,7 @@ describe('a section turned into free plates', () => {
 		for (const figure of ['area', 'secondMomentY', 'secondMomentZ', 'plasticModulusY'] as const)
 			expect(after.gross[figure] / before.gross[figure]).toBeCloseTo(1, 10);
 		expect(after.gross.centroid.y).toBeCloseTo(before.gross.centroid.y, 8);
-		const moment = (section: typeof before) => analyse(section, {}).moment.plasticY;
+		const moment = (section: typeof before) => analyse(section, {}).moment.plasticY ?? Number.NaN;
 		expect(moment(after) / moment(before)).toBeCloseTo(1, 8);
 	});
 
