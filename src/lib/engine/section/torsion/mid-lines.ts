@@ -17,10 +17,14 @@ export interface MidLines {
 	readonly walls: readonly Wall[];
 	/** Thickness at each end that meets nothing, mm. */
 	readonly freeEnds: readonly number[];
+	/** Whether the walls are thin enough, and their corners plain enough, for warping and shear centre within 1 %. */
+	readonly warps: boolean;
 }
 
 /** Plates stockier than this are no thin walls. */
 const leastSlenderness = 5;
+/** At this slenderness the warping of mid-lines is about 1 % off that of the solid walls (it grows with t²/b²). */
+const leastWarpingSlenderness = 12;
 /** A mid-line is extended no further than this many thicknesses of the thicker plate. */
 const mostExtension = 1.5;
 /** Nodes nearer than this share of the thinnest plate are one. */
@@ -36,19 +40,56 @@ export function midLines(definition: PlatesSection, placed: PlacedPlates): MidLi
 	if (strips.some(({ half, halfThickness }) => half < leastSlenderness * halfThickness))
 		return null;
 	const stops = strips.map(({ half }): Stop[] => [
-		{ u: -half, free: true, step: 0 },
-		{ u: half, free: true, step: 0 }
+		{ u: -half, free: true, step: 0, over: 0 },
+		{ u: half, free: true, step: 0, over: 0 }
 	]);
 	for (const { a, b } of joinedPairs(definition, placed)) {
 		const contact = contactOf(strips, a, b, placed.tolerance);
 		const meeting = meetingOf(strips, contact);
 		if (meeting === null) return null;
 		const { step } = meeting;
-		addStop(stops[a]!, { u: meeting.uA, free: false, step }, contact.onA);
-		addStop(stops[b]!, { u: meeting.uB, free: false, step }, contact.onB);
+		addStop(
+			stops[a]!,
+			{ u: meeting.uA, free: false, step, over: coverOf(contact.onA) },
+			contact.onA
+		);
+		addStop(
+			stops[b]!,
+			{ u: meeting.uB, free: false, step, over: coverOf(contact.onB) },
+			contact.onB
+		);
 	}
-	return wallsOf(strips, stops);
+	const thin = strips.every(
+		({ half, halfThickness }) => half >= leastWarpingSlenderness * halfThickness
+	);
+	const blunt = strips.some((strip, i) =>
+		stubsOf(strip, stops[i]!).some((stub) => stub === 'blunt')
+	);
+	return { ...wallsOf(strips, stops), warps: thin && !blunt };
 }
+
+/** Length along a plate that another covers of its face, mm. */
+const coverOf = ({ edge, from, to }: ContactPlace): number => (edge === 'face' ? to - from : 0);
+
+/**
+ * What stands out beyond the meeting at each end: nothing where the other plate comes flush with the
+ * end (its own mid-line has that steel already), a `blunt` stub where it stands out by less than the
+ * other is thick, which is neither corner nor wall.
+ */
+function stubsOf({ half }: Strip, stops: readonly Stop[]): ('flush' | 'blunt' | 'none')[] {
+	return [-1, 1].map((side) => {
+		if (!stops.some(({ free, u }) => free && Math.sign(u) === side)) return 'none';
+		const outs = stops.filter(({ over }) => over > 0);
+		const stub = outs.map(({ u, over }) => (half - side * u) / over);
+		if (stub.some((length) => length <= flush)) return 'flush';
+		return stub.some((length) => length < bluntEnd) ? 'blunt' : 'none';
+	});
+}
+
+/** Half the thickness of the plate that meets here, and a little for rounding. */
+const flush = 0.5 * (1 + 1e-3);
+/** A stub is a wall of its own from here on, in thicknesses of the plate that meets here beyond its mid-line. */
+const bluntEnd = 1.5;
 
 /** Pairs that touch and are joined. */
 export function joinedPairs({ plates, joins }: PlatesSection, { touching }: PlacedPlates) {
@@ -64,6 +105,8 @@ interface Stop {
 	readonly free: boolean;
 	/** How far the other mid-line lies beside this one there, mm. */
 	readonly step: number;
+	/** Length along this mid-line that the other plate covers of the face, mm. */
+	readonly over: number;
 }
 
 /** Replaces a free end by the place where it meets another mid-line, or adds a place between the ends. */
@@ -109,12 +152,15 @@ function buttOf(p: Strip, q: Strip, onA: ContactPlace, onB: ContactPlace) {
 	return { uA: onA.side * p.half, uB: onB.side * q.half, step: Math.abs(v) };
 }
 
-function wallsOf(strips: readonly Strip[], stops: readonly (readonly Stop[])[]): MidLines {
+function wallsOf(strips: readonly Strip[], stops: readonly (readonly Stop[])[]) {
 	const nodes: Point[] = [];
 	const walls: Wall[] = [];
 	const near = sameNode * Math.min(...strips.map(({ halfThickness }) => halfThickness));
 	strips.forEach((strip, i) => {
-		const along = [...stops[i]!].sort((p, q) => p.u - q.u);
+		const [left, right] = stubsOf(strip, stops[i]!);
+		const along = stops[i]!.filter(
+			({ free, u }) => !free || (u < 0 ? left : right) !== 'flush'
+		).sort((p, q) => p.u - q.u);
 		const ids = along.map(({ u, step }) => nodeAt(nodes, pointOfStrip(strip, u), near + step));
 		for (let k = 1; k < ids.length; k++)
 			if (ids[k] !== ids[k - 1])

@@ -14,7 +14,7 @@ const endLoss = 0.105;
  * Torsion figures of free plates by the theory of thin walls: torsion constant Σbt³/3 over the plates,
  * less 0.105t⁴ at each free end, plus Bredt's part of closed cells (mm⁴), warping constant (mm⁶) and shear centre on the mid-lines,
  * extended to where they meet. What junctions and fillets add is left out. All null where the
- * theory does not hold (see `midLines`); of pieces apart the torsion constants are added and the rest
+ * theory does not hold (see `midLines`), warping and shear centre already where walls are too thick for them; of pieces apart the torsion constants are added and the rest
  * is null.
  */
 export function platesTorsion(definition: PlatesSection, placed: PlacedPlates): TorsionFigures {
@@ -31,5 +31,6 @@ export function platesTorsion(definition: PlatesSection, placed: PlacedPlates): 
 	}, 0);
 	const lost = lines.freeEnds.reduce((sum, thickness) => sum + endLoss * thickness ** 4, 0);
 	const figures = thinWalls(lines);
-	return { ...figures, torsionConstant: own - lost + figures.torsionConstant! };
+	const torsionConstant = own - lost + figures.torsionConstant!;
+	return lines.warps ? { ...figures, torsionConstant } : { ...none, torsionConstant };
 }
