@@ -47,3 +47,9 @@ export function benchPath(addressed: Addressed): string {
 	const text = addressText(addressed);
 	return text === addressText(openingAddressed) ? '/bench' : `/bench?${studyParameter}=${text}`;
 }
+
+/** Longest path that is put in the address: the head of a request ends at 16 KB, cookies in it. */
+const longestPath = 12_000;
+
+/** What of a path the address carries: without its study where that is too long. */
+export const carriedPath = (path: string): string => (path.length > longestPath ? '/bench' : path);

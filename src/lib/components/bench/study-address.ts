@@ -14,7 +14,8 @@ import { mostTurns, type Turn } from './turns';
 export const studyParameter = 'study';
 /** First sign of the text; raised when its form changes. */
 const addressVersion = '1';
-const longest = 60_000;
+/** Signs of a study that is read; an address carries fewer, the memory of a tab as many. */
+const longest = 2_000_000;
 
 /** Compact form: short keys, defaults left out. */
 const addressSchema = z.object({
