@@ -2,6 +2,7 @@ import type { PreparedSection } from '../section/prepared';
 import { isStraight, type InteractionPoint } from './interaction';
 import { fibreUse } from './interaction-fibres';
 import { elasticSection } from './interaction-first-yield';
+import { keepsStrength } from './kept-strength';
 import { mechanicsOf, type Mechanics } from './law-groups';
 import { plasticMomentOf } from './plastic';
 
@@ -9,6 +10,7 @@ import { plasticMomentOf } from './plastic';
 export interface LoadFactors {
 	/** Null where the section has no straight elastic range. */
 	firstYield: number | null;
+	/** Null where a law does not keep its strength. */
 	plastic: number | null;
 }
 
@@ -22,7 +24,7 @@ export function interactionWith(section: PreparedSection, demand: InteractionPoi
 	const mechanics = mechanicsOf(section);
 	return {
 		firstYield: isStraight(mechanics) ? elasticFactor(mechanics, demand) : null,
-		plastic: plasticFactor(mechanics, demand)
+		plastic: keepsStrength(mechanics) ? plasticFactor(mechanics, demand) : null
 	};
 }
 

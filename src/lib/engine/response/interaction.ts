@@ -3,6 +3,7 @@ import type { PreparedSection } from '../section/prepared';
 import { firstYieldCurve } from './interaction-first-yield';
 import { plasticCurve } from './interaction-plastic';
 import { spreadPoints, type PlanePoint } from './interaction-spread';
+import { keepsStrength, lostStrengthNote } from './kept-strength';
 import { mechanicsOf, type Mechanics } from './law-groups';
 
 export type InteractionLimit = 'first-yield' | 'plastic';
@@ -35,7 +36,8 @@ export const interactionPoints = { least: 12, most: 720, usual: 72 } as const;
  * The curve of one limit in one plane of forces, the moment not in the plane held at zero: every
  * point lies on it. First yield: a fibre reaches the strain at which its law leaves its first line.
  * Plastic: every fibre at its own fy or fyc. Fails when N is beyond the section, or where a law is
- * stiffer in one sense than in the other (first yield then follows no straight line).
+ * stiffer in one sense than in the other (first yield then follows no straight line) or does not keep
+ * its strength (there is then no full plastic block).
  */
 export function interactionCurve(
 	section: PreparedSection,
@@ -43,6 +45,7 @@ export function interactionCurve(
 ): Result<InteractionCurve, Issue> {
 	const mechanics = mechanicsOf(section);
 	if (limit === 'first-yield' && !isStraight(mechanics)) return fail(bentIssue);
+	if (limit === 'plastic' && !keepsStrength(mechanics)) return fail(lostStrengthIssue);
 	const make = limit === 'plastic' ? plasticCurve : firstYieldCurve;
 	const curve = make(mechanics, plane, N * 1e3);
 	if (curve === null) return fail(outsideIssue(N, limit));
@@ -59,6 +62,8 @@ const bentIssue: Issue = {
 	message:
 		'A stress–strain law of this section starts with another slope in compression than in tension: it has no first-yield curve of straight lines.'
 };
+
+const lostStrengthIssue: Issue = { path: 'limit', message: lostStrengthNote.message };
 
 const outsideIssue = (N: number, limit: InteractionLimit): Issue => ({
 	path: 'N',

@@ -5,6 +5,7 @@ import { elasticPath, type ElasticPath } from './elastic-path';
 import { firstYieldOf } from './first-yield';
 import type { History } from './history/history';
 import { bendingFrom } from './history/history-bending';
+import { keepsStrength } from './kept-strength';
 import { mechanicsOf } from './law-groups';
 import { canCarry, isWithinReach, momentLimits } from './limits';
 import { plasticMomentOf } from './plastic';
@@ -24,7 +25,7 @@ export type Imposed =
 export interface Response {
 	states: ResponseState[];
 	firstYield: FirstYield;
-	/** kNm about the asked axis under the same N; null when N alone exceeds the section. */
+	/** kNm about the asked axis under the same N; null when N alone exceeds the section, or a law does not keep its strength. */
 	plasticMoment: number | null;
 }
 
@@ -60,7 +61,7 @@ export function bending(
 	const b = bender(mechanics, angle);
 	const elastic = elasticPath(mechanics, angle, path.transverse, path.N * 1e3);
 	const firstYield = firstYieldOf(mechanics, path);
-	const plasticMoment = plasticMomentOf(mechanics, path).moment;
+	const plasticMoment = keepsStrength(mechanics) ? plasticMomentOf(mechanics, path).moment : null;
 	const bent = balancer(b, path, elastic);
 	const carries = canCarry(mechanics, path.N * 1e3);
 	const limits = once(() => (carries ? momentLimits(mechanics, path) : null));

@@ -1,6 +1,7 @@
 import { bentAtCurvature, type Bent, type Forces } from '../bender';
 import { bentAtMoment, bentByPlane } from '../bent-at';
 import { elasticPath, type ElasticPath } from '../elastic-path';
+import { keepsStrength } from '../kept-strength';
 import { canCarry, isWithinReach, momentLimits } from '../limits';
 import { plasticMomentOf } from '../plastic';
 import type { Bending } from '../respond';
@@ -78,7 +79,7 @@ export function bendingFrom(history: History, path: BendingPath): HistoryBending
 	return {
 		path,
 		firstYield,
-		plasticMoment: plasticMomentOf(mechanics, path).moment,
+		plasticMoment: keepsStrength(mechanics) ? plasticMomentOf(mechanics, path).moment : null,
 		atCurvature: (curvature) => report(atCurvature(curvature)),
 		atMoment: (moment) => report(atMoment(moment)),
 		atPlane: (strainPlane) => report(find({ strainPlane })),

@@ -5,6 +5,8 @@ import {
 } from '../../../api/response';
 import { fail, ok, type Note, type Result } from '../../../engine/result';
 import { historyOf, type History } from '../../../engine/response/history/history';
+import { keepsStrength, lostStrengthNote } from '../../../engine/response/kept-strength';
+import { mechanicsOf } from '../../../engine/response/law-groups';
 import type { Imposed } from '../../../engine/response/respond';
 import type { BendingPath } from '../../../engine/response/state';
 import { noState } from '../../../engine/response/state-report';
@@ -109,6 +111,7 @@ export const responseAnswer = async (
 			...subject.value.notes,
 			...ignoredFields(body, known),
 			...materialNotes(section.value.parts),
+			...(keepsStrength(mechanicsOf(section.value)) ? [] : [lostStrengthNote]),
 			...notes
 		]
 	});
