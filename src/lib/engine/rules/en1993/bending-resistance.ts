@@ -40,8 +40,8 @@ const plain = { webRefused: false, effective: null, interpolation: null, gap: nu
 
 /**
  * Moment resistance 6.2.5 in one sense for a section of that class: plastic (1, 2); for class 3
- * first yield at any fibre, the effective class 2 section of 6.2.2.4 or, in the 2022 edition, the
- * interpolated modulus of Annex B, whichever gives most; for class 4 the effective section of
+ * first yield at any fibre, or what more the effective class 2 section of 6.2.2.4 gives; in the 2022
+ * edition the interpolated modulus of Annex B in its place where that has a row; for class 4 the effective section of
  * EN 1993-1-5. Bolt holes on the pulled side are deducted. `alone`: nothing acts beside this moment,
  * so that a class 3 web may be taken as class 2; `slender` gives the effective section of a sense.
  */
@@ -91,6 +91,7 @@ function classThreeResistance(
 		basis: 'elastic',
 		working: () => elasticMomentWorking(model, sense, firstYield / gammaM0)
 	};
+	if (classified.firstYieldOnly) return elastic;
 	const found = [elastic];
 	const interpolation = interpolationOf(model, sense, classified);
 	if (interpolation !== null && plastic.moment !== null) {
@@ -103,7 +104,8 @@ function classThreeResistance(
 			working: () => interpolatedMomentWorking(model, sense, interpolation, value)
 		});
 	}
-	const web = alone && allowEffectiveClass2 ? effectiveClassTwo(model, sense, classified) : null;
+	const mayWeb = alone && allowEffectiveClass2 && interpolation === null;
+	const web = mayWeb ? effectiveClassTwo(model, sense, classified) : null;
 	if (web?.kind === 'taken')
 		found.push({
 			...plain,

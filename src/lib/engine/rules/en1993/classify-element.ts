@@ -38,11 +38,14 @@ export interface JudgedElement {
 	readonly fy: number;
 	readonly plastic: Gradient | null;
 	readonly elastic: Gradient | null;
+	/** Of a part that the plastic block leaves in tension: its row once its elastic stress must hold. */
+	readonly held: (() => ClassifiedElement) | null;
 }
 
 /**
  * Class of a flat part under a stress case. A part counts as compressed where its mid-thickness
- * is. A part without compression at either limit is in tension: class 1, no limits.
+ * is. A part that the plastic block leaves in tension (α 0) is class 1 without limits; where the elastic
+ * stress compresses it, it is `held` to its class 3 limit in a section that must hold that stress.
  */
 export function classifyPlate(
 	standard: Standard,
@@ -55,14 +58,14 @@ export function classifyPlate(
 	const plastic = at(stress.plastic, scale.plastic);
 	const elastic = at(stress.elastic, scale.elastic);
 	const { fy, epsilon } = element;
-	const share = plastic?.share ?? elastic?.share;
-	if (share === undefined) {
+	if (plastic === null) {
 		const row = { ...inTension(standard, element), element: element.id };
-		return { row, fy, plastic, elastic };
+		const held = elastic && (() => heldRow(standard, element, elastic));
+		return { row, fy, plastic, elastic, held };
 	}
+	const { share, end: plasticEnd } = plastic;
 	const psi = elastic?.ratio ?? Number.NEGATIVE_INFINITY;
-	const plasticEnd = (plastic ?? elastic)?.end ?? 'tip';
-	const elasticEnd = (elastic ?? plastic)?.end ?? 'tip';
+	const elasticEnd = (elastic ?? plastic).end;
 	const limits =
 		element.type === 'internal'
 			? internalLimits(standard, epsilon, share, psi)
@@ -71,7 +74,18 @@ export function classifyPlate(
 	row.element = element.id;
 	row.alpha = share;
 	if (elastic) row.psi = psi;
-	return { row, fy, plastic, elastic };
+	return { row, fy, plastic, elastic, held: null };
+}
+
+/** A part that only the elastic stress compresses, by its class 3 limit alone: α is 0. */
+function heldRow(standard: Standard, element: PlateElement, { ratio, end }: Gradient) {
+	const { epsilon } = element;
+	const elastic =
+		element.type === 'internal'
+			? internalLimits(standard, epsilon, 1, ratio)[2]
+			: outstandLimits(epsilon, { alpha: 1, plasticEnd: end, psi: ratio, elasticEnd: end })[2];
+	const row = described(standard, element, [elastic, elastic, elastic], 'combined');
+	return { ...row, element: element.id, alpha: 0, psi: ratio };
 }
 
 type TubeStress = 'compression' | 'bending' | 'combined' | 'tension';
@@ -85,11 +99,11 @@ export function classifyTube(
 ): JudgedElement {
 	const { fy, epsilon } = element;
 	if (compressed === 'tension')
-		return { row: inTension(standard, element), fy, plastic: null, elastic: null };
+		return { row: inTension(standard, element), fy, plastic: null, elastic: null, held: null };
 	const gradient = tubeGradient(element, elastic);
 	const limits = tubularLimits(standard, epsilon, gradient?.ratio ?? -1);
 	const row = described(standard, element, limits, compressed);
-	return { row, fy, plastic: null, elastic: gradient };
+	return { row, fy, plastic: null, elastic: gradient, held: null };
 }
 
 /** Most and least compressed fibre of a round tube. */
@@ -114,7 +128,7 @@ export function classifyAngle(standard: Standard, element: AngleElement): Judged
 	const limit = (byMean ? angleRow.mean : angleRow.leg) * epsilon;
 	const whole = { part, type: 'angle', c: byMean ? mean : longer, t, epsilon } as const;
 	const row = described(standard, whole, [limit, limit, limit], 'compression');
-	return { row, fy, plastic: null, elastic: null };
+	return { row, fy, plastic: null, elastic: null, held: null };
 }
 
 function gradientOf(from: number, to: number, zero: number): Gradient | null {

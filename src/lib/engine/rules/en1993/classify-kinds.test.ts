@@ -68,10 +68,8 @@ describe('channel', () => {
 		expect(tip.psi).toBeCloseTo((8.5 - centre) / (75 - centre), 10);
 		const psi = tip.psi ?? 0;
 		expect(tip.limits[2]).toBeCloseTo(21 * Math.sqrt(0.57 - 0.21 * psi + 0.07 * psi ** 2), 10);
-		const root = row(channel, 'plusMz', 'topFlange');
-		expect(root.alpha).toBeCloseTo((centre - 8.5) / 66.5, 10);
-		expect(root.limits[0]).toBeCloseTo(9 / (root.alpha ?? 0) ** 1.5, 8);
-		expect(root.limits[2]).toBeCloseTo(21 * Math.sqrt(23.8), 8);
+		// bent the other way the block leaves them in tension: α 0 is class 1
+		expect(row(channel, 'plusMz', 'topFlange')).toMatchObject({ stress: 'tension', class: 1 });
 	});
 });
 
@@ -102,12 +100,9 @@ describe('tee', () => {
 		expect(stem.limits[2]).toBeCloseTo(21 * Math.sqrt(0.57 - 0.21 * psi + 0.07 * psi ** 2), 10);
 	});
 
-	it('with the stem in tension has the little that is compressed at its root', () => {
+	it('with the stem in tension in the block is class 1, though its root is compressed at first yield', () => {
 		const stem = row(tee, 'plusMy', 'web');
-		const alpha = 12.625 / 127;
-		expect(stem.alpha).toBeCloseTo(alpha, 10);
-		expect(stem.limits[0]).toBeCloseTo(9 / (alpha * Math.sqrt(alpha)), 6);
-		expect(stem.class).toBe(1);
+		expect(stem).toMatchObject({ stress: 'tension', class: 1, limits: [] });
 		expect(classes(tee).slice(0, 2)).toEqual([1, 3]);
 	});
 });

@@ -18,6 +18,8 @@ export interface ClassifiedCase {
 	/** Empty for a solid bar. */
 	readonly elements: ClassifiedElement[];
 	readonly governing: string;
+	/** Nothing beyond first yield counts, whatever the class was: it then stands as 3. */
+	readonly firstYieldOnly?: boolean;
 }
 
 /** Whose limits, and under which name their workings are kept. */
@@ -85,6 +87,7 @@ const worstClass = (judged: readonly JudgedElement[]) =>
 	Math.max(...judged.map(({ row }) => row.class));
 
 function heldElastically(judged: JudgedElement): JudgedElement {
+	if (judged.held) judged = { ...judged, row: judged.held() };
 	const { row } = judged;
 	const last = row.limits[2];
 	if (last === undefined || row.slenderness <= last) return judged;

@@ -134,7 +134,7 @@ function ruleNotes(c: DemandCase, rule: NormalRule): Note[] {
 		notes.push({
 			code: 'rule-from-memory',
 			message:
-				'The interpolated class 3 modulus of Annex B is from memory: check it against the standard. With axial force or about both axes the linear sum is used, which is on the safe side.',
+				'The interpolated class 3 modulus of Annex B is from memory: check it against the standard. A class 3 web is then not taken as class 2 as well: whether the edition lets both stand beside each other is not known.',
 			clause: clauseOf(standard, 'interpolated')
 		});
 	if (rule.kind === 'sum' && rule.topic === 'linearSum')

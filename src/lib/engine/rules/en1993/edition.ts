@@ -32,6 +32,7 @@ const clauses = {
 	classFour: ['6.2.9.3', '8.2.9.3'],
 	bendingShearAxial: ['6.2.10', '8.2.10'],
 	memberBuckling: ['6.3', '8.3'],
+	flexuralBuckling: ['6.3.1', '8.3.1'],
 	lateralTorsional: ['6.3.2', '8.3.2'],
 	interpolated: ['6.2.5', 'Annex B']
 } as const satisfies Record<string, readonly [string, string]>;

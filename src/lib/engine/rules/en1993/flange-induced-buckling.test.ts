@@ -44,11 +44,54 @@ describe('buckling of the flange into the web, EN 1993-1-5 8(1)', () => {
 		expect(worked.ok && worked.value / result.value).toBeCloseTo(1, 9);
 	});
 
-	it('fails where 100 is over 77.3, counted as class 2, and nothing passes then', () => {
+	it('a failing k 0.4 falls back to first yield with k 0.55: 100 is over 77.3, within 106.3', () => {
 		const { check, verdict, resistance } = judged(heavy, { demands: [{ My: 100 }] });
-		expect(resistance?.basis).toBe('effective-class-2');
-		expect(check?.utilisation).toBeCloseTo(100 / 77.27, 3);
-		expect(verdict.status).not.toBe('passes');
+		// I = (750·960³ − 742·800³)/12, over 480 mm, of 355 N/mm²
+		const first = (((750 * 960 ** 3 - 742 * 800 ** 3) / 12 / 480) * 355) / 1e6;
+		expect(resistance?.basis).toBe('elastic');
+		expect((resistance?.MyRd ?? 0) / first).toBeCloseTo(1, 12);
+		expect(verdict.countable).toMatchObject({ basis: 'elastic' });
+		expect(verdict.countable.moment! / first).toBeCloseTo(1, 12);
+		expect(check?.limit).toBeCloseTo(0.55 * (210_000 / 355) * Math.sqrt(6400 / 60_000), 9);
+		expect(verdict.status).toBe('passes');
+		expect(judged(heavy).verdict.countable.moment! / first).toBeCloseTo(1, 12);
+	});
+
+	it('counts first yield beside N, shear and Mz as well', () => {
+		for (const beside of [{ N: -50 }, { N: 50 }, { Mz: 5 }, { Vz: 20 }]) {
+			const { check, verdict } = judged(heavy, { demands: [{ My: 100, ...beside }] });
+			expect(check?.utilisation).toBeLessThan(1);
+			expect(verdict.countable.basis).toBe('elastic');
+			expect(verdict.countable.moment).toBeGreaterThan(0);
+		}
+	});
+
+	it('counts nothing where 0.55 fails too: flanges 2000×80 give 0.55 · 591.5 · 0.2 = 65.1', () => {
+		const { verdict } = judged({ ...heavy, b: 2000 }, { demands: [{ My: 100 }] });
+		expect(verdict.status).toBe('fails');
+		expect(verdict.countable.moment).toBe(0);
+	});
+
+	it('counts the plastic moment of class 1 with k 0.4 where 0.3 fails, without rotation of a hinge', () => {
+		// top 500×30 of fy 275, web 1000×6: 0.3 · 763.6 · √0.4 = 144.9 < 166.7 < 193.2
+		const girder: ISection = {
+			...heavy,
+			h: 1060,
+			b: 500,
+			bBottom: 300,
+			tw: 6,
+			tf: 30,
+			tfBottom: 30,
+			grade: 275
+		};
+		const section = prepareSection(girder);
+		if (!section.ok) throw new Error('not built');
+		const { resistance, notes } = analyse(section.value, { demands: [{ My: 1 }] });
+		expect(resistance?.basis).toBe('plastic');
+		expect(
+			resistance?.checks.find(({ name }) => name === 'flange-induced buckling')?.limit
+		).toBeCloseTo(0.4 * (210_000 / 275) * Math.sqrt(0.4), 9);
+		expect(notes.map(({ code }) => code)).toContain('flange-induced-no-rotation');
 	});
 
 	it('is met within 0.55 · 210000/355 · 0.3266 = 106.3 when counted to first yield', () => {

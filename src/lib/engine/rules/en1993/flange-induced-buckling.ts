@@ -1,18 +1,8 @@
 import { workingKey } from '../../explain/keys';
-import { boxSizes } from '../../section/kinds/box';
-import { iSizes } from '../../section/kinds/i';
-import type { PreparedSection } from '../../section/prepared';
+import type { SectionDefinition } from '../../section/definition';
 import type { Resistance, SectionClass } from '../result';
 import type { EnModel } from './model';
-
-/** Webs and flanges of a welded section, mm and mm². */
-interface WeldedSection {
-	readonly hw: number;
-	readonly tw: number;
-	readonly webArea: number;
-	readonly topFlange: number;
-	readonly bottomFlange: number;
-}
+import { plateGirderOf } from './plate-girder';
 
 /** What a moment about y is counted by. */
 export interface Counted {
@@ -27,7 +17,7 @@ export interface FlangeInducedBuckling {
 	readonly limit: number;
 	readonly clause: string;
 	/** The compression flange. */
-	readonly part: 'topFlange' | 'bottomFlange';
+	readonly part: string;
 }
 
 const clause = 'EN 1993-1-5 8(1)';
@@ -35,8 +25,8 @@ const clause = 'EN 1993-1-5 8(1)';
 /**
  * Buckling of the compression flange into the web, EN 1993-1-5 8(1): hw/tw up to
  * k (E/fyf) √(Aw/Afc), k 0.3 with plastic rotation (class 1), 0.4 with the plastic moment (class 2,
- * or a web taken as class 2), 0.55 elastic. Afc is the whole flange, which is on the safe side of its
- * effective area. Null for sections other than a welded I or box; girders curved in elevation (8(2)) are
+ * a web taken as class 2, or a moment between first yield and the full block), 0.55 elastic. Afc is the whole flange, which is on the safe side of its
+ * effective area. Null for sections other than a welded I or box, and plates that stand as an I; girders curved in elevation (8(2)) are
  * not covered.
  */
 export function flangeInducedBucklingCheck(
@@ -44,12 +34,13 @@ export function flangeInducedBucklingCheck(
 	counted: Counted,
 	name: string | null = null
 ): FlangeInducedBuckling | null {
-	const welded = weldedSection(model.section);
-	if (welded === null) return null;
-	const { hw, tw, webArea } = welded;
-	const part = counted.topCompressed ? 'topFlange' : 'bottomFlange';
+	const { definition } = model.section;
+	const girder = isRolled(definition) ? null : plateGirderOf(definition);
+	if (girder === null) return null;
+	const { hw, tw, webs } = girder;
+	const { part, b, t } = counted.topCompressed ? girder.top : girder.bottom;
 	const [E, fyf] = [model.strengths.modulus, model.strengths.of(part)];
-	const [k, flangeArea] = [factor(counted), welded[part]];
+	const [k, webArea, flangeArea] = [factor(counted), webs.length * hw * tw, b * t];
 	const value = hw / tw;
 	const limit = k * (E / fyf) * Math.sqrt(webArea / flangeArea);
 	if (name !== null)
@@ -71,26 +62,9 @@ export function flangeInducedBucklingCheck(
 }
 
 function factor({ overall, basis }: Counted): number {
-	if (overall === 1) return 0.3;
-	return overall === 2 || basis === 'effective-class-2' ? 0.4 : 0.55;
+	if (basis === 'elastic' || basis === 'effective') return 0.55;
+	return basis === 'plastic' && overall === 1 ? 0.3 : 0.4;
 }
 
-function weldedSection({ definition }: PreparedSection): WeldedSection | null {
-	if (definition.kind === 'i' && definition.fabrication === 'welded')
-		return plated(iSizes(definition), 1);
-	return definition.kind === 'box' ? plated(boxSizes(definition), 2) : null;
-}
-
-function plated(
-	{ h, tw, bTop, tfTop, bBottom, tfBottom }: Omit<ReturnType<typeof iSizes>, 'r' | 'middle'>,
-	webs: number
-): WeldedSection {
-	const hw = h - tfTop - tfBottom;
-	return {
-		hw,
-		tw,
-		webArea: webs * hw * tw,
-		topFlange: bTop * tfTop,
-		bottomFlange: bBottom * tfBottom
-	};
-}
+const isRolled = (definition: SectionDefinition): boolean =>
+	definition.kind === 'i' && definition.fabrication === 'rolled';

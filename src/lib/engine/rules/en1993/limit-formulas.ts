@@ -33,16 +33,21 @@ export function limitFormulas(
 	given: LimitInputs
 ): readonly [LimitFormula, LimitFormula, LimitFormula] {
 	const { row, plastic, elastic } = judged;
+	const all = (own: LimitFormula) => [own, own, own] as const;
 	switch (row.type) {
-		case 'internal':
-			return internalFormulas(standard, given);
-		case 'outstand':
-			return outstandFormulas(given, (plastic ?? elastic)?.end ?? 'tip');
+		case 'internal': {
+			const formulas = internalFormulas(standard, given);
+			return judged.held ? all(formulas[2]) : formulas;
+		}
+		case 'outstand': {
+			const formulas = outstandFormulas(given, (plastic ?? elastic)?.end ?? 'tip');
+			return judged.held ? all(formulas[2]) : formulas;
+		}
 		case 'tubular':
 			return tubularFormulas(standard, given);
 		case 'angle': {
 			const own = { formula: `${row.limits[0]! / row.epsilon}·ε`, inputs: [given.epsilon] };
-			return [own, own, own];
+			return all(own);
 		}
 	}
 }

@@ -88,16 +88,16 @@ function epsilonPiece({ fy, row }: JudgedElement, modulus: number): Piece {
 	};
 }
 
-/** From the plastic block, or the elastic stress where the block leaves the part in tension. */
-function alphaPiece({ plastic, elastic }: JudgedElement, alpha: number): Piece {
+/** From the plastic block; 0 where that leaves the part in tension. */
+function alphaPiece({ plastic }: JudgedElement, alpha: number): Piece {
 	const title = 'Compressed share α of the width';
-	const { most = 1, least = 0 } = plastic ?? elastic ?? {};
-	if (alpha === 1) return { title, formula: 'α = 1', inputs: [], value: alpha };
-	const edge = plastic ? 'distance from the plastic neutral axis' : 'elastic stress, ratio only';
-	const unit = plastic ? 'mm' : '';
+	const { most = 1, least = 0 } = plastic ?? {};
+	if (alpha === 1 || alpha === 0)
+		return { title, formula: `α = ${alpha}`, inputs: [], value: alpha };
+	const edge = 'distance from the plastic neutral axis';
 	const inputs = [
-		{ symbol: 'd1', value: most, unit, from: `${edge}, more compressed edge` },
-		{ symbol: 'd2', value: least, unit, from: `${edge}, other edge` }
+		{ symbol: 'd1', value: most, unit: 'mm', from: `${edge}, more compressed edge` },
+		{ symbol: 'd2', value: least, unit: 'mm', from: `${edge}, other edge` }
 	];
 	return { title, formula: 'α = d1/(d1 − d2)', inputs, value: alpha };
 }

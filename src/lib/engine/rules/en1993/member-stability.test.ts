@@ -51,9 +51,22 @@ describe('what is left unchecked of the member', () => {
 
 	it('demands that are checked need no word of lateral–torsional buckling', () => {
 		const demands = [{ My: 10, unbracedLength: 4000 }];
-		expect(stabilityNotes(model.section, demands)).toHaveLength(1);
-		expect(stabilityNotes(model.section, demands, () => true)).toHaveLength(0);
-		expect(stabilityNotes(model.section, [])).toHaveLength(1);
+		expect(stabilityNotes(model, demands)).toHaveLength(1);
+		expect(stabilityNotes(model, demands, () => true)).toHaveLength(0);
+		expect(stabilityNotes(model, [])).toHaveLength(1);
+	});
+
+	it('is cited by the edition that was asked for', () => {
+		const later = testModel(i, { standard: 'EN1993-1-1:2022' });
+		const cited = stabilityGaps(later, { N: -1, My: 1, unbracedLength: 1 }, 'one');
+		expect(cited.map(({ clause }) => clause)).toEqual([
+			'EN 1993-1-1:2022 8.3.2',
+			'EN 1993-1-1:2022 8.3.1'
+		]);
+		expect(stabilityNotes(later, [{ N: -1, My: 1 }]).map(({ clause }) => clause)).toEqual([
+			'EN 1993-1-1:2022 8.3.2',
+			'EN 1993-1-1:2022 8.3.1'
+		]);
 	});
 });
 

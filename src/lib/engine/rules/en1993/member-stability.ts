@@ -1,21 +1,22 @@
 import type { Note } from '../../result';
 import type { PreparedSection } from '../../section/prepared';
-import type { Demand } from '../result';
+import type { Demand, Standard } from '../result';
+import { clauseOf } from './edition';
 import type { LateralOutcome } from './lateral-torsional';
 import type { EnModel } from './model';
 
-const lateral: Note = {
+const lateral = (standard: Standard): Note => ({
 	code: 'ltb-not-checked',
 	message:
 		'Lateral–torsional buckling is not checked: moment resistances are of the cross-section.',
-	clause: 'EN 1993-1-1:2005 6.3.2'
-};
+	clause: clauseOf(standard, 'lateralTorsional')
+});
 
-const flexural: Note = {
+const flexural = (standard: Standard): Note => ({
 	code: 'member-buckling-not-checked',
 	message: 'Buckling of the member under compression is not checked.',
-	clause: 'EN 1993-1-1:2005 6.3.1'
-};
+	clause: clauseOf(standard, 'flexuralBuckling')
+});
 
 /**
  * Whether bending can let the member buckle sideways: round and square bars and tubes never; bars, tubes
@@ -53,7 +54,7 @@ export function canBuckleSideways({ definition, gross }: PreparedSection, demand
  * under compression.
  */
 export function stabilityGaps(
-	{ section }: EnModel,
+	{ section, code: { standard } }: EnModel,
 	demand: Demand,
 	name: string,
 	outcome: LateralOutcome | null = null
@@ -63,11 +64,14 @@ export function stabilityGaps(
 	const gaps: Note[] = [];
 	if (canBuckleSideways(section, demand)) {
 		const what = 'Lateral–torsional buckling';
-		if (!outcome?.value) gaps.push({ ...lateral, message: missing(what, name) });
+		if (!outcome?.value) gaps.push({ ...lateral(standard), message: missing(what, name) });
 		else if (My !== 0 && Mz !== 0)
-			gaps.push({ ...lateral, message: missing(`${what} with bending about both axes`, name) });
+			gaps.push({
+				...lateral(standard),
+				message: missing(`${what} with bending about both axes`, name)
+			});
 	}
-	if (N < 0) gaps.push({ ...flexural, message: missing('Member buckling', name) });
+	if (N < 0) gaps.push({ ...flexural(standard), message: missing('Member buckling', name) });
 	return gaps;
 }
 
@@ -83,7 +87,7 @@ export const isUnbent = ({ N = 0, My = 0, Mz = 0 }: Demand): boolean =>
  * whose lateral–torsional buckling `isChecked` needs no word of it.
  */
 export function stabilityNotes(
-	section: PreparedSection,
+	{ section, code: { standard } }: Pick<EnModel, 'section' | 'code'>,
 	demands: readonly Demand[],
 	isChecked: (demand: Demand) => boolean = () => false
 ): Note[] {
@@ -91,7 +95,7 @@ export function stabilityNotes(
 	const asked = demands.length === 0 ? [bent] : demands.map((one) => (isUnbent(one) ? bent : one));
 	const notes: Note[] = [];
 	if (asked.some((demand) => canBuckleSideways(section, demand) && !isChecked(demand)))
-		notes.push(lateral);
-	if (demands.some(({ N = 0 }) => N < 0)) notes.push(flexural);
+		notes.push(lateral(standard));
+	if (demands.some(({ N = 0 }) => N < 0)) notes.push(flexural(standard));
 	return notes;
 }

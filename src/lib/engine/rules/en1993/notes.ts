@@ -32,7 +32,7 @@ export function strengthNotes(
 		notes.push({
 			code: 'interpolated-modulus',
 			message:
-				'A class 3 moment is interpolated between the elastic and the plastic modulus by the slenderness of its parts.',
+				'A class 3 moment is interpolated between the elastic and the plastic modulus by the slenderness of its parts (Annex B, from memory). It is given in place of the effective class 2 section, even where that would be more.',
 			clause: clauseOf(standard, 'interpolated')
 		});
 	if (Object.values(bent).some(({ effective }) => effective !== null))

@@ -11,7 +11,12 @@ import { effectsOf, type DemandClass } from './demand-class';
 import { demandNames } from './demand-names';
 import type { EffectiveSection } from './effective/effective-section';
 import { contextOf, type EnContext } from './en-context';
-import { flangeNotes } from './flange-checks';
+import {
+	flangeFirstYieldNote,
+	flangeNotes,
+	heldToFirstYield,
+	noRotationNotes
+} from './flange-checks';
 import { greatest, judgeDemand, type JudgedDemand } from './judged-demand';
 import { isUnbent, stabilityNotes } from './member-stability';
 import { pureCases, pureClasses, type EnModel, type PureCases } from './model';
@@ -61,8 +66,10 @@ export function en1993Outcome(model: EnModel, asked: readonly Demand[]): EnOutco
 			...holeNotes(model),
 			...judged.flatMap(({ state, notes }) => [...notes, ...state.missing]),
 			...(unbent ? flangeNotes(model, cases, bent.plusMy) : []),
+			...noRotationNotes(model, cases),
+			...(isHeldToFirstYield(model, cases) ? [flangeFirstYieldNote(null)] : []),
 			...shearLagNotes(model),
-			...stabilityNotes(model.section, demands, isHeld(demands, judged))
+			...stabilityNotes(model, demands, isHeld(demands, judged))
 		]
 	};
 }
@@ -94,12 +101,15 @@ function classificationOf(
 	return { standard: code.standard, overall, basis, elements, governing, byCase };
 }
 
-const bentAllWays = ({ bending, cases }: EnContext): Bent => ({
-	plusMy: bending('plusMy', cases.plusMy),
-	minusMy: bending('minusMy', cases.minusMy),
+const bentAllWays = ({ bending, cases, model }: EnContext): Bent => ({
+	plusMy: bending('plusMy', heldToFirstYield(model, cases.plusMy, 1)),
+	minusMy: bending('minusMy', heldToFirstYield(model, cases.minusMy, -1)),
 	plusMz: bending('plusMz', cases.plusMz),
 	minusMz: bending('minusMz', cases.minusMz)
 });
+
+const isHeldToFirstYield = (model: EnModel, { plusMy, minusMy }: PureCases): boolean =>
+	heldToFirstYield(model, plusMy, 1) !== plusMy || heldToFirstYield(model, minusMy, -1) !== minusMy;
 
 /** The effective section of the pure case that the class stands on. */
 function standingEffective(
