@@ -3,6 +3,8 @@ const uncheckedWords: Readonly<Record<string, string>> = {
 	'member-buckling-not-checked': 'member buckling',
 	'shear-buckling-not-built': 'shear buckling',
 	'shear-not-checked': 'shear buckling',
+	'web-shear-not-built': 'moment beside shear buckling',
+	'flange-induced-not-built': 'flange-induced buckling',
 	'net-section-not-checked': 'net section at bolt holes',
 	'resistance-missing': 'bolt holes',
 	'shear-lag': 'shear lag',

@@ -1,10 +1,11 @@
 import type { Note } from '../../result';
 import type { DemandCase } from './demand-case';
 import { clauseOf } from './edition';
+import { platesGaps } from './plates-gaps';
 
 /** Why checks of a demand that apply have no figure. */
 export function gapNotes(c: DemandCase, gap: 'holes' | 'slender' | null): Note[] {
-	return [...ruleGap(c, gap), ...shearGap(c)];
+	return [...ruleGap(c, gap), ...shearGap(c), ...platesGaps(c)];
 }
 
 function ruleGap(

@@ -35,7 +35,7 @@ export function roundAreas(gross: number): ShearAreas {
 }
 
 /** Sine of the angle up to which a plate counts as parallel to the force: rounding of degrees. */
-const parallel = 1e-9;
+export const parallel = 1e-9;
 
 /** Free plates: only those whose width runs along the force. */
 export function parallelPlates(plates: readonly Plate[]): ShearAreas {

@@ -2,6 +2,7 @@ import type { Mechanics } from '../../response/law-groups';
 import type { Demand } from '../result';
 import type { EnModel } from './model';
 import type { ShearLoss } from './moment-shear';
+import { plateGirderOf } from './plate-girder';
 import type { AxisShear, ShearResistances } from './shear-resistance';
 
 /** What the shear of one demand does to the strength of the section, 6.2.8 and 6.2.10. */
@@ -11,7 +12,7 @@ export interface ShearState {
 	readonly rhoY: number;
 	readonly rhoZ: number;
 	readonly high: boolean;
-	/** Shear along z buckles the web of an I or box, so that EN 1993-1-5 7.1 stands for 6.2.8. */
+	/** Shear along z buckles the web of a girder, so that EN 1993-1-5 7.1 stands for 6.2.8. */
 	readonly buckled: boolean;
 }
 
@@ -38,9 +39,8 @@ export function shearState(
 	{ Vy = 0, Vz = 0 }: Demand,
 	resistances: ShearResistances
 ): ShearState {
-	const { kind } = section.definition;
-	const plated = kind === 'i' || kind === 'box';
-	const buckled = plated && resistances.z !== null && resistances.z.buckling !== null;
+	const girder = plateGirderOf(section.definition);
+	const buckled = girder !== null && resistances.z !== null && resistances.z.buckling !== null;
 	const rhoY = reduction(Vy, resistances.y);
 	const rhoZ = buckled ? 0 : reduction(Vz, resistances.z);
 	return { resistances, rhoY, rhoZ, high: rhoY > 0 || rhoZ > 0, buckled };

@@ -1,9 +1,8 @@
 import { workingKey } from '../../explain/keys';
-import { boxSizes } from '../../section/kinds/box';
-import { iSizes } from '../../section/kinds/i';
 import type { AxisSense } from '../section-moments';
 import { flangesMoment, flangesWithWebMoment, type MajorSense } from './effective/flange-moments';
 import type { EnModel } from './model';
+import { plateGirderOf } from './plate-girder';
 import type { ReducedBy } from './moment-shear-workings';
 import type { AxisShear } from './shear-resistance';
 
@@ -82,18 +81,13 @@ function webMoments(model: EnModel, sense: MajorSense, N: number) {
 /** A thrust that the web alone would have to yield for: its whole depth is then in compression, 7.1(4). */
 function webWhollyCompressed({ section, code }: EnModel, N: number): boolean {
 	if (N >= 0) return false;
+	const girder = plateGirderOf(section.definition);
+	if (girder === null) return false;
+	const { hw, tw, webs } = girder;
 	let squash = 0;
 	for (const { name, material } of section.parts)
-		if (/web$/i.test(name))
-			squash += webArea(section.definition) * Math.min(material.fy, material.fyc);
+		if (webs.includes(name)) squash += hw * tw * Math.min(material.fy, material.fyc);
 	return -N * 1e3 * code.gammaM0 >= squash;
-}
-
-function webArea(definition: EnModel['section']['definition']): number {
-	if (definition.kind !== 'i' && definition.kind !== 'box') return 0;
-	const { h, tfTop, tfBottom, tw } =
-		definition.kind === 'i' ? iSizes(definition) : boxSizes(definition);
-	return (h - tfTop - tfBottom) * tw;
 }
 
 /**

@@ -2,7 +2,7 @@ import type { Contact } from './contacts';
 import type { Hold } from './holds';
 import { mergedHolds } from './holds';
 import type { Run, Runs } from './runs';
-import { inStrip, type Strip } from './strips';
+import { inStrip, pointOfStrip, type Strip } from './strips';
 
 /**
  * Least second moment of what holds a plate's edge, about the mid-plane of that plate, as a multiple
@@ -100,11 +100,50 @@ export function weighedHolds(
 		const between = i > 0 && i < holds.length - 1;
 		const clear = widestBeside(wall, holds, i);
 		if (!between && clear <= stocky * t) return { ...hold, stiff: true, stiffener: false };
+		if (holds.length === 1 && isWithin(wall, hold, about))
+			return { ...hold, stiff: true, stiffener: false };
+		if (!between && isFlange(strips, runs, wall, about, hold))
+			return { ...hold, stiff: true, stiffener: false };
 		const branch = openBranch(runs, neighbours, run, hold, holds);
 		if (branch === null) return { ...hold, stiff: true, stiffener: false };
 		const least = (between ? leastRigidity.between : leastRigidity.edge) * t ** 3 * clear;
 		const stiff = clear <= stocky * t || isStiff(strips, runs, about, branch, least);
 		return { ...hold, stiff, stiffener: between };
+	});
+}
+
+/** Share of a wall's thickness that is rounding. */
+const rounding = 1e-6;
+
+/**
+ * Whether the wall goes on beyond a hold on both sides. The only one of a wall then needs no stiffness: the
+ * wall on both sides of it can but twist about it, which is how an outstand on a hinge buckles (kσ 0.43);
+ * that the line itself stays straight is the member's own buckling.
+ */
+function isWithin({ from, to }: Run, hold: Hold, { halfThickness }: Strip): boolean {
+	const slack = rounding * halfThickness;
+	return hold.from > from + slack && hold.to < to - slack;
+}
+
+/**
+ * Whether the wall ends on a plate that reaches beyond both its faces: a flange, which holds its web
+ * whatever its stiffness, as in a section given as an I. A lip stands on one side alone.
+ */
+function isFlange(
+	strips: readonly Strip[],
+	{ runs, runOf }: Runs,
+	wall: Run,
+	about: Strip,
+	hold: Hold
+): boolean {
+	if (isWithin(wall, hold, about)) return false;
+	const reach = about.halfThickness * (1 + rounding);
+	return hold.by.some((plate) => {
+		const ends = runs[runOf[plate]!]!.pieces.flatMap(({ plate: one }) => {
+			const strip = strips[one]!;
+			return [-strip.half, strip.half].map((u) => inStrip(about, pointOfStrip(strip, u)).v);
+		});
+		return Math.min(...ends) < -reach && Math.max(...ends) > reach;
 	});
 }
 

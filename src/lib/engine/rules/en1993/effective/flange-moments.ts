@@ -1,21 +1,12 @@
 import { plasticMomentOf } from '../../../response/plastic';
-import { boxSizes } from '../../../section/kinds/box';
-import { iSizes } from '../../../section/kinds/i';
-import type { PreparedSection } from '../../../section/prepared';
 import type { EnModel } from '../model';
+import { plateGirderOf, type GirderFlange, type PlateGirder } from '../plate-girder';
 import { cutMechanics } from './cut-mechanics';
 import { elementWidth } from './element-width';
 import { stripOf, type Strip } from './strip';
 
 /** Bending about y: +My compresses the top. */
 export type MajorSense = 'plusMy' | 'minusMy';
-
-interface Flanges {
-	readonly top: number;
-	readonly bottom: number;
-	/** Between the middles of the flanges. */
-	readonly lever: number;
-}
 
 /** What `flangesMoment` stands on, N, mm², mm and kNm; areas are effective. */
 export interface FlangesMoment {
@@ -32,23 +23,22 @@ export interface FlangesMoment {
  * Design moment of the effective flanges alone, Mf,Rd of EN 1993-1-5 5.4(2) and 7.1(1), kNm: the weaker
  * flange's force over the distance between them, less the share of N (kN, either sign) in both
  * flanges. Flanges at their own strengths; a flange that is compressed by its effective width (both
- * under a compressive N). Null for sections other than an I or a box.
+ * under a compressive N). Null for sections other than an I, a box or plates that stand as an I.
  */
 export function flangesMoment(model: EnModel, sense: MajorSense, N = 0): FlangesMoment | null {
-	const flanges = flangesOf(model.section);
-	if (flanges === null) return null;
+	const girder = plateGirderOf(model.section.definition);
+	if (girder === null) return null;
 	const { gammaM0 } = model.code;
-	const [pressed, pulled] = flangeNames(sense);
-	const lost = lostArea(flangeStrips(model, sense, N));
-	const compression = (areaOf(flanges, pressed) - lost(pressed)) * strength(model, pressed);
-	const tension = (areaOf(flanges, pulled) - lost(pulled)) * strength(model, pulled);
+	const lost = lostArea(flangeStrips(model, girder, sense, N));
+	const force = ({ part, b, t }: GirderFlange) => (b * t - lost(part)) * strength(model, part);
+	const [compression, tension] = flangesBy(girder, sense).map(force) as [number, number];
 	const axialFactor = Math.max(0, 1 - (Math.abs(N) * 1e3 * gammaM0) / (compression + tension));
-	const force = Math.min(compression, tension) / gammaM0;
+	const least = Math.min(compression, tension) / gammaM0;
 	return {
-		value: force * flanges.lever * axialFactor * 1e-6,
+		value: least * girder.lever * axialFactor * 1e-6,
 		compression,
 		tension,
-		lever: flanges.lever,
+		lever: girder.lever,
 		axialFactor
 	};
 }
@@ -56,14 +46,15 @@ export function flangesMoment(model: EnModel, sense: MajorSense, N = 0): Flanges
 /**
  * Design plastic moment of the effective flanges with the web counted whole whatever its class, Mpl,Rd of
  * EN 1993-1-5 7.1(1), kNm; with N (kN, at the gross centroid, tension positive) the moment left beside
- * it, never more than without N. Null for sections other than an I or a box, and where N alone is
+ * it, never more than without N. Null for other sections than those, and where N alone is
  * too much.
  */
 export function flangesWithWebMoment(model: EnModel, sense: MajorSense, N = 0): number | null {
-	if (flangesOf(model.section) === null) return null;
+	const girder = plateGirderOf(model.section.definition);
+	if (girder === null) return null;
 	const { gammaM0 } = model.code;
 	const axisAngle = sense === 'plusMy' ? 0 : 180;
-	const strips = flangeStrips(model, sense, N);
+	const strips = flangeStrips(model, girder, sense, N);
 	const mechanics = cutMechanics(model.section, model.mechanics, strips);
 	const at = (axial: number) =>
 		plasticMomentOf(mechanics, { axisAngle, transverse: 'curvature-zero', N: axial * gammaM0 })
@@ -74,38 +65,34 @@ export function flangesWithWebMoment(model: EnModel, sense: MajorSense, N = 0): 
 	return Math.max(0, Math.min(moment, free)) / gammaM0;
 }
 
-type FlangeName = 'topFlange' | 'bottomFlange';
-
-const flangeNames = (sense: MajorSense): readonly [FlangeName, FlangeName] =>
-	sense === 'plusMy' ? ['topFlange', 'bottomFlange'] : ['bottomFlange', 'topFlange'];
-
-const areaOf = ({ top, bottom }: Flanges, name: FlangeName) =>
-	name === 'topFlange' ? top : bottom;
-
-function flangesOf({ definition }: PreparedSection): Flanges | null {
-	if (definition.kind !== 'i' && definition.kind !== 'box') return null;
-	const sizes = definition.kind === 'i' ? iSizes(definition) : boxSizes(definition);
-	const { h, bTop, tfTop, bBottom, tfBottom } = sizes;
-	return { top: bTop * tfTop, bottom: bBottom * tfBottom, lever: h - (tfTop + tfBottom) / 2 };
-}
+/** The flange that bending compresses, and the other. */
+const flangesBy = (
+	{ top, bottom }: PlateGirder,
+	sense: MajorSense
+): [GirderFlange, GirderFlange] => (sense === 'plusMy' ? [top, bottom] : [bottom, top]);
 
 /** What a compressed flange loses under uniform compression, Tables 4.1 and 4.2 with ψ = 1. */
-function flangeStrips({ elements }: EnModel, sense: MajorSense, N: number): Strip[] {
+function flangeStrips(
+	{ elements }: EnModel,
+	girder: PlateGirder,
+	sense: MajorSense,
+	N: number
+): Strip[] {
 	if (elements.kind !== 'plates') return [];
-	const [pressed, pulled] = flangeNames(sense);
-	const compressed = N < 0 ? [pressed, pulled] : [pressed];
+	const flanges = flangesBy(girder, sense).map(({ part }) => part);
+	const compressed = N < 0 ? flanges : flanges.slice(0, 1);
 	return elements.plates
-		.filter(({ part }) => compressed.some((name) => name === part))
+		.filter(({ part }) => compressed.includes(part))
 		.flatMap((plate) => {
 			const removed = elementWidth(plate, 1, 1, 0)?.removed;
 			return removed ? [stripOf(plate, removed[0], removed[1])] : [];
 		});
 }
 
-const lostArea = (strips: readonly Strip[]) => (name: FlangeName) =>
+const lostArea = (strips: readonly Strip[]) => (name: string) =>
 	strips.reduce((sum, { element, area }) => sum + (element.part === name ? area : 0), 0);
 
-function strength({ section: { parts } }: EnModel, name: FlangeName): number {
+function strength({ section: { parts } }: EnModel, name: string): number {
 	const material = parts.find((part) => part.name === name)?.material;
 	return material ? Math.min(material.fy, material.fyc) : 0;
 }
