@@ -37,6 +37,8 @@ const exempt = [
 	'input, select, option, label',
 	// the drawing: sizes put in, and strain, stress and forces of the state that is bent to
 	'.middle',
+	// states of the whole section that are solved for, and torsion, which names its own methods and bounds
+	'.interaction, section[aria-labelledby="torsion-head"]',
 	// axis figures of the ruler and the chart, and the handle with what is typed
 	'[aria-hidden="true"]',
 	'.bend-controls, [role="slider"], .tick, .axis'

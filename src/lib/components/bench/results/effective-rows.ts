@@ -20,6 +20,8 @@ export interface EffectiveRow {
 	readonly converged: string;
 	/** Key of the working of the one-pass figure. */
 	readonly key: string;
+	/** Of the gross figure; null where the gross section has none to compare. */
+	readonly grossKey: string | null;
 }
 
 interface Both {
@@ -56,7 +58,8 @@ export function effectiveRows(
 			gross: text(gross[figure]),
 			once: text(once[figure]),
 			converged: text(converged[figure]),
-			key: workingKey.effective(on, figure)
+			key: workingKey.effective(on, figure),
+			grossKey: workingKey.gross(figure)
 		};
 	};
 	const about = on === 'N' ? [] : on.endsWith('y') ? axisY : axisZ;
@@ -91,7 +94,8 @@ function shiftRows(
 			gross: '',
 			once: text(once[figure]),
 			converged: text(converged[figure]),
-			key: workingKey.effective(on, figure)
+			key: workingKey.effective(on, figure),
+			grossKey: null
 		}));
 }
 
