@@ -13,8 +13,9 @@ import { isEn1993 } from './en1993/edition';
 import type { SectionElements } from './en1993/elements/element';
 import { elementsOf } from './en1993/elements/elements-of';
 import { lawIssues } from './en1993/law-cover';
-import { en1993Outcome, type EnOutcome } from './en1993/rules';
+import { en1993Outcome } from './en1993/rules';
 import { strengthIssues, strengthsOf, type Strengths } from './en1993/strengths';
+import { tensionOnly } from './en1993/tension-only';
 import { codeNotBuilt } from './not-built';
 import type { CodeChoice, Demand, Stiffeners } from './result';
 import { momentFigures, resistingMoments, sectionMoments } from './section-moments';
@@ -38,21 +39,14 @@ export function analyse(section: PreparedSection, request: AnalyseRequest = {}):
 	const moments = sectionMoments(mechanics, strengths.even);
 	const workings = request.explain ? new Workings() : null;
 	const stiffeners = request.stiffeners ?? null;
-	const outcome = judged(section, code, strengths, (elements) =>
-		en1993Outcome(
-			{
-				section,
-				mechanics,
-				moments: resistingMoments(mechanics, section, moments),
-				strengths,
-				elements,
-				code,
-				stiffeners,
-				workings
-			},
-			request.demands ?? []
-		)
-	);
+	const demands = request.demands ?? [];
+	const outcome = judged(section, code, strengths, (elements) => {
+		const resisting = resistingMoments(mechanics, section, moments);
+		const given = { section, mechanics, moments: resisting, strengths, code, stiffeners, workings };
+		if (elements === null)
+			return { classification: null, effective: null, ...tensionOnly(given, demands) };
+		return en1993Outcome({ ...given, elements }, demands);
+	});
 	const figures: AnalysisFigures = {
 		strengthBasis: section.strengthBasis,
 		code,
@@ -85,7 +79,7 @@ function judged(
 	section: PreparedSection,
 	code: CodeChoice,
 	strengths: Strengths,
-	outcome: (elements: SectionElements) => EnOutcome
+	outcome: (elements: SectionElements | null) => Outcome
 ): Outcome {
 	const none = (notes: Note[]): Outcome => ({
 		classification: null,
@@ -96,13 +90,12 @@ function judged(
 	});
 	if (!isEn1993(code.standard)) return none([codeNotBuilt(code.standard)]);
 	const { elements, notes } = elementsOf(section, strengths);
-	if (elements === null) return none([...notes]);
 	const issues = [
 		...factorIssues(code),
 		...strengthIssues(section, strengths, code.standard),
 		...lawIssues(section.parts, code.standard)
 	];
-	if (issues.length > 0) return none(issues);
+	if (issues.length > 0) return none(elements === null ? [...notes, ...issues] : issues);
 	const found = outcome(elements);
 	return { ...found, notes: [...notes, ...found.notes] };
 }

@@ -5,7 +5,7 @@ import type { Standard } from './result';
 export const outlineNotClassed: Note = {
 	code: 'class-not-built',
 	message:
-		'An outline does not say which of its parts are plates, so it has no class and no resistance. First yield and full plastic are properties of the shape only.'
+		'An outline does not say which of its parts are plates, so it has no class and no resistance but to tension. First yield and full plastic are properties of the shape only.'
 };
 
 export const codeNotBuilt = (standard: Standard): Note => ({

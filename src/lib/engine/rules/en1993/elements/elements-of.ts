@@ -64,7 +64,7 @@ export function elementsOf({ definition }: PreparedSection, strengths: Strengths
 const slenderFlat: Note = {
 	code: 'flat-too-slender',
 	message:
-		'A flat bar wider than 18ε times its thickness has no class: Table 5.2 has no row for a plate with two free edges, and only a stockier bar is sure not to twist out of its plane. There is no resistance. First yield and full plastic are properties of the section only.',
+		'A flat bar wider than 18ε times its thickness has no class: Table 5.2 has no row for a plate with two free edges, and only a stockier bar is sure not to twist out of its plane. There is no resistance but to tension. First yield and full plastic are properties of the section only.',
 	clause: 'EN 1993-1-1 Table 5.2'
 };
 
