@@ -20,6 +20,18 @@ function ruler(definition: SectionDefinition, demand: Demand) {
 /** 20 × 200, S355 (fy 345 above 16 mm): W = 20 × 200² / 6, plastic 1.5 times. */
 const flat: SectionDefinition = { kind: 'flat', b: 20, h: 200, grade: 'S355' };
 
+/** The same bar as an outline, which has no class. */
+const outline: SectionDefinition = {
+	kind: 'outline',
+	outer: [
+		[0, 0],
+		[20, 0],
+		[20, 200],
+		[0, 200]
+	],
+	grade: 'S355'
+};
+
 describe('the ruler of a demand', () => {
 	it('counts up to first yield in class 3', () => {
 		const model = ruler(openingStudy.section, { My: 2400 });
@@ -38,7 +50,7 @@ describe('the ruler of a demand', () => {
 	});
 
 	it('counts nothing where no rule reaches, and still shows what the section has', () => {
-		const model = ruler(flat, { My: 30 });
+		const model = ruler(outline, { My: 30 });
 		expect(model.count).toBeNull();
 		expect(model.firstYield).toBeCloseTo((345 * 20 * 200 ** 2) / 6e6, 6);
 		expect(model.plastic).toBeCloseTo((345 * 20 * 200 ** 2) / 4e6, 6);
