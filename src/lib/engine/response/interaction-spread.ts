@@ -12,13 +12,20 @@ export interface ConvexCurve {
 	between(from: PlanePoint, to: PlanePoint): PlanePoint;
 }
 
-/** `count` points of a curve, anticlockwise and well spread: the longest chord is always the next to be split. */
-export function spreadPoints({ start, between }: ConvexCurve, count: number): PlanePoint[] {
+/**
+ * `count` points of a curve, anticlockwise and well spread: the longest chord is always the next to be
+ * split. A generator, so that it can pause: it yields before every point.
+ */
+export function* spreadingPoints(
+	{ start, between }: ConvexCurve,
+	count: number
+): Generator<void, PlanePoint[]> {
 	const points = thinned(start, count);
 	const distance = distanceIn(start);
 	const next = (i: number) => points[(i + 1) % points.length]!;
 	const chords = points.map((point, i) => distance(point, next(i)));
 	while (points.length < count) {
+		yield;
 		const at = longest(chords);
 		const [from, to] = [points[at]!, next(at)];
 		const middle = between(from, to);

@@ -2,7 +2,7 @@ import { fail, ok, type Issue, type Result } from '../result';
 import type { PreparedSection } from '../section/prepared';
 import { firstYieldCurve } from './interaction-first-yield';
 import { plasticCurve } from './interaction-plastic';
-import { spreadPoints, type PlanePoint } from './interaction-spread';
+import { spreadingPoints, type PlanePoint } from './interaction-spread';
 import { keepsStrength, lostStrengthNote } from './kept-strength';
 import { mechanicsOf, type Mechanics } from './law-groups';
 
@@ -41,15 +41,28 @@ export const interactionPoints = { least: 12, most: 720, usual: 72 } as const;
  */
 export function interactionCurve(
 	section: PreparedSection,
-	{ limit, plane, N = 0, points = interactionPoints.usual }: InteractionRequest
+	request: InteractionRequest
 ): Result<InteractionCurve, Issue> {
+	const steps = interactionTracing(section, request);
+	for (;;) {
+		const { done, value } = steps.next();
+		if (done) return value;
+	}
+}
+
+/** The same curve as a generator, so that it can pause: it yields before every point. */
+export function* interactionTracing(
+	section: PreparedSection,
+	{ limit, plane, N = 0, points = interactionPoints.usual }: InteractionRequest
+): Generator<void, Result<InteractionCurve, Issue>> {
 	const mechanics = mechanicsOf(section);
 	if (limit === 'first-yield' && !isStraight(mechanics)) return fail(bentIssue);
 	if (limit === 'plastic' && !keepsStrength(mechanics)) return fail(lostStrengthIssue);
 	const make = limit === 'plastic' ? plasticCurve : firstYieldCurve;
 	const curve = make(mechanics, plane, N * 1e3);
 	if (curve === null) return fail(outsideIssue(N, limit));
-	const loop = spreadPoints(curve, points - 1).map((point) => inUnits(plane, point, N));
+	const spread = yield* spreadingPoints(curve, points - 1);
+	const loop = spread.map((point) => inUnits(plane, point, N));
 	return ok({ points: [...loop, { ...loop[0]! }] });
 }
 

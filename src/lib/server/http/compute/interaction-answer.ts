@@ -3,7 +3,7 @@ import {
 	type InteractionAnswer,
 	type InteractionRequest
 } from '../../../api/interaction';
-import { interactionCurve } from '../../../engine/response/interaction';
+import { interactionPoints, interactionTracing } from '../../../engine/response/interaction';
 import { fail, ok, type Issue, type Note, type Result } from '../../../engine/result';
 import { prepareSection } from '../../../engine/section/prepare';
 import type { PreparedSection } from '../../../engine/section/prepared';
@@ -11,6 +11,7 @@ import { contractVersion, engineVersion } from '../../../engine/version';
 import { parsed } from '../parse';
 import { invalid, type Refusal } from '../refusal';
 import { ignoredFields } from './ignored-fields';
+import { searchInTurns } from './search-in-turns';
 import { placed, subjectOf, type FindShape } from './subject';
 import { edgesOf } from './work-limit';
 
@@ -19,7 +20,10 @@ const known = Object.keys(interactionRequestSchema.shape);
 /** Points times edges that are computed in about two seconds. */
 const mostWork = 400_000;
 
-const workIssues = ({ points = 0 }: InteractionRequest, section: PreparedSection): Issue[] => {
+const workIssues = (
+	{ points = interactionPoints.usual }: InteractionRequest,
+	section: PreparedSection
+): Issue[] => {
 	const edges = edgesOf(section);
 	const most = Math.floor(mostWork / edges);
 	if (points <= most) return [];
@@ -48,11 +52,13 @@ const runsOverN: Note = {
 
 /**
  * Answer to POST /api/v1/interaction: the loop of one limit in one plane. 400 when a field is wrong,
- * 422 when no such curve exists: N beyond the section, or no straight elastic range.
+ * 422 when no such curve exists: N beyond the section, no straight elastic range, or no full plastic block. Other
+ * requests get their turn between points.
  */
 export const interactionAnswer = async (
 	body: unknown,
-	findShape: FindShape
+	findShape: FindShape,
+	signal?: AbortSignal
 ): Promise<Result<InteractionAnswer, Refusal>> => {
 	const request = parsed(interactionRequestSchema, body);
 	if (!request.ok) return request;
@@ -63,11 +69,14 @@ export const interactionAnswer = async (
 	const tooMuch = workIssues(request.value, section.value);
 	if (tooMuch.length > 0) return fail(invalid(tooMuch));
 	const { limit, plane, N, points } = request.value;
-	const curve = interactionCurve(section.value, {
+	const tracing = interactionTracing(section.value, {
 		...{ limit, plane },
 		...(N === undefined ? {} : { N }),
 		...(points === undefined ? {} : { points })
 	});
+	const traced = await searchInTurns(tracing, signal);
+	if (!traced.ok) return traced;
+	const curve = traced.value;
 	if (!curve.ok) return fail({ ...invalid([curve.error]), status: 422, code: 'no_curve' });
 	return ok({
 		contract: contractVersion,

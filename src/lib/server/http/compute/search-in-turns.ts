@@ -16,7 +16,7 @@ const clientGone: Refusal = {
 const tooMuchWork: Refusal = {
 	status: 422,
 	code: 'too_much_work',
-	message: `This search takes more than ${mostWork / 1000} s. Give fewer demands or a shorter stock.`
+	message: `This takes more than ${mostWork / 1000} s to compute. Ask for less at a time.`
 };
 
 /** Runs a search that can pause to its end, letting other requests in between; `most`: its longest work, ms. */
