@@ -150,7 +150,7 @@ const kinds: readonly ((next: () => number) => SectionDefinition)[] = [
 
 describe('a demand uses all of the section just where its moment is the countable one', () => {
 	it.each(['actual-N', 'proportional'] as const)('α with %s', (classAlpha) => {
-		const rounds = classAlpha === 'actual-N' ? 60 : 20;
+		const rounds = classAlpha === 'actual-N' ? 60 : 8;
 		const next = numbers(classAlpha === 'actual-N' ? 7 : 11);
 		const among = <T>(values: readonly T[]) => values[Math.floor(next() * values.length)]!;
 		for (let i = 0; i < rounds; i++) {
