@@ -33,9 +33,16 @@ const atSchema = (title: string, most: number) =>
 const unloadSchema = strict('unloadFrom', {
 	...atFields(1),
 	N: within('Axial force N', 'kN', ranges.force).optional()
-}).refine((from) => Object.keys(from).filter((field) => field !== 'N').length === 1, {
-	error: 'unloadFrom takes exactly one of curvature, moment, curvatureRatio, strainPlanes.'
-});
+})
+	.refine((from) => Object.keys(from).filter((field) => field !== 'N').length === 1, {
+		error: 'unloadFrom takes exactly one of curvature, moment, curvatureRatio, strainPlanes.'
+	})
+	.refine(
+		(from) => Object.values(from).every((list) => !Array.isArray(list) || list.length === 1),
+		{
+			error: 'unloadFrom takes exactly one value: its list is empty.'
+		}
+	);
 
 const cycleSchema = strict('cycle', {
 	moments: listOf('moments', within('A moment', 'kNm', ranges.moment), limits.states).optional(),

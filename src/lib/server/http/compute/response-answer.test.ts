@@ -193,4 +193,11 @@ describe('responseAnswer', () => {
 		const error = await refusal({ section: flat, at: { curvature: [1] }, law });
 		expect(error?.issues?.[0]?.path).toBe('law');
 	});
+
+	it('refuses to unload from an empty list', async () => {
+		const unloadFrom = { curvature: [] };
+		expect(await refusal({ section: flat, at: { moment: [0] }, unloadFrom })).toMatchObject({
+			...{ status: 400, issues: [{ path: 'unloadFrom' }] }
+		});
+	});
 });

@@ -4,10 +4,11 @@ import type { Bending, Imposed } from '../../../engine/response/respond';
 import type { ResponseState } from '../../../engine/response/state';
 import { noState } from '../../../engine/response/state-report';
 import type { Refusal } from '../refusal';
+import { processorTime } from './processor-time';
 
 /** Longest that other requests wait for a turn, ms. */
 const turn = 25;
-/** Longest work on one request, ms: far above what the limits on states allow on any usual machine. */
+/** Longest work on one request, ms of processor time: far above what the limits on states allow on any usual machine. */
 const mostWork = 10_000;
 
 const clientGone: Refusal = {
@@ -43,18 +44,17 @@ export type InTurns = <T>(steps: Iterable<T>) => Promise<Result<T[], Refusal>>;
  * taken too long, or nobody waits any more.
  */
 export const inTurns = (signal: AbortSignal | undefined): InTurns => {
-	let [started, worked] = [performance.now(), 0];
+	let [started, spent, worked] = [performance.now(), processorTime(), 0];
 	return async (steps) => {
 		const results = [];
 		for (const step of steps) {
 			results.push(step);
-			const now = performance.now();
-			if (now - started < turn) continue;
-			worked += now - started;
+			if (performance.now() - started < turn) continue;
+			worked += processorTime() - spent;
 			if (worked > mostWork) return fail(tooMuchWork);
 			await nextTurn();
 			if (signal?.aborted) return fail(clientGone);
-			started = performance.now();
+			[started, spent] = [performance.now(), processorTime()];
 		}
 		return ok(results);
 	};
