@@ -25,18 +25,27 @@ export interface LabelRoom {
 	readonly bottom: number;
 }
 
+/** A place that something else has: middle and size, px. */
+export interface TakenPlace {
+	readonly x: number;
+	readonly y: number;
+	readonly width: number;
+	readonly height: number;
+}
+
 /** Rows that a label may move up or down. */
 const rows = [0, -1, 1, -2, 2, -3, 3, -5, 5, -8, 8];
 
 /**
- * Labels moved near their points so that none overlaps another and all lie within the room; those
- * with no place left are dropped. Earlier wishes go first.
+ * Labels moved near their points so that none overlaps another or a taken place and all lie within
+ * the room; those with no place left are dropped. Earlier wishes go first.
  */
 export function placedLabels(
 	wishes: readonly LabelWish[],
 	room: LabelRoom,
 	size: number,
-	measure: TextMeasure = roughTextWidth
+	measure: TextMeasure = roughTextWidth,
+	taken: readonly TakenPlace[] = []
 ): PlacedLabel[] {
 	const order = [...wishes].sort((p, q) => Number(q.must ?? false) - Number(p.must ?? false));
 	const placed: PlacedLabel[] = [];
@@ -44,7 +53,7 @@ export function placedLabels(
 		const width = measure(wish.text, size) + 4;
 		const height = size * 1.25;
 		const label = candidates(wish, width, height, room).find(
-			(one) => !placed.some((other) => overlap(one, other))
+			(one) => ![...placed, ...taken].some((other) => overlap(one, other))
 		);
 		if (label) placed.push(label);
 	}
@@ -64,5 +73,5 @@ function candidates(wish: LabelWish, width: number, height: number, room: LabelR
 	);
 }
 
-const overlap = (p: PlacedLabel, q: PlacedLabel): boolean =>
+const overlap = (p: TakenPlace, q: TakenPlace): boolean =>
 	Math.abs(p.x - q.x) < (p.width + q.width) / 2 && Math.abs(p.y - q.y) < (p.height + q.height) / 2;

@@ -7,6 +7,14 @@ import type { LabelWish } from '$lib/drawing/placed-labels';
 type Place = (point: Point) => { x: number; y: number } | null;
 type Length = (millimetres: number) => string;
 
+/** More plates than this are named when pointed at only. */
+const mostNamed = 14;
+/** Letters of a name on the drawing. */
+const mostLetters = 16;
+
+const shortName = (name: string): string =>
+	name.length > mostLetters ? `${name.slice(0, mostLetters - 1).trimEnd()}…` : name;
+
 /** Names of plates on the drawing, the selected one with its size, larger plates first. */
 export function plateWishes(
 	plates: readonly Plate[],
@@ -19,8 +27,11 @@ export function plateWishes(
 		const at = place(namePoint(plate));
 		if (!at) return [];
 		const must = plate.name === selected;
+		if (!must && plates.length > mostNamed) return [];
 		const size = `${length(plate.width)} × ${length(plate.thickness)}`;
-		return [{ key: plate.name, text: must ? `${plate.name} ${size}` : plate.name, ...at, must }];
+		return [
+			{ key: plate.name, text: must ? `${plate.name} ${size}` : shortName(plate.name), ...at, must }
+		];
 	});
 }
 
