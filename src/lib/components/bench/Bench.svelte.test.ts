@@ -128,7 +128,9 @@ describe('demand cases', () => {
 		]);
 		expect(screen.getByRole('button', { name: /Crane.*governs/ })).toBeInTheDocument();
 		await user.click(screen.getByRole('button', { name: /^Case 1/ }));
-		expect(screen.getByText(/governs, at 96/)).toBeInTheDocument();
+		expect(screen.getByRole('region', { name: 'Verdict' })).toHaveTextContent(
+			/Crane governs, at 96/
+		);
 		await user.click(screen.getByRole('button', { name: 'Remove Case 1' }));
 		expect(bench.demands.map(({ name }) => name)).toEqual(['Crane']);
 	});

@@ -8,7 +8,7 @@ import {
 	type Preferences,
 	type Quantity
 } from '$lib/units';
-import type { EffectiveCase } from '../effective-view.svelte';
+import type { EffectiveCase, EffectivePass } from '../effective-view.svelte';
 import { elementTitle } from './element-title';
 
 /** A figure of the gross section beside that of one pass and the converged one. */
@@ -20,9 +20,14 @@ export interface EffectiveRow {
 	readonly converged: string;
 	/** Key of the working of the one-pass figure. */
 	readonly key: string;
+	/** Of the converged figure. */
+	readonly convergedKey: string;
 	/** Of the gross figure; null where the gross section has none to compare. */
 	readonly grossKey: string | null;
 }
+
+/** The converged figures' name among the workings. */
+const convergedBasis = (on: EffectiveCase): string => `${on} converged`;
 
 interface Both {
 	readonly once: EffectiveProperties;
@@ -59,6 +64,7 @@ export function effectiveRows(
 			once: text(once[figure]),
 			converged: text(converged[figure]),
 			key: workingKey.effective(on, figure),
+			convergedKey: workingKey.effective(convergedBasis(on), figure),
 			grossKey: workingKey.gross(figure)
 		};
 	};
@@ -95,6 +101,7 @@ function shiftRows(
 			once: text(once[figure]),
 			converged: text(converged[figure]),
 			key: workingKey.effective(on, figure),
+			convergedKey: workingKey.effective(convergedBasis(on), figure),
 			grossKey: null
 		}));
 }
@@ -111,13 +118,15 @@ export interface ReductionRow {
 export const reductionRows = (
 	on: EffectiveCase,
 	{ elements }: EffectiveProperties,
+	pass: EffectivePass,
 	preferences: Preferences
 ): ReductionRow[] =>
 	elements.map((element) => {
 		const number = (value: number) => formatNumber(value, preferences, { digits: 3 });
 		const length = (value: number) => formatQuantity(value, 'length', preferences, { digits: 4 });
 		const { part, element: id } = element;
-		const key = (figure: string) => workingKey.effectiveWidthFigure(on, part, id, figure);
+		const basis = pass === 'once' ? on : convergedBasis(on);
+		const key = (figure: string) => workingKey.effectiveWidthFigure(basis, part, id, figure);
 		return {
 			title: elementTitle(id, part),
 			reduced: element.rho < 1,
@@ -127,7 +136,7 @@ export const reductionRows = (
 				{ text: number(element.slenderness), key: key('slenderness') },
 				{ text: number(element.rho), key: key('rho') },
 				{ text: length(element.compressedWidth), key: key('compressedWidth') },
-				{ text: length(element.effective), key: workingKey.effectiveWidth(on, part, id) }
+				{ text: length(element.effective), key: workingKey.effectiveWidth(basis, part, id) }
 			]
 		};
 	});

@@ -42,11 +42,16 @@ export function effectiveFrom(
 ): EffectiveSection {
 	const { section, workings } = model;
 	const figures = effectiveProperties(section, once);
-	if (workings && !use) effectiveWorkings(workings, section, basis, once, figures);
+	const last = atRest ?? once;
+	const converged = last === once ? figures : effectiveProperties(section, last);
+	if (workings && !use) {
+		effectiveWorkings(workings, section, basis, once, figures);
+		effectiveWorkings(workings, section, `${basis} converged`, last, converged);
+	}
 	return {
 		...figures,
 		basis,
-		converged: atRest === null || atRest === once ? figures : effectiveProperties(section, atRest),
+		converged,
 		notes: [
 			...(atRest === null ? [notAtRest] : []),
 			...(use ? [stressLevelUsed] : []),

@@ -4,15 +4,14 @@ import type { PreparedSection } from '../../../section/prepared';
 import type { EffectiveProperties } from './effective-properties';
 import type { Reduced } from './reduce';
 import type { Strip } from './strip';
-import type { EffectiveBasis } from './stress-field';
-import { widthWorkings } from './width-workings';
+import { widthWorkings, type ExplainedBasis } from './width-workings';
 import { clause, edition, input } from './working-parts';
 
 /** Workings of every effective width, and of area, centroid, second moments and moduli of what remains. */
 export function effectiveWorkings(
 	workings: Workings,
 	section: PreparedSection,
-	basis: EffectiveBasis,
+	basis: ExplainedBasis,
 	reduced: Reduced,
 	figures: EffectiveProperties
 ): void {

@@ -15,10 +15,13 @@ type Row = readonly [
 	unit: string
 ];
 
+/** One pass under the name of its basis, the figures with the axis at rest beside it. */
+export type ExplainedBasis = EffectiveBasis | `${EffectiveBasis} converged`;
+
 /** Workings of one effective width: ψ, kσ, λp, ρ, bc, be1 and be2 by their names, beff under the element's own key. */
 export function widthWorkings(
 	workings: Workings,
-	basis: EffectiveBasis,
+	basis: ExplainedBasis,
 	width: ElementWidth
 ): void {
 	const { part, id, type } = width.element;
