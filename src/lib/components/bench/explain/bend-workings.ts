@@ -30,12 +30,24 @@ export function rulerWorkings(bench: Bench): Explanation {
 	const { quantity, firstYield, plastic } = bench.ruler;
 	if (bench.activeState || quantity === 'force') return {};
 	const figures = { firstYield, plastic };
-	return Object.fromEntries(
-		(['firstYield', 'plastic'] as const).flatMap((figure) => {
-			const value = figures[figure];
-			return value === null ? [] : [[`ruler.${figure}`, working(bench, figure, value)] as const];
-		})
-	);
+	const limits = (['firstYield', 'plastic'] as const).flatMap((figure) => {
+		const value = figures[figure];
+		return value === null ? [] : [[`ruler.${figure}`, working(bench, figure, value)] as const];
+	});
+	return Object.fromEntries([...limits, ['ruler.demand', demandWorking(bench.activeDemand)]]);
+}
+
+/** Size of the moment that a case asks for. */
+function demandWorking({ name, My = 0, Mz = 0 }: Bench['activeDemand']): Working {
+	const moment = (symbol: string, value: number) => ({ symbol, value, unit: 'kNm', from: name });
+	return {
+		title: 'Moment of the demand',
+		clause: 'mechanics',
+		edition: '—',
+		formula: 'M_Ed = √(M_y² + M_z²)',
+		inputs: [moment('M_y', My), moment('M_z', Mz)],
+		result: { value: Math.sqrt(My ** 2 + Mz ** 2), unit: 'kNm' }
+	};
 }
 
 /** One-line workings of the limits on the curve, which the strain plane gives and no formula. */

@@ -79,7 +79,7 @@ export function rulerKeys({ quantity, N }: RulerModel, state: DemandState | unde
 		return { demand: own('use'), count: own('countableForce'), 'first-yield': null, plastic };
 	}
 	return {
-		demand: own('use'),
+		demand: own('use') ?? 'ruler.demand',
 		count: own('countable'),
 		'first-yield': own('firstYield') ?? 'ruler.firstYield',
 		plastic: own('fullPlastic') ?? 'ruler.plastic'

@@ -96,15 +96,6 @@ describe('the plates form', () => {
 		});
 	});
 
-	it('shows many plates a page at a time', () => {
-		const plates = Array.from({ length: 45 }, (_, i) => ({
-			...{ name: `p${i + 1}`, width: 100, thickness: 10, y: 0, z: 10 * i, angle: 0 }
-		}));
-		open({ kind: 'plates', grade: 'S355', plates });
-		expect(nameFields()).toHaveLength(20);
-		expect(screen.getByText('Plates 1–20 of 45')).toBeInTheDocument();
-	});
-
 	it('goes on from a welded I with free plates', async () => {
 		const { bench, user } = open(openingAddressed.study.section);
 		await user.click(screen.getByText('Turn into free plates'));
