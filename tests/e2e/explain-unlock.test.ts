@@ -102,6 +102,7 @@ describe('settings of the firm', () => {
 
 	it('change what is proposed once the librarian changes the stock', async () => {
 		const page = await openAs('idris', '/rack/stock');
+		await page.waitForLoadState('networkidle');
 		const width = page.getByRole('spinbutton', { name: 'Flange widths, steps of' });
 		await width.fill('50');
 		await width.press('Enter');

@@ -74,6 +74,8 @@ describe('what a section has been through', () => {
 		expect(await stays.textContent()).toContain(
 			`+${(state.extremes?.stressMax ?? Number.NaN).toFixed(1)}`
 		);
+		// the address follows the study a moment later
+		await page.waitForTimeout(1500);
 		await page.reload();
 		await stays.waitFor();
 		await type(field(page, 'κ ÷ κy'), '4');
