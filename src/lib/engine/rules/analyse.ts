@@ -97,7 +97,7 @@ function judged(
 	];
 	if (issues.length > 0) return none(elements === null ? [...notes, ...issues] : issues);
 	// an outline has no resistance until its plates are stated
-	if (section.definition.kind === 'outline') return none(notes);
+	if (section.definition.kind === 'outline') return none([...notes]);
 	const found = outcome(elements);
 	return { ...found, notes: [...notes, ...found.notes] };
 }
