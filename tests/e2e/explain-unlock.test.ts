@@ -107,7 +107,7 @@ describe('settings of the firm', () => {
 		await width.fill('50');
 		await width.press('Enter');
 		await page.getByRole('button', { name: 'Keep the stock' }).click();
-		await page.getByText(/Kept\..*Changed by Idris Vale/).waitFor();
+		await page.getByText(/Kept\.\s*Changed by Idris Vale/).waitFor();
 		await page.goto(`${inject('baseUrl')}/bench`);
 		await page.getByText(/Flanges 400 → 350\smm wide/).waitFor({ timeout: 20_000 });
 		await page.context().close();
