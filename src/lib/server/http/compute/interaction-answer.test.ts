@@ -52,19 +52,6 @@ describe('interactionAnswer', () => {
 		expect(await refusal({ limit: 'ultimate' })).toMatchObject({ issues: [{ path: 'limit' }] });
 	});
 
-	it('lets others in between the points of a section of very many edges', async () => {
-		const outer = Array.from({ length: 2000 }, (_, k) => [
-			...[100 * Math.cos((k * Math.PI) / 1000), 100 * Math.sin((k * Math.PI) / 1000)]
-		]);
-		const section = { kind: 'outline', outer, grade: 355 };
-		let turns = 0;
-		const timer = setInterval(() => turns++, 1);
-		const { points } = await asked({ section, plane: 'N-My' });
-		clearInterval(timer);
-		expect(points).toHaveLength(72);
-		expect(turns).toBeGreaterThan(2);
-	});
-
 	it('has no full plastic curve where the law loses its strength', async () => {
 		const law = {
 			type: 'curve',
