@@ -78,7 +78,7 @@ describe('residual stresses of welding', () => {
 				const [plain, own] = [bending(section, straight), bending(section, straight, history)];
 				expect(own.firstYield).toEqual({ curvature: 0, moment: 0 });
 				expect(own.plasticMoment).toBe(plain.plasticMoment);
-				const far = 2000 * plain.firstYield.curvature!;
+				const far = 8000 * plain.firstYield.curvature!;
 				expect(own.momentAt(far)! / plain.momentAt(far)!).toBeCloseTo(1, 4);
 				const near = plain.firstYield.curvature!;
 				expect(own.momentAt(near)!).toBeLessThan(plain.momentAt(near)!);
