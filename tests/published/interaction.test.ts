@@ -166,25 +166,30 @@ describe('random hybrid sections', () => {
 		);
 	});
 
-	it('lie on the plastic surface of independent cells: no block does more work, one does as much', () => {
+	it('lie on the plastic surface of independent cells: no block does less work, one does as little', () => {
 		fc.assert(
 			fc.property(boxes, requests, (list, { plane }) => {
 				const section = sectionOf(...partsOf(list));
 				const points = curve(section, { limit: 'plastic', plane, points: 241 });
-				const s = scales(points);
-				for (let i = 20; i < 240; i += 73) {
-					const [p, before, after] = [points[i]!, points[i - 1]!, points[i + 1]!];
-					const left = leastSpareWork(list, section, plane, p, before, after);
-					const size =
-						Math.abs(left.normal[0] * s.N) +
-						Math.abs(left.normal[1] * s.My) +
-						Math.abs(left.normal[2] * s.Mz);
-					expect(Math.abs(left.spare) / size).toBeLessThan(3e-3);
-				}
+				for (let i = 20; i < 240; i += 73)
+					expect(Math.abs(leastSpareWork(list, section, points[i]!))).toBeLessThan(1e-3);
 			}),
-			// the normal is taken from neighbouring points, which a corner of the curve between them spoils
-			{ numRuns: 4, interruptAfterTimeLimit: 3000, seed: 1 }
+			{ numRuns: 4, interruptAfterTimeLimit: 3000 }
 		);
+	});
+
+	it('lie on it at corners of the curve too, where neighbours tell no direction', () => {
+		const list: Box[] = [
+			{ left: 0, bottom: 0, width: 1, height: 32, fy: 572.5, fyc: 540.2 },
+			{ left: -8 / 3, bottom: 32, width: 8, height: 2, fy: 422.3, fyc: 218.6 },
+			{ left: 0, bottom: -2, width: 10, height: 2, fy: 180, fyc: 700 }
+		];
+		const section = sectionOf(...partsOf(list));
+		for (const plane of ['N-My', 'N-Mz', 'My-Mz'] as const) {
+			const points = curve(section, { limit: 'plastic', plane, points: 241 });
+			for (let i = 20; i < 240; i += 73)
+				expect(Math.abs(leastSpareWork(list, section, points[i]!))).toBeLessThan(1e-3);
+		}
 	});
 });
 
@@ -232,16 +237,18 @@ function navierUse(list: readonly Box[], { gross }: PreparedSection, p: Interact
 	return use;
 }
 
-/** Work of all cells at their strength less that of the point, for the point's normal and the best strain across. */
+/**
+ * Least work of all cells at their strength less that of the point, as a share of the former, over all
+ * strain planes: 0 for a point on the surface, less outside, more inside. The cells' midpoints give a
+ * little less work than the steel: 1/40² of a plate's depth at most.
+ */
 function leastSpareWork(
 	list: readonly Box[],
-	{ gross: { centroid } }: PreparedSection,
-	plane: 'N-My' | 'N-Mz' | 'My-Mz',
-	p: InteractionPoint,
-	before: InteractionPoint,
-	after: InteractionPoint
-) {
+	{ gross: { centroid, height, width } }: PreparedSection,
+	p: InteractionPoint
+): number {
 	const n = 40;
+	const reach = Math.max(height, width) / 2;
 	const cells = list.flatMap((box) =>
 		Array.from({ length: n * n }, (_, i) => ({
 			y: box.left + (((i % n) + 0.5) / n) * box.width - centroid.y,
@@ -251,28 +258,31 @@ function leastSpareWork(
 			fyc: box.fyc
 		}))
 	);
-	const work = (e0: number, ky: number, kz: number) =>
-		cells.reduce((sum, { y, z, area, ...s }) => {
-			const strain = e0 - ky * z * 1e-3 + kz * y * 1e-3;
-			return sum + (area / 1e3) * (strain > 0 ? s.fy * strain : -s.fyc * strain);
-		}, 0);
-	const normalOf = (free: number): [number, number, number] => {
-		if (plane === 'N-My') return [after.My - before.My, before.N - after.N, free];
-		if (plane === 'N-Mz') return [after.Mz - before.Mz, free, before.N - after.N];
-		return [free, after.Mz - before.Mz, before.My - after.My];
+	const spare = (turn: number, tilt: number) => {
+		const e0 = Math.sin(tilt);
+		const ky = (Math.cos(tilt) * Math.cos(turn)) / reach;
+		const kz = (Math.cos(tilt) * Math.sin(turn)) / reach;
+		let work = 0;
+		for (const cell of cells) {
+			const strain = e0 - ky * cell.z + kz * cell.y;
+			work += cell.area * (strain > 0 ? cell.fy * strain : -cell.fyc * strain);
+		}
+		return 1 - (e0 * p.N * 1e3 + ky * p.My * 1e6 + kz * p.Mz * 1e6) / work;
 	};
-	const spare = (free: number) => {
-		const [a, y, z] = normalOf(free);
-		return work(a, y, z) - (a * p.N + y * p.My + z * p.Mz);
+	let best = { spare: Infinity, turn: 0, tilt: 0 };
+	const tried = (turn: number, tilt: number) => {
+		const own = spare(turn, tilt);
+		const better = own < best.spare;
+		if (better) best = { spare: own, turn, tilt };
+		return better;
 	};
-	const fixed = normalOf(0).map(Math.abs) as [number, number, number];
-	const range = 20 * (10 * fixed[0] + fixed[1] + fixed[2]);
-	let [low, high] = [-range, range];
-	while (high - low > 1e-8 * range) {
-		const [x1, x2] = [low + 0.382 * (high - low), high - 0.382 * (high - low)];
-		if (spare(x1) < spare(x2)) high = x2;
-		else low = x1;
+	for (let i = 0; i < 48; i++)
+		for (let j = 0; j < 24; j++)
+			tried((i * Math.PI) / 24, ((j + 0.5) * Math.PI) / 24 - Math.PI / 2);
+	const ways = [-1, 0, 1].flatMap((a) => [-1, 0, 1].map((b) => [a, b] as const));
+	for (let step = 0.1; step > 1e-5; step /= 2) {
+		let from = best;
+		while (ways.some(([a, b]) => tried(from.turn + a * step, from.tilt + b * step))) from = best;
 	}
-	const free = (low + high) / 2;
-	return { spare: spare(free), normal: normalOf(free) };
+	return best.spare;
 }
